@@ -1,0 +1,5 @@
+import { Screen } from "@/components/ui/screen";
+
+export default function Page() {
+  return <Screen title="orders change">{null}</Screen>;
+}

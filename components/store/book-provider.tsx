@@ -1,0 +1,82 @@
+"use client";
+
+import { QueryClient } from "@tanstack/react-query";
+import { PersistQueryClientProvider } from "@tanstack/react-query-persist-client";
+import { createAsyncStoragePersister } from "@tanstack/query-async-storage-persister";
+import { createStore, del, get, set } from "idb-keyval";
+import { type ReactNode, useEffect, useState } from "react";
+import { SCHEMA_NUMBER } from "@/lib/journal/change";
+import { openBook } from "@/lib/store/book";
+
+/** How many of the last looked-at screens are at hand before the database has opened. */
+const SCREENS_KEPT = 80;
+
+function makeClient(): QueryClient {
+  return new QueryClient({
+    defaultOptions: {
+      // The database tells when rows changed; time alone makes nothing stale. No line is ever needed.
+      queries: {
+        networkMode: "always",
+        staleTime: Infinity,
+        gcTime: Infinity,
+        retry: false,
+        refetchOnWindowFocus: false,
+      },
+    },
+  });
+}
+
+/** Keeps the screens' rows under the name of the book that they are of: another book never sees them. */
+function makePersister() {
+  const store = createStore("notchbook-screens", "screens");
+  const keyOf = async (key: string) => `${key}/${(await openBook().opened).book}`;
+  return createAsyncStoragePersister({
+    storage: {
+      getItem: async (key) => (await get<string>(await keyOf(key), store)) ?? null,
+      setItem: async (key, value) => set(await keyOf(key), value, store),
+      removeItem: async (key) => del(await keyOf(key), store),
+    },
+    throttleTime: 500,
+  });
+}
+
+/** Drops the screens that were looked at longest ago. */
+function prune(client: QueryClient): void {
+  const idle = client
+    .getQueryCache()
+    .getAll()
+    .filter((query) => query.getObserversCount() === 0)
+    .filter((query) => query.queryKey[0] !== "today" && query.queryKey[0] !== "workshop")
+    .sort((a, b) => b.state.dataUpdatedAt - a.state.dataUpdatedAt);
+  for (const query of idle.slice(SCREENS_KEPT)) client.getQueryCache().remove(query);
+}
+
+/** Opens the book for everything below it, with the cache of screens that shows yesterday's at once. */
+export function BookProvider({ children }: { children: ReactNode }) {
+  const [client] = useState(makeClient);
+  const [persister] = useState(makePersister);
+
+  useEffect(() => {
+    const book = openBook();
+    return book.onRowsChanged((applied) => {
+      prune(client);
+      void client.invalidateQueries().then(() => {
+        if (book.pending.trim(applied)) client.removeQueries({ type: "inactive" });
+      });
+    });
+  }, [client]);
+
+  return (
+    <PersistQueryClientProvider
+      client={client}
+      persistOptions={{
+        persister,
+        maxAge: Infinity,
+        buster: String(SCHEMA_NUMBER),
+        dehydrateOptions: { shouldDehydrateQuery: (query) => query.state.status === "success" },
+      }}
+    >
+      {children}
+    </PersistQueryClientProvider>
+  );
+}

@@ -1,0 +1,87 @@
+"use client";
+
+import { useQuery } from "@tanstack/react-query";
+import { useCallback, useMemo, useState, useSyncExternalStore } from "react";
+import { type Change, type Write } from "@/lib/journal/change";
+import { type Numbers } from "@/lib/journal/journal";
+import { overlay } from "@/lib/journal/merge";
+import { type Workshop } from "@/lib/records/types";
+import { type BookState, openBook } from "@/lib/store/book";
+import { type KeepProblem, keepProblem } from "@/lib/store/keep-problem";
+import { type Query } from "@/lib/store/query";
+import { workshopQuery } from "@/lib/store/queries/workshop";
+
+const unopened: BookState = { phase: "reading-journal" };
+const noChanges: readonly Change[] = [];
+const noSubscription = () => () => undefined;
+const onServer = typeof window === "undefined";
+
+/** Where the book stands: storage, database, numbers. */
+export function useBookState(): BookState {
+  return useSyncExternalStore(
+    onServer ? noSubscription : openBook().subscribe,
+    onServer ? () => unopened : openBook().state,
+    () => unopened,
+  );
+}
+
+export interface Viewed<V> {
+  view: V;
+  /**
+   * "known": from the database or from the last time it was looked at. "opening": only what was kept since the
+   * start is known as yet. "failed": the database cannot answer.
+   */
+  state: "known" | "opening" | "failed";
+}
+
+/** What a query shows now: the database's rows, or the last seen, with every kept change laid over them. */
+export function useView<A, V>(query: Query<A, V>, args: A): Viewed<V> {
+  const { data, isError } = useQuery({
+    queryKey: [query.name, args],
+    queryFn: () => openBook().read(query.name, args),
+    // A list that is being searched goes on showing the last answer until the next one is there.
+    placeholderData: (previous, before) => (before?.queryKey[0] === query.name ? previous : undefined),
+  });
+  const pending = useSyncExternalStore(
+    onServer ? noSubscription : openBook().pending.subscribe,
+    onServer ? () => noChanges : openBook().pending.all,
+    () => noChanges,
+  );
+  const key = JSON.stringify(args);
+  const view = useMemo(
+    () => query.view(overlay(data ?? {}, pending), JSON.parse(key) as A),
+    [query, data, pending, key],
+  );
+  return { view, state: data ? "known" : isError ? "failed" : "opening" };
+}
+
+/** The workshop, or null where none is known (not begun yet, or still opening). */
+export function useWorkshop(): Workshop | null {
+  return useView(workshopQuery, {}).view;
+}
+
+export interface Keeping {
+  /** Keeps one change. Resolves to it, or to null where it could not be kept: then `problem` says why. */
+  keep(build: Write[] | ((numbers: Numbers) => Write[])): Promise<Change | null>;
+  busy: boolean;
+  problem: KeepProblem | null;
+}
+
+/** Keeping from a screen, with its state to show. */
+export function useKeep(): Keeping {
+  const [busy, setBusy] = useState(false);
+  const [problem, setProblem] = useState<KeepProblem | null>(null);
+  const keep = useCallback<Keeping["keep"]>(async (build) => {
+    setBusy(true);
+    setProblem(null);
+    try {
+      return await openBook().keep(build);
+    } catch (error) {
+      setProblem(keepProblem(error));
+      return null;
+    } finally {
+      setBusy(false);
+    }
+  }, []);
+  return { keep, busy, problem };
+}

@@ -1,0 +1,155 @@
+/**
+ * The journal: every change stands here, durably, before anything says that it is kept (sync contract L1 to
+ * L3). It is also the queue of changes that wait to be sent, and what a spoilt database is made again from.
+ *
+ * One object store: numbers are the changes by their number, "head" is the device's own state. IndexedDB runs
+ * one writing transaction on it at a time, over all tabs, so that neither a change's number nor a receipt's can
+ * go out twice.
+ */
+import { promisifyRequest, type UseStore } from "idb-keyval";
+import { v4 as uuidv4 } from "uuid";
+import { type Clock, newClock, observe, tick, writeStamp } from "@/lib/clock/stamp";
+import { receiptNumber, seriesOf } from "@/lib/receipts/number";
+import { type Change, newId, type RowChange, SCHEMA_NUMBER, type Write } from "./change";
+
+export interface Head {
+  /** This install, as a UUID. A new book on the same phone is a new device. */
+  device: string;
+  /** Names the browser's database; another after everything was cleared. */
+  book: string;
+  workshopId: string;
+  /** The number that the next change takes. */
+  next: number;
+  /** The number that the next receipt of this device takes. */
+  nextReceipt: number;
+  clock: Clock;
+  /** Last change that a reopened database was seen to hold. */
+  confirmed: number;
+  /** The last copy that was saved: the change it went up to, and when. */
+  lastCopy: { number: number; at: string } | null;
+}
+
+/** Hands out receipt numbers while a change is being built. */
+export interface Numbers {
+  receipt(): string;
+}
+
+export interface Journal {
+  /** The device's state; made at the first call. */
+  head(): Promise<Head>;
+  /**
+   * Keeps one change. `build` is called inside the transaction and must not wait for anything.
+   * Resolves when the change has reached the disk; rejects, with nothing kept, when it could not be.
+   */
+  append(build: (numbers: Numbers) => Write[]): Promise<Change>;
+  /** Keeps rows with the stamps they already have (a copy that is read back), as one change. */
+  appendRows(rows: RowChange[], workshopId: string): Promise<Change>;
+  /** Changes numbered above `after`, in order, at most `limit`. */
+  since(after: number, limit?: number): Promise<Change[]>;
+  /** Notes what a reopened database was seen to hold. */
+  confirm(number: number): Promise<Head>;
+  /** Notes that a copy of everything up to now was saved. */
+  noteCopy(): Promise<Head>;
+  /** Empties everything in one transaction and begins a new book for `workshopId`. */
+  startAnew(workshopId?: string): Promise<Head>;
+}
+
+function freshHead(workshopId: string = newId()): Head {
+  return {
+    device: uuidv4(),
+    book: uuidv4(),
+    workshopId,
+    next: 1,
+    nextReceipt: 1,
+    clock: newClock,
+    confirmed: 0,
+    lastCopy: null,
+  };
+}
+
+function stamped(writes: Write[], stamp: string): RowChange[] {
+  return writes
+    .filter((write) => write.makes || Object.keys(write.fields).length > 0)
+    .map(({ table, id, makes, fields, bases }) => ({
+      table,
+      id,
+      makes,
+      fields: Object.fromEntries(
+        Object.entries(fields).map(([name, value]) => [
+          name,
+          { value: value ?? null, stamp, base: bases[name] ?? null },
+        ]),
+      ),
+    }));
+}
+
+export function openJournal(store: UseStore, now: () => number = Date.now): Journal {
+  const readHead = async (objects: IDBObjectStore): Promise<Head> => {
+    const held = await promisifyRequest<Head | undefined>(objects.get("head"));
+    return held ?? freshHead();
+  };
+
+  const put = (build: (head: Head, stamp: string, numbers: Numbers) => RowChange[], workshopId?: string) =>
+    store("readwrite", async (objects) => {
+      const done = promisifyRequest(objects.transaction);
+      // A failing request also rejects below; the transaction's own rejection must not go unheard.
+      done.catch(() => undefined);
+      const head = await readHead(objects);
+      let clock = tick(head.clock, now());
+      let nextReceipt = head.nextReceipt;
+      const rows = build(head, writeStamp(clock, head.device), {
+        receipt: () => receiptNumber(seriesOf(head.device), nextReceipt++),
+      });
+      for (const row of rows)
+        for (const field of Object.values(row.fields)) clock = observe(clock, field.stamp);
+      const change: Change = {
+        number: head.next,
+        device: head.device,
+        workshopId: workshopId ?? head.workshopId,
+        schema: SCHEMA_NUMBER,
+        writtenAt: new Date(now()).toISOString(),
+        rows,
+      };
+      objects.put(change, change.number);
+      objects.put({ ...head, clock, nextReceipt, next: head.next + 1 } satisfies Head, "head");
+      await done;
+      return change;
+    });
+
+  const updateHead = async (change: (head: Head) => Head): Promise<Head> =>
+    store("readwrite", async (objects) => {
+      const done = promisifyRequest(objects.transaction);
+      const head = change(await readHead(objects));
+      objects.put(head, "head");
+      await done;
+      return head;
+    });
+
+  return {
+    head: async () =>
+      (await store("readonly", (objects) => promisifyRequest<Head | undefined>(objects.get("head")))) ??
+      updateHead((head) => head),
+    append: (build) => put((_head, stamp, numbers) => stamped(build(numbers), stamp)),
+    appendRows: (rows, workshopId) => put(() => rows, workshopId),
+    since: (after, limit) =>
+      store("readonly", (objects) =>
+        promisifyRequest<Change[]>(objects.getAll(IDBKeyRange.bound(after, Infinity, true), limit)),
+      ),
+    confirm: (number) =>
+      updateHead((head) => (number > head.confirmed ? { ...head, confirmed: number } : head)),
+    noteCopy: () =>
+      updateHead((head) => ({
+        ...head,
+        lastCopy: { number: head.next - 1, at: new Date(now()).toISOString() },
+      })),
+    startAnew: (workshopId) =>
+      store("readwrite", async (objects) => {
+        const done = promisifyRequest(objects.transaction);
+        const head = freshHead(workshopId);
+        objects.clear();
+        objects.put(head, "head");
+        await done;
+        return head;
+      }),
+  };
+}

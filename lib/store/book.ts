@@ -1,0 +1,197 @@
+/**
+ * The book as a tab sees it: writes through the journal, reads from whichever tab's database leads. One per
+ * tab; `openBook` makes it.
+ */
+import { type Endpoint, type Remote, wrap } from "comlink";
+import { type Change, type RowChange, type Write } from "@/lib/journal/change";
+import { type Head, type Journal, type Numbers, openJournal } from "@/lib/journal/journal";
+import { type AnyRow, type Rows } from "@/lib/journal/merge";
+import { strictStore } from "@/lib/journal/strict-store";
+import { type TableName } from "@/lib/records/types";
+import { CALLS_CHANNEL, type DatabaseState, JOURNAL_NAME, type News, openNews } from "./channels";
+import { type DatabaseApi } from "./database-api";
+import { keepProblem } from "./keep-problem";
+import { Pending } from "./pending";
+
+/** A leader that closes takes its answers with it: ask again after this. Reads have no effect, so may be. */
+const ANSWER_WITHIN_MS = 8000;
+const TRIES = 4;
+
+export type BookState =
+  | { phase: "reading-journal" }
+  /** IndexedDB itself is refused: nothing can be kept in this browser. */
+  | { phase: "no-storage"; say: string }
+  | { phase: "open"; head: Head; database: DatabaseState };
+
+export class Book {
+  readonly pending = new Pending();
+  private readonly journal: Journal;
+  private readonly calls: Remote<DatabaseApi>;
+  private readonly news: ReturnType<typeof openNews>;
+  private readonly listeners = new Set<() => void>();
+  private readonly changeListeners = new Set<(applied: number) => void>();
+  private current: BookState = { phase: "reading-journal" };
+  /** The device's state as it was when the book was opened; rejects where storage is refused. */
+  readonly opened: Promise<Head>;
+  private worker: Worker | undefined;
+  private readyWaiters: (() => void)[] = [];
+
+  constructor(private readonly startWorker: () => Worker) {
+    this.journal = openJournal(strictStore(JOURNAL_NAME, "journal"));
+    this.calls = wrap<DatabaseApi>(new BroadcastChannel(CALLS_CHANNEL) as unknown as Endpoint);
+    this.news = openNews((item) => this.hear(item));
+    this.opened = this.journal.head();
+    void this.open();
+  }
+
+  readonly subscribe = (listener: () => void): (() => void) => {
+    this.listeners.add(listener);
+    return () => this.listeners.delete(listener);
+  };
+
+  readonly state = (): BookState => this.current;
+
+  /** Calls back when rows of the database may have changed. */
+  onRowsChanged(listener: (applied: number) => void): () => void {
+    this.changeListeners.add(listener);
+    return () => this.changeListeners.delete(listener);
+  }
+
+  /**
+   * Keeps one change and shows it. Resolves when it has reached the disk.
+   * @throws KeepProblem, with words for the user, and nothing kept.
+   */
+  async keep(build: Write[] | ((numbers: Numbers) => Write[])): Promise<Change> {
+    try {
+      return this.show(await this.journal.append(typeof build === "function" ? build : () => build));
+    } catch (error) {
+      throw keepProblem(error);
+    }
+  }
+
+  /** Keeps rows of a copy with the stamps they have. @throws KeepProblem */
+  async keepRows(rows: RowChange[]): Promise<void> {
+    try {
+      const head = await this.journal.head();
+      this.show(await this.journal.appendRows(rows, head.workshopId));
+    } catch (error) {
+      throw keepProblem(error);
+    }
+  }
+
+  /** Clears everything on this phone and begins an empty book; every tab starts again. @throws KeepProblem */
+  async startAnew(workshopId?: string): Promise<void> {
+    try {
+      await this.journal.startAnew(workshopId);
+    } catch (error) {
+      throw keepProblem(error);
+    }
+  }
+
+  /** Tells every other tab to begin again, after `startAnew` and what was to follow it. */
+  tellBookChanged(): void {
+    this.news.tell({ kind: "book-changed" });
+  }
+
+  /** Notes that a copy of everything up to now was saved. */
+  async noteCopy(): Promise<void> {
+    await this.journal.noteCopy();
+    await this.refreshHead();
+  }
+
+  /** All changes in the journal after one, for a copy without the database. */
+  changesSince(after: number, limit?: number): Promise<Change[]> {
+    return this.journal.since(after, limit);
+  }
+
+  async read(queryName: string, args: unknown): Promise<Rows> {
+    return this.ask(() => this.calls.read(queryName, args));
+  }
+
+  async page(table: TableName, afterId: string | null, limit: number): Promise<AnyRow[]> {
+    return this.ask(() => this.calls.page(table, afterId, limit));
+  }
+
+  private async ask<T>(call: () => Promise<T>): Promise<T> {
+    for (let tried = 1; ; tried++) {
+      await this.ready();
+      let timer: ReturnType<typeof setTimeout> | undefined;
+      const late = new Promise<"late">((resolve) => {
+        timer = setTimeout(() => resolve("late"), ANSWER_WITHIN_MS);
+      });
+      const answer = await Promise.race([call(), late]).finally(() => clearTimeout(timer));
+      if (answer !== "late") return answer;
+      if (tried >= TRIES) throw new Error("The database does not answer.");
+      this.news.tell({ kind: "state-wanted" });
+    }
+  }
+
+  private ready(): Promise<void> {
+    if (this.current.phase === "open" && this.current.database.phase === "ready") return Promise.resolve();
+    return new Promise((resolve) => this.readyWaiters.push(resolve));
+  }
+
+  private async open(): Promise<void> {
+    try {
+      const head = await this.opened;
+      this.pending.add(await this.journal.since(head.confirmed));
+      this.become({ phase: "open", head, database: { phase: "waiting" } });
+    } catch (error) {
+      this.become({ phase: "no-storage", say: keepProblem(error).message });
+      return;
+    }
+    this.news.tell({ kind: "state-wanted" });
+    this.worker = this.startWorker();
+    this.worker.onerror = (event) =>
+      this.setDatabase({ phase: "failed", say: event.message || "The database's program could not be loaded." });
+  }
+
+  private show(change: Change): Change {
+    this.pending.add([change]);
+    this.news.tell({ kind: "journal-grew" });
+    void this.refreshHead();
+    return change;
+  }
+
+  private async refreshHead(): Promise<void> {
+    const head = await this.journal.head().catch(() => null);
+    if (head && this.current.phase === "open") this.become({ ...this.current, head });
+  }
+
+  private async catchUpWithOthers(): Promise<void> {
+    this.pending.add(await this.journal.since(this.pending.last));
+    await this.refreshHead();
+  }
+
+  private hear(item: News): void {
+    if (item.kind === "journal-grew") void this.catchUpWithOthers().catch(() => undefined);
+    if (item.kind === "state") this.setDatabase(item.state);
+    if (item.kind === "rows-changed") this.tellRowsChanged(item.applied);
+    if (item.kind === "book-changed") location.assign("/");
+  }
+
+  private setDatabase(database: DatabaseState): void {
+    if (this.current.phase !== "open") return;
+    this.become({ ...this.current, database });
+    if (database.phase !== "ready") return;
+    for (const resolve of this.readyWaiters.splice(0)) resolve();
+    this.tellRowsChanged(database.applied);
+  }
+
+  private tellRowsChanged(applied: number): void {
+    for (const listener of this.changeListeners) listener(applied);
+  }
+
+  private become(next: BookState): void {
+    this.current = next;
+    for (const listener of this.listeners) listener();
+  }
+}
+
+let book: Book | undefined;
+
+/** This tab's book; browser only. */
+export function openBook(): Book {
+  book ??= new Book(() => new Worker(new URL("../../worker/database.ts", import.meta.url), { type: "module" }));
+  return book;
+}

@@ -1,0 +1,33 @@
+/** What tabs and the database's worker tell each other. All of them hear all of it, except the one who speaks. */
+
+export const DATABASE_LOCK = "notchbook-database";
+export const CALLS_CHANNEL = "notchbook-calls";
+export const NEWS_CHANNEL = "notchbook-news";
+export const JOURNAL_NAME = "notchbook-journal";
+export const DRAFTS_NAME = "notchbook-drafts";
+export const databaseName = (book: string): string => `notchbook-${book}`;
+
+/** Where the browser's database stands, as told to every tab. */
+export type DatabaseState =
+  | { phase: "waiting" }
+  | { phase: "fetching"; done: number; of: number }
+  | { phase: "opening" }
+  /** Following the journal: `done` of `of` changes. */
+  | { phase: "reading"; done: number; of: number }
+  | { phase: "ready"; applied: number; rebuilt: boolean }
+  | { phase: "failed"; say: string };
+
+export type News =
+  | { kind: "journal-grew" }
+  | { kind: "state"; state: DatabaseState }
+  | { kind: "state-wanted" }
+  /** Rows of the database changed; it has now followed the journal to `applied`. */
+  | { kind: "rows-changed"; applied: number }
+  /** Everything was cleared, or another book was read in: every tab begins again. */
+  | { kind: "book-changed" };
+
+export function openNews(hear: (news: News) => void): { tell(news: News): void; close(): void } {
+  const channel = new BroadcastChannel(NEWS_CHANNEL);
+  channel.onmessage = (event: MessageEvent<News>) => hear(event.data);
+  return { tell: (news) => channel.postMessage(news), close: () => channel.close() };
+}

@@ -1,0 +1,30 @@
+/** Why the phone could not keep something, in words for its owner. */
+export class KeepProblem extends Error {
+  constructor(
+    message: string,
+    override readonly cause: unknown,
+  ) {
+    super(message);
+    this.name = "KeepProblem";
+  }
+}
+
+/** Reads a browser's error while writing to the journal. */
+export function keepProblem(error: unknown): KeepProblem {
+  if (error instanceof KeepProblem) return error;
+  const name = error instanceof DOMException || error instanceof Error ? error.name : "";
+  if (name === "QuotaExceededError")
+    return new KeepProblem(
+      "Not kept: this phone has no room left. Nothing you typed is lost. Delete photos or apps you do not need, then press again.",
+      error,
+    );
+  if (name === "InvalidStateError" || name === "SecurityError" || name === "NotAllowedError")
+    return new KeepProblem(
+      "Not kept: the browser does not let Notchbook write to this phone. A private window keeps nothing; open Notchbook in an ordinary one, then press again.",
+      error,
+    );
+  return new KeepProblem(
+    "Not kept: the phone's storage did not answer. Nothing you typed is lost. Press again; if it fails again, save a copy under Workshop and restart the phone.",
+    error,
+  );
+}

@@ -1,0 +1,71 @@
+import { type Garment, type Order } from "@/lib/records/types";
+import { byKey, compareText, liveRowsOf, type Query } from "../query";
+import { dueKey, orderItems, type OrderListItem, withOrderParts } from "./orders";
+
+export interface FittingItem extends OrderListItem {
+  garment: Garment;
+}
+
+export interface TodayView {
+  /** Past their day and not handed over. */
+  late: OrderListItem[];
+  /** Due today or in the next seven days. */
+  due: OrderListItem[];
+  /** Fittings from seven days back (not to be forgotten) to seven ahead. */
+  fittings: FittingItem[];
+  /** Handed over with money still to come, or money to give back. */
+  owed: OrderListItem[];
+  /** Open orders due later or with no day. */
+  laterCount: number;
+  /** False where there is not one order in the book. */
+  anyOrder: boolean;
+}
+
+/** How many orders Today looks at; a home workshop has a few dozen open. */
+const LIMIT = 200;
+const DAYS = 7;
+
+/** The ISO date `days` after `on`. */
+export function addDays(on: string, days: number): string {
+  return new Date(Date.parse(`${on}T00:00:00Z`) + days * 86_400_000).toISOString().slice(0, 10);
+}
+
+/** What today asks for. `on` is today's ISO date where she is. */
+export const todayQuery: Query<{ on: string }, TodayView> = {
+  name: "today",
+  need: async (source) => {
+    const [open, owing, newest] = await Promise.all([
+      source.ordersOpen(LIMIT),
+      source.ordersOwing(LIMIT),
+      source.newest("orders", 1),
+    ]);
+    const orders = new Map([...open, ...owing, ...newest].map((row) => [row.id, row]));
+    return withOrderParts(source, [...orders.values()]);
+  },
+  view: (rows, { on }) => {
+    const live = liveRowsOf(rows, "orders");
+    const open = live.filter((order) => order.stage !== "handed-over").sort(byKey(dueKey)).slice(0, LIMIT);
+    const soon = addDays(on, DAYS);
+    const items = orderItems(rows, open);
+    const late = items.filter(({ order }) => order.dueOn !== null && order.dueOn < on);
+    const due = items.filter(({ order }) => order.dueOn !== null && order.dueOn >= on && order.dueOn <= soon);
+    const back = addDays(on, -DAYS);
+    const fittings = items
+      .flatMap((item) => item.garments.map((garment) => ({ ...item, garment })))
+      .filter(({ garment }) => garment.fittingOn !== null && garment.fittingOn >= back && garment.fittingOn <= soon)
+      .sort((a, b) => compareText(a.garment.fittingOn!, b.garment.fittingOn!) || compareText(a.garment.id, b.garment.id));
+    const owed = orderItems(rows, live)
+      .filter(({ sums }) => sums.balanceMinor !== 0)
+      .sort((a, b) => byKey<Order>((order) => order.agreedOn)(a.order, b.order))
+      .slice(0, LIMIT)
+      .filter(({ order, sums }) => order.stage === "handed-over" || sums.balanceMinor < 0);
+    return {
+      late,
+      due,
+      fittings,
+      owed,
+      laterCount: items.length - late.length - due.length,
+      anyOrder: live.length > 0,
+    };
+  },
+};
