@@ -71,8 +71,8 @@ const config: Config = {
       lg: ["1.3125rem", { lineHeight: "1.35" }],
       xl: ["1.625rem", { lineHeight: "1.2" }],
       "2xl": ["2rem", { lineHeight: "1.15" }],
-      figure: ["2.75rem", { lineHeight: "1" }],
-      giant: ["4.75rem", { lineHeight: "1" }],
+      figure: ["clamp(2.25rem, 13vw, 2.75rem)", { lineHeight: "1" }],
+      giant: ["clamp(2.75rem, 21vw, 4.75rem)", { lineHeight: "1" }],
     },
     borderRadius: { none: "0", DEFAULT: "0.25rem", lg: "0.5rem", full: "9999px" },
     extend: {

@@ -140,4 +140,12 @@ function sayWhy(error: unknown): string {
   return error instanceof Error ? `${error.name}: ${error.message}` : String(error);
 }
 
+/**
+ * Saving in the background (relaxed), PGlite may meet a file that PostgreSQL has just removed; that round of
+ * saving fails with Emscripten's ErrnoError and the next one does it. Nothing is lost: the journal has it.
+ */
+self.addEventListener("unhandledrejection", (event) => {
+  if ((event.reason as { name?: string } | null)?.name === "ErrnoError") event.preventDefault();
+});
+
 void navigator.locks.request(DATABASE_LOCK, lead);

@@ -25,9 +25,9 @@ export const places: readonly Place[] = [
     // A threaded needle.
     drawing: (
       <Drawing>
-        <path d="M3.5 20.5 16.3 7.7" />
-        <path d="M16.3 7.7c-.9-1.5.3-3.9 1.7-4.4s3 1.1 2.6 2.5-2.7 2.7-4.3 1.9z" />
-        <path d="M18.5 5.5C15.5 2.5 10 3.5 9 6.5s-4 2-5.5 5" />
+        <path d="M3.5 20.5 15.6 8.4" />
+        <ellipse cx="17.9" cy="6.1" rx="1.7" ry="3.3" transform="rotate(45 17.9 6.1)" />
+        <path d="M17.9 6.1C15.5 1.8 9.5 2.6 9 6s-3.5 3.6-6 4.5" />
       </Drawing>
     ),
   },

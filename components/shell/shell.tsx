@@ -17,11 +17,13 @@ export function Shell({ kept, banners, children }: ShellProps) {
       <a href="#main" className="skip-link">
         Go to the screen
       </a>
-      <TabBar />
-      <div className="shell-body">
-        {kept}
-        {banners}
-        {children}
+      <div className="shell-frame">
+        <TabBar />
+        <div className="shell-body">
+          {kept}
+          {banners}
+          {children}
+        </div>
       </div>
     </div>
   );

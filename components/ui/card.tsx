@@ -52,7 +52,7 @@ export function CardHead({ title, sub, end, level = 2, id, className }: CardHead
         </Heading>
         {sub && <p className="text-soft">{sub}</p>}
       </div>
-      {end && <div className="shrink-0">{end}</div>}
+      {end && <div className="min-w-0">{end}</div>}
     </header>
   );
 }
@@ -77,11 +77,13 @@ function RowBody({ title, sub, figure, sign }: RowSaid) {
   return (
     <>
       {sign && <span className="flex w-6 shrink-0 justify-center">{sign}</span>}
-      <span className="min-w-[8rem] flex-1">
-        <span className="block font-semibold wrap-anywhere">{title}</span>
-        {sub && <span className="block text-sm text-soft">{sub}</span>}
+      <span className="flex min-w-0 flex-1 flex-wrap items-center justify-between gap-x-3 gap-y-1">
+        <span className="min-w-0 flex-1 basis-32">
+          <span className="block font-semibold wrap-anywhere">{title}</span>
+          {sub && <span className="block text-sm text-soft">{sub}</span>}
+        </span>
+        {figure !== undefined && <span className="figures text-lg font-semibold">{figure}</span>}
       </span>
-      {figure !== undefined && <span className="figures shrink-0 text-lg font-semibold">{figure}</span>}
     </>
   );
 }

@@ -162,7 +162,9 @@ export function Choice<Value extends string = string>({
   const errorId = error ? `${id}-error` : undefined;
   return (
     <fieldset
+      role="radiogroup"
       className={cx("grid min-w-0 gap-1.5", className)}
+      aria-invalid={error ? true : undefined}
       aria-describedby={cx(errorId, hintId) || undefined}
     >
       <legend className={bare ? "sr-only" : "mb-1.5 font-semibold"}>{label}</legend>
@@ -176,7 +178,6 @@ export function Choice<Value extends string = string>({
               type="radio"
               value={option.value}
               disabled={rest.disabled || option.disabled}
-              aria-invalid={error ? true : undefined}
               className="sr-only"
               {...(value !== undefined && { checked: value === option.value })}
               {...(defaultValue !== undefined && { defaultChecked: defaultValue === option.value })}

@@ -36,14 +36,20 @@ export function Tape({ unit, run = "across", className }: TapeProps) {
     <svg
       aria-hidden="true"
       className={cx(
-        "block text-edge",
+        "tape block text-edge",
         across ? "h-3.5 w-full border-t-2" : "h-full w-3.5 border-s-2",
         className,
       )}
       style={{ borderColor: "currentColor" }}
     >
       <defs>
-        <pattern id={id} width={width} height={height} patternUnits="userSpaceOnUse">
+        <pattern
+          id={id}
+          width={`${width / 16}rem`}
+          height={`${height / 16}rem`}
+          viewBox={`0 0 ${width} ${height}`}
+          patternUnits="userSpaceOnUse"
+        >
           <path d={d} stroke="currentColor" strokeWidth="1.5" fill="none" />
         </pattern>
       </defs>

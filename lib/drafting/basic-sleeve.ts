@@ -79,7 +79,9 @@ export function draftBasicSleeve(figures: SleeveFigures): Result<SleeveDraft> {
     { name: "hem", curves: [line(backSide.at(-1)!, frontSide.at(-1)!)] },
     { name: "underarmFront", curves: chainOf([...frontSide].reverse()) },
   ];
-  const [lengthFront, lengthBack, underarmBack, hem, underarmFront] = edges.map((edge) => chainLength(edge.curves));
+  const [lengthFront, lengthBack, underarmBack, hem, underarmFront] = edges.map((edge) =>
+    chainLength(edge.curves),
+  );
   const room = Math.min(figures.capDepth, figures.length - figures.capDepth) / 4;
   const grain = { from: { x: 0, y: room }, to: { x: 0, y: figures.length - room } };
   const notchBack = lengthBack! - figures.notches.back;
@@ -147,7 +149,14 @@ function chainOf(points: readonly Point[]): CubicBezier[] {
   return points.slice(1).map((point, i) => line(points[i]!, point));
 }
 
-function linePoints({ length, capDepth, biceps, hem, elbow, beside }: SleeveFigures): Partial<Record<PointName, Point>> {
+function linePoints({
+  length,
+  capDepth,
+  biceps,
+  hem,
+  elbow,
+  beside,
+}: SleeveFigures): Partial<Record<PointName, Point>> {
   return {
     crown: { x: 0, y: 0 },
     capCentre: { x: 0, y: capDepth },

@@ -43,7 +43,9 @@ function chordsOf(knots: readonly Knot[]): Chords {
 }
 
 /** Fair chain from the underarm point to the crown, or the knot that stands in its way. */
-export function capSeam(knots: readonly Knot[]): { readonly chain: CubicBezier[] } | { readonly fault: CapFault } {
+export function capSeam(
+  knots: readonly Knot[],
+): { readonly chain: CubicBezier[] } | { readonly fault: CapFault } {
   const fault = knotFault(knots);
   if (fault) return { fault };
   const chain = capChain(knots);

@@ -60,7 +60,10 @@ export function guideLine(figures: GuideFigures, side: Side): GuideLine {
   const up = { x: (top.x - underarm.x) / length, y: (top.y - underarm.y) / length };
   const raised = { x: -s * up.y, y: s * up.x };
   const feet = figures[side].map((mark) => lerp(underarm, top, mark.share));
-  const marks = figures[side].map(({ out }, i) => ({ x: feet[i]!.x + raised.x * out, y: feet[i]!.y + raised.y * out }));
+  const marks = figures[side].map(({ out }, i) => ({
+    x: feet[i]!.x + raised.x * out,
+    y: feet[i]!.y + raised.y * out,
+  }));
   return { underarm, top, length, feet, marks };
 }
 
@@ -69,5 +72,8 @@ export function halfKnots(figures: GuideFigures, side: Side): Point[] {
   const s = across(side);
   const crown = { x: 0, y: 0 };
   const { underarm, marks } = guideLine(figures, side);
-  return [underarm, ...marks, crown].map(({ x, y }) => ({ x: figures.biceps / 2 - s * x, y: figures.capDepth - y }));
+  return [underarm, ...marks, crown].map(({ x, y }) => ({
+    x: figures.biceps / 2 - s * x,
+    y: figures.capDepth - y,
+  }));
 }

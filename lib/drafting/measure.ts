@@ -137,8 +137,7 @@ export function area(piece: Pick<Piece, "edges">): number {
   let sum = 0;
   for (const edge of piece.edges) {
     for (const [a, b, c, d] of edge.curves) {
-      sum +=
-        6 * (cross(a, b) + cross(c, d)) + 3 * (cross(a, c) + cross(b, c) + cross(b, d)) + cross(a, d);
+      sum += 6 * (cross(a, b) + cross(c, d)) + 3 * (cross(a, c) + cross(b, c) + cross(b, d)) + cross(a, d);
     }
   }
   return sum / 20;

@@ -121,4 +121,6 @@ export interface SleeveAsk {
   readonly hand?: number;
 }
 
-export type Result<T> = { readonly ok: true; readonly value: T } | { readonly ok: false; readonly problems: readonly DraftProblem[] };
+export type Result<T> =
+  | { readonly ok: true; readonly value: T }
+  | { readonly ok: false; readonly problems: readonly DraftProblem[] };

@@ -5,6 +5,7 @@ import { formatPlain } from "@/lib/lengths/format-length";
 import { type Phrase } from "@/lib/lengths/phrase";
 import { mmPerInch } from "@/lib/lengths/units";
 import { type IsoDate, daysBetween } from "@/lib/people/iso-date";
+import { type Unit } from "@/lib/records/types";
 
 /** Something to look at once more. It never blocks: the figure can be kept as it is. */
 export interface Question {
@@ -23,6 +24,8 @@ export interface AskContext {
   /** The other figures of this set, in mm, by measure. */
   others: Partial<Record<MeasureKey, number>>;
   today: IsoDate;
+  /** The unit that the figure was typed in, where known: a slip is then only looked for from that one. */
+  unit?: Unit;
 }
 
 const practice = { source: "common practice, no source", mark: "practice" } as const;
@@ -35,7 +38,7 @@ const practice = { source: "common practice, no source", mark: "practice" } as c
  */
 export function askAbout(figure: MeasureKey, mm: number, context: AskContext): Question[] {
   const bounds = usualBounds(figure, context.ageYears);
-  const unit = unitQuestion(figure, mm, bounds, context.previous?.mm);
+  const unit = unitQuestion(figure, mm, bounds, context);
   // A unit mistaken puts every other comparison out as well: one question is enough.
   if (unit) return [unit];
   return [
@@ -62,8 +65,9 @@ function unitQuestion(
   figure: MeasureKey,
   mm: number,
   bounds: UsualBounds,
-  previousMm: number | undefined,
+  { previous, unit }: AskContext,
 ): Question | undefined {
+  const previousMm = previous?.mm;
   const strange = !inside(mm, bounds);
   // Against last time's figure: within a tenth, common practice.
   const likeLastTime = (meant: number) => previousMm !== undefined && Math.abs(meant / previousMm - 1) <= 0.1;
@@ -74,7 +78,7 @@ function unitQuestion(
       ? strange && inside(meant, bounds)
       : (strange || far) && likeLastTime(meant);
   };
-  const slip = slips.find(fits);
+  const slip = slips.find((one) => (unit === undefined || one.wrote === unit) && fits(one));
   if (!slip) return undefined;
   const number = figureText(mm / slip.per);
   const other = slip.wrote === "in" ? "cm" : "in";
@@ -124,7 +128,7 @@ function orderQuestions(figure: MeasureKey, mm: number, others: AskContext["othe
       {
         kind: "order",
         say,
-        source: "the order of the girths of a real arm: wrist, hand, upper arm, armscye",
+        source: "US Army surveys: wrist, hand, upper arm and armscye are in that order",
         mark: "seen",
       },
     ];

@@ -90,7 +90,7 @@ export const bodyMeasures: readonly BodyMeasure[] = [
     "girth",
     75,
     320,
-    "Round the widest part of the hand, the thumb tucked in, as it would go through a sleeve.",
+    "Round the hand over the knuckles, the thumb left out.",
   ),
   measure(
     "upperArmLength",

@@ -40,7 +40,9 @@ export function staleness(takenOn: IsoDate, ageYears: number | undefined, today:
     ageYears === undefined
       ? "the age is not known"
       : ageYears < 18
-        ? `a child of ${Math.floor(ageYears)} grows`
+        ? ageYears < 1
+          ? "a baby grows fast"
+          : `a child of ${Math.floor(ageYears)} grows`
         : "figures change in a year";
   return {
     stale,

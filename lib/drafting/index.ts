@@ -1,0 +1,30 @@
+/** What the app may use of the drafting engine. Pure: lengths in mm, nothing rounded, nothing read or written. */
+export type {
+  CubicBezier,
+  DraftProblem,
+  Edge,
+  EdgeName,
+  FigureName,
+  GuideMark,
+  Notch,
+  Phrase,
+  Piece,
+  Point,
+  Result,
+  Side,
+  SleeveAsk,
+  SleeveFigures,
+} from "@/lib/drafting/types";
+export type { LineName, PointName, SleeveDraft } from "@/lib/drafting/basic-sleeve";
+export type { Check, SourceMark, Verdict } from "@/lib/drafting/checks";
+export type { MadeSleeve } from "@/lib/drafting/make-sleeve";
+export type { DrawnLine, MarkStep, Move } from "@/lib/drafting/mark-steps";
+export type { Seam, WalkedSeam } from "@/lib/drafting/seams";
+export { draftBasicSleeve } from "@/lib/drafting/basic-sleeve";
+export { defaultBeside, defaultMarks, defaultNotches, INCH } from "@/lib/drafting/guide";
+export { makeSleeve, remakeSleeve } from "@/lib/drafting/make-sleeve";
+export { markSteps } from "@/lib/drafting/mark-steps";
+export { area, bounds, edgeLength, pointAt, splitAt } from "@/lib/drafting/measure";
+export { roundFigures } from "@/lib/drafting/round";
+export { walk } from "@/lib/drafting/seams";
+export { capDepthShares, solveCapDepth, usualHeadEase } from "@/lib/drafting/solve";
