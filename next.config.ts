@@ -4,7 +4,10 @@ import { type NextConfig } from "next";
 
 const require = createRequire(import.meta.url);
 const { NormalModuleReplacementPlugin, DefinePlugin } = require("next/dist/compiled/webpack/webpack-lib") as {
-  NormalModuleReplacementPlugin: new (test: RegExp, change: (resource: { request: string }) => void) => object;
+  NormalModuleReplacementPlugin: new (
+    test: RegExp,
+    change: (resource: { request: string }) => void,
+  ) => object;
   DefinePlugin: new (values: Record<string, string>) => object;
 };
 
@@ -34,7 +37,11 @@ const config: NextConfig = {
     // Compressed once when the app is built; their names carry the hash of what is in them.
     {
       source: "/pglite/:name*.br",
-      headers: [{ key: "Content-Encoding", value: "br" }, { key: "Content-Type", value: "application/octet-stream" }, forEver],
+      headers: [
+        { key: "Content-Encoding", value: "br" },
+        { key: "Content-Type", value: "application/octet-stream" },
+        forEver,
+      ],
     },
     { source: "/sw.js", headers: [{ key: "Cache-Control", value: "no-cache" }] },
   ],
@@ -57,7 +64,9 @@ const config: NextConfig = {
         "fs/promises": false,
       };
     }
-    webpackConfig.plugins.push(new DefinePlugin({ "process.env.NOTCHBOOK_BUILD_ID": JSON.stringify(buildId) }));
+    webpackConfig.plugins.push(
+      new DefinePlugin({ "process.env.NOTCHBOOK_BUILD_ID": JSON.stringify(buildId) }),
+    );
     return webpackConfig;
   },
 };
@@ -68,7 +77,14 @@ const withSerwist = withSerwistInit({
   register: false,
   disable: process.env.NODE_ENV === "development",
   // The bundler's own copies of PGlite's files are never fetched: `db/browser/open.ts` hands over compressed ones.
-  exclude: [/\.map$/, /\.(wasm|data)$/, /\.tar\.gz$/, /^\/?_next\/server\//, /-manifest\.json?$/, /middleware-/],
+  exclude: [
+    /\.map$/,
+    /\.(wasm|data)$/,
+    /\.tar\.gz$/,
+    /^\/?_next\/server\//,
+    /-manifest\.json?$/,
+    /middleware-/,
+  ],
   globPublicPatterns: ["pglite/*.br", "fonts/*.ttf", "icons/*"],
   maximumFileSizeToCacheInBytes: 6 * 1024 * 1024,
 });

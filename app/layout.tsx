@@ -7,6 +7,7 @@ export const metadata: Metadata = {
   title: { default: "Notchbook", template: "%s · Notchbook" },
   description: "Clients, figures, sleeves, orders and money for a seamstress, on her phone, with no line.",
   applicationName: "Notchbook",
+  icons: { icon: "/icons/icon.svg", apple: "/icons/apple-touch-180.png" },
   appleWebApp: { capable: true, title: "Notchbook", statusBarStyle: "default" },
   formatDetection: { telephone: false, date: false, address: false, email: false },
 };

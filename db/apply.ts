@@ -7,7 +7,14 @@ import { type PgDatabase, type PgQueryResultHKT, type PgTable } from "drizzle-or
 import { type Change } from "@/lib/journal/change";
 import { type AnyRow, mergeRow } from "@/lib/journal/merge";
 import { orderSums as sumOrder } from "@/lib/money/order-sums";
-import { type Client, type Payment, type PriceLine, type TableName, tableNames, type Wearer } from "@/lib/records/types";
+import {
+  type Client,
+  type Payment,
+  type PriceLine,
+  type TableName,
+  tableNames,
+  type Wearer,
+} from "@/lib/records/types";
 import { fold } from "@/lib/search/fold";
 import { groupBy } from "@/lib/collections";
 import { clientSearchText } from "@/lib/store/queries/clients";
@@ -39,8 +46,8 @@ class Touched {
   }
 }
 
-async function inPieces<T>(items: readonly T[], use: (piece: T[]) => Promise<unknown>): Promise<void> {
-  for (let i = 0; i < items.length; i += ROWS_A_STATEMENT) await use(items.slice(i, i + ROWS_A_STATEMENT));
+async function inPieces<T>(items: readonly T[], run: (piece: T[]) => Promise<unknown>): Promise<void> {
+  for (let i = 0; i < items.length; i += ROWS_A_STATEMENT) await run(items.slice(i, i + ROWS_A_STATEMENT));
 }
 
 async function mergeTable(
@@ -210,10 +217,7 @@ export interface JournalMark {
 
 /** How far this database has followed a device's journal. */
 export async function readMark(db: BookDatabase, device: string): Promise<JournalMark> {
-  const [mark] = await db
-    .select()
-    .from(schema.journalMarks)
-    .where(eq(schema.journalMarks.device, device));
+  const [mark] = await db.select().from(schema.journalMarks).where(eq(schema.journalMarks.device, device));
   return { applied: mark?.applied ?? 0, counts: mark?.counts ?? {} };
 }
 

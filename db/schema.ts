@@ -4,7 +4,18 @@
  * stamp for each written field (sync contract C1, C2). There are no foreign keys: rows arrive one by one from
  * other devices, a child may come before its parent, and nothing is ever deleted under another row.
  */
-import { bigint, boolean, date, index, integer, jsonb, pgTable, primaryKey, text, uuid } from "drizzle-orm/pg-core";
+import {
+  bigint,
+  boolean,
+  date,
+  index,
+  integer,
+  jsonb,
+  pgTable,
+  primaryKey,
+  text,
+  uuid,
+} from "drizzle-orm/pg-core";
 import {
   type PaymentKind,
   type PaymentMethod,
@@ -210,7 +221,10 @@ export const clientIndex = pgTable(
     sortKey: text("sort_key").notNull(),
     removed: boolean("removed").notNull(),
   },
-  (t) => [primaryKey({ columns: [t.workshopId, t.clientId] }), index().on(t.workshopId, t.removed, t.sortKey)],
+  (t) => [
+    primaryKey({ columns: [t.workshopId, t.clientId] }),
+    index().on(t.workshopId, t.removed, t.sortKey),
+  ],
 );
 
 /** Worked out, like `client_index`: what an order comes to and what is still owed. */

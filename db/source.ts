@@ -9,7 +9,8 @@ import { type BookDatabase } from "./apply";
 import { bookTables, clientIndex, clients, orders, orderSums } from "./schema";
 
 export function drizzleSource(db: BookDatabase, workshopId: string): RowSource {
-  const tableOf = (name: TableName) => bookTables[name] as PgTable & Record<"workshopId" | "id" | "removedAt", PgColumn>;
+  const tableOf = (name: TableName) =>
+    bookTables[name] as PgTable & Record<"workshopId" | "id" | "removedAt", PgColumn>;
   const of = (name: TableName) => eq(tableOf(name).workshopId, workshopId);
   const rows = (found: Promise<unknown>) => found as Promise<AnyRow[]>;
 
@@ -18,19 +19,37 @@ export function drizzleSource(db: BookDatabase, workshopId: string): RowSource {
     byIds: async (name, ids) => {
       if (ids.length === 0) return [];
       const table = tableOf(name);
-      return rows(db.select().from(table).where(and(of(name), inArray(table.id, [...ids]))).then());
+      return rows(
+        db
+          .select()
+          .from(table)
+          .where(and(of(name), inArray(table.id, [...ids])))
+          .then(),
+      );
     },
     byParents: async (name, column, ids) => {
       if (ids.length === 0) return [];
       const table = tableOf(name);
       const parent = (table as unknown as Record<string, PgColumn | undefined>)[column];
       if (!parent) throw new Error(`${name} has no column ${column}`);
-      return rows(db.select().from(table).where(and(of(name), inArray(parent, [...ids]))).then());
+      return rows(
+        db
+          .select()
+          .from(table)
+          .where(and(of(name), inArray(parent, [...ids])))
+          .then(),
+      );
     },
     newest: (name, limit) => {
       const table = tableOf(name);
       return rows(
-        db.select().from(table).where(and(of(name), isNull(table.removedAt))).orderBy(desc(table.id)).limit(limit).then(),
+        db
+          .select()
+          .from(table)
+          .where(and(of(name), isNull(table.removedAt)))
+          .orderBy(desc(table.id))
+          .limit(limit)
+          .then(),
       );
     },
     binned: (name, limit) => {
@@ -60,7 +79,13 @@ export function drizzleSource(db: BookDatabase, workshopId: string): RowSource {
           : (await index).filter(({ text }) => matchesAll(text, find)).slice(0, limit);
       if (found.length === 0) return [];
       const ids = found.map(({ id }) => id);
-      return rows(db.select().from(clients).where(and(of("clients"), inArray(clients.id, ids))).then());
+      return rows(
+        db
+          .select()
+          .from(clients)
+          .where(and(of("clients"), inArray(clients.id, ids)))
+          .then(),
+      );
     },
     ordersOpen: (limit) =>
       rows(
@@ -77,7 +102,9 @@ export function drizzleSource(db: BookDatabase, workshopId: string): RowSource {
         .select({ order: orders })
         .from(orderSums)
         .innerJoin(orders, and(eq(orders.workshopId, orderSums.workshopId), eq(orders.id, orderSums.orderId)))
-        .where(and(eq(orderSums.workshopId, workshopId), ne(orderSums.balanceMinor, 0), isNull(orders.removedAt)))
+        .where(
+          and(eq(orderSums.workshopId, workshopId), ne(orderSums.balanceMinor, 0), isNull(orders.removedAt)),
+        )
         .orderBy(asc(orders.agreedOn), asc(orders.id))
         .limit(limit);
       return found.map(({ order }) => order as unknown as AnyRow);

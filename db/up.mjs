@@ -31,10 +31,22 @@ function newest(path) {
 }
 
 const installed = "node_modules/.package-lock.json";
-if (!existsSync(installed) || statSync(installed).mtimeMs < statSync("package-lock.json").mtimeMs) run("npm", ["ci"]);
+if (!existsSync(installed) || statSync(installed).mtimeMs < statSync("package-lock.json").mtimeMs)
+  run("npm", ["ci"]);
 
 const built = ".next/BUILD_ID";
-const sources = ["app", "components", "lib", "db", "drizzle", "public", "worker", "package-lock.json", "next.config.ts", "tailwind.config.ts"];
+const sources = [
+  "app",
+  "components",
+  "lib",
+  "db",
+  "drizzle",
+  "public",
+  "worker",
+  "package-lock.json",
+  "next.config.ts",
+  "tailwind.config.ts",
+];
 const changed = !existsSync(built) || sources.some((path) => newest(path) > statSync(built).mtimeMs);
 if (changed) run("npm", ["run", "build"]);
 
@@ -42,7 +54,9 @@ if (!process.argv.includes("--build-only")) {
   mkdirSync("data", { recursive: true });
   const port = process.env.PORT ?? "3000";
   // By its own file: npx would leave it running when it is told to stop.
-  const server = spawn(process.execPath, ["node_modules/next/dist/bin/next", "start", "-p", port], { stdio: "inherit" });
+  const server = spawn(process.execPath, ["node_modules/next/dist/bin/next", "start", "-p", port], {
+    stdio: "inherit",
+  });
   for (const signal of ["SIGINT", "SIGTERM"]) process.on(signal, () => server.kill(signal));
   server.on("exit", (code) => process.exit(code ?? 0));
 }

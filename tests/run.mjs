@@ -21,7 +21,9 @@ function installPackages() {
 }
 
 function findChromium() {
-  return [process.env.CHROMIUM, "/usr/bin/chromium", "/usr/bin/chromium-browser"].find((path) => path && existsSync(path));
+  return [process.env.CHROMIUM, "/usr/bin/chromium", "/usr/bin/chromium-browser"].find(
+    (path) => path && existsSync(path),
+  );
 }
 
 /** Chromium, installed from Debian's packages where it is missing. */
@@ -36,7 +38,9 @@ function ensureChromium() {
   }
   const now = findChromium();
   if (now) return now;
-  console.error("The browser tests need Chromium. Install it (on Debian: sudo apt-get install chromium) and run npm test again.");
+  console.error(
+    "The browser tests need Chromium. Install it (on Debian: sudo apt-get install chromium) and run npm test again.",
+  );
   process.exit(1);
 }
 
@@ -57,7 +61,13 @@ function countPlaywright() {
 rmSync(output, { recursive: true, force: true });
 mkdirSync(output, { recursive: true });
 installPackages();
-const unit = run("npx", ["vitest", "run", "--reporter=default", "--reporter=json", `--outputFile.json=${output}/vitest.json`]);
+const unit = run("npx", [
+  "vitest",
+  "run",
+  "--reporter=default",
+  "--reporter=json",
+  `--outputFile.json=${output}/vitest.json`,
+]);
 const chromium = ensureChromium();
 const build = run("npm", ["run", "build"]);
 const browser = build === 0 ? run("npx", ["playwright", "test"], { CHROMIUM: chromium }) : 1;

@@ -7,7 +7,13 @@ import { asc, gt } from "drizzle-orm";
 import { type PgColumn, type PgTable } from "drizzle-orm/pg-core";
 import { type Endpoint, expose } from "comlink";
 import { applyChanges, checkCounts, readMark } from "@/db/apply";
-import { deleteDatabase, deleteOthers, fetchEngine, openDatabase, type OpenDatabase } from "@/db/browser/open";
+import {
+  deleteDatabase,
+  deleteOthers,
+  fetchEngine,
+  openDatabase,
+  type OpenDatabase,
+} from "@/db/browser/open";
 import { bookTables } from "@/db/schema";
 import { drizzleSource } from "@/db/source";
 import { type Head, openJournal } from "@/lib/journal/journal";
@@ -42,7 +48,11 @@ function become(next: DatabaseState): void {
 }
 
 /** Brings the database up to the journal's end; `tell` hears how far it is. */
-async function catchUp(open: OpenDatabase, head: Head, tell?: (done: number, of: number) => void): Promise<number> {
+async function catchUp(
+  open: OpenDatabase,
+  head: Head,
+  tell?: (done: number, of: number) => void,
+): Promise<number> {
   let { applied } = await readMark(open.db, head.device);
   const first = applied;
   for (;;) {

@@ -35,11 +35,7 @@ export function Tape({ unit, run = "across", className }: TapeProps) {
   return (
     <svg
       aria-hidden="true"
-      className={cx(
-        "tape block text-edge",
-        across ? "h-3.5 w-full border-t-2" : "h-full w-3.5 border-s-2",
-        className,
-      )}
+      className={cx("tape block", across ? "h-3.5 w-full border-t-2" : "h-full w-3.5 border-s-2", className)}
       style={{ borderColor: "currentColor" }}
     >
       <defs>

@@ -126,8 +126,11 @@ export function draftBasicSleeve(figures: SleeveFigures): Result<SleeveDraft> {
 export function capHalf(figures: SleeveFigures, side: Side): Result<CubicBezier[]> {
   const seam = capSeam(halfKnots(figures, side));
   if ("fault" in seam) return { ok: false, problems: [markProblem(seam.fault, side)] };
-  const s = across(side);
-  const place = (p: Point): Point => ({ x: s * (figures.biceps / 2 - p.x), y: figures.capDepth - p.y });
+  const wide = figures.biceps / 2;
+  const place = ({ x, y }: Point): Point => ({
+    x: side === "front" ? x - wide : wide - x,
+    y: figures.capDepth - y,
+  });
   return {
     ok: true,
     value: seam.chain.map(([a, b, c, d]): CubicBezier => [place(a), place(b), place(c), place(d)]),

@@ -54,7 +54,40 @@ export function capSeam(
     if (distance(c, d) < least) return { fault: { kind: "flat", index: Math.max(i, 1) } };
     if (distance(a, b) < least) return { fault: { kind: "flat", index: Math.min(i + 1, knots.length - 2) } };
   }
+  const extra = secondTurn(chain);
+  if (extra !== undefined)
+    return { fault: { kind: "flat", index: Math.min(Math.max(extra, 1), knots.length - 2) } };
   return { chain };
+}
+
+/**
+ * The curve on which the chain turns over a second time, if there is one. Exact: the bend of a cubic, B′ × B″, is a
+ * quadratic of its parameter, so its signs on 0..1 are those at the two ends and at its peak.
+ */
+function secondTurn(chain: readonly CubicBezier[]): number | undefined {
+  const signs: { readonly sign: number; readonly index: number }[] = [];
+  for (const [index, [a, b, c, d]] of chain.entries()) {
+    const [u, v, w] = [step(a, b), step(b, c), step(c, d)];
+    const [start, middle, end] = [cross(u, v), cross(u, w) / 2, cross(v, w)];
+    const curve = start - 2 * middle + end;
+    const peak = (start - middle) / curve;
+    const bends = [start, ...(peak > 0 && peak < 1 ? [start + (middle - start) * peak] : []), end];
+    // Bends this small against the chord are straight to any eye, and their sign is float noise.
+    const noise = 1e-6 * distance(a, d) ** 2;
+    for (const bend of bends) {
+      if (Math.abs(bend) > noise && Math.sign(bend) !== signs.at(-1)?.sign)
+        signs.push({ sign: Math.sign(bend), index });
+    }
+  }
+  return signs[2]?.index;
+}
+
+function step(a: Point, b: Point): Point {
+  return { x: b.x - a.x, y: b.y - a.y };
+}
+
+function cross(a: Point, b: Point): number {
+  return a.x * b.y - a.y * b.x;
 }
 
 function knotFault(knots: readonly Knot[]): CapFault | undefined {
@@ -88,8 +121,12 @@ function knotFault(knots: readonly Knot[]): CapFault | undefined {
 export function capChain(knots: readonly Knot[]): CubicBezier[] {
   const chords = chordsOf(knots);
   const slopes = holdShape(knotSlopes(chords), chords);
-  return chords.slope.map((_, i) =>
-    segment(knots[i]!, knots[i + 1]!, chords.slope[i]!, chords.size[i]!, slopes[i]!, slopes[i + 1]!),
+  const peak = steepest(chords);
+  return chords.slope.map((slope, i) =>
+    segment([knots[i]!, knots[i + 1]!], { slope, size: chords.size[i]!, turnsOver: i === peak }, [
+      slopes[i]!,
+      slopes[i + 1]!,
+    ]),
   );
 }
 
@@ -114,10 +151,11 @@ function knotSlopes({ slope, size }: Chords): number[] {
  * Below the steepest chord each slope lies between its two chords' slopes, rising; above it, falling. Of the two
  * ends of the steepest chord one may be steeper than it: then the seam turns over at that knot instead of inside.
  */
-function holdShape(free: readonly number[], { slope }: Chords): number[] {
+function holdShape(free: readonly number[], chords: Chords): number[] {
+  const { slope } = chords;
   const held = [...free];
   const n = slope.length;
-  const peak = slope.indexOf(Math.max(...slope));
+  const peak = steepest(chords);
   for (let i = 1; i < n; i++) {
     const before = slope[i - 1]!;
     const after = slope[i]!;
@@ -133,23 +171,32 @@ function holdShape(free: readonly number[], { slope }: Chords): number[] {
   return held;
 }
 
-/** One cubic with Hobby's handle lengths, cut back where they would make a second turn or pass the upright. */
-function segment(a: Knot, b: Knot, chord: number, size: number, from: number, to: number): CubicBezier {
-  const theta = from - chord;
-  const phi = chord - to;
+function steepest({ slope }: Chords): number {
+  return slope.indexOf(Math.max(...slope));
+}
+
+/**
+ * One cubic with Hobby's handle lengths, cut back where they would make a second turn or pass the upright. The
+ * chord on which the seam turns over keeps its handles: there one turn is what is wanted.
+ */
+function segment(
+  [a, b]: readonly [Knot, Knot],
+  { slope, size, turnsOver }: { slope: number; size: number; turnsOver: boolean },
+  [from, to]: readonly [number, number],
+): CubicBezier {
+  const theta = from - slope;
+  const phi = slope - to;
   let first = size * hobby(theta, phi);
   let second = size * hobby(phi, theta);
-  if (theta * phi > 0) {
+  if (theta * phi > 0 && !turnsOver) {
     const turn = Math.sin(theta + phi);
-    if (turn !== 0) {
-      first = Math.min(first, (size * Math.sin(phi)) / turn);
-      second = Math.min(second, (size * Math.sin(theta)) / turn);
-    }
+    first = Math.min(first, (size * Math.sin(phi)) / turn);
+    second = Math.min(second, (size * Math.sin(theta)) / turn);
   }
   const across = first * Math.cos(from) + second * Math.cos(to);
   const up = first * Math.sin(from) + second * Math.sin(to);
   const room = Math.min(1, (b.x - a.x) / across, (b.y - a.y) / up);
-  if (room > 0 && room < 1) {
+  if (room > 0) {
     first *= room;
     second *= room;
   }

@@ -271,9 +271,12 @@ function capSteps(figures: SleeveFigures, draft: SleeveDraft, side: Side): NewSt
   const name = half(side);
   const edge = draft.piece.edges.find((e) => e.name === `cap${name}`)!;
   const guide = guideLine(figures, side);
-  const met = crossings(edge.curves, guide.underarm, guide.top);
-  // With one crossing the hand gets it as a check; a seam that runs along its guide line has none worth measuring.
-  const crossesAt = met.length === 1 ? distance(guide.underarm, met[0]!) : undefined;
+  // Near its top the guide line runs so close under the seam that a crossing there says nothing to a hand.
+  const top = (figures[side].at(-1)?.share ?? 1) * guide.length;
+  const met = crossings(edge.curves, guide.underarm, guide.top)
+    .map((point) => distance(guide.underarm, point))
+    .filter((up) => up < top);
+  const crossesAt = met.length === 1 ? met[0] : undefined;
   const length = side === "front" ? draft.lengths.capFront : draft.lengths.capBack;
   const through: PointName[] = [
     `underarm${name}`,

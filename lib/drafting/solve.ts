@@ -4,7 +4,7 @@ import { capChain } from "@/lib/drafting/cap-seam";
 import { defaultBeside, defaultMarks, halfKnots, INCH } from "@/lib/drafting/guide";
 import { chainLength } from "@/lib/drafting/measure";
 import { say } from "@/lib/drafting/say";
-import { type GuideMark, type Result, type Side } from "@/lib/drafting/types";
+import { type DraftProblem, type GuideMark, type Phrase, type Result, type Side } from "@/lib/drafting/types";
 
 /** Found cap depths lie between these shares of the biceps line: flatter is a strip, deeper a spike. */
 const FLATTEST = 0.1;
@@ -62,13 +62,20 @@ function capFigures({ biceps, beside, marks }: CapDepthAsk, capDepth: number) {
   };
 }
 
+function capSeamLength(ask: CapDepthAsk, capDepth: number): number {
+  const figures = capFigures(ask, capDepth);
+  return (
+    chainLength(capChain(halfKnots(figures, "front"))) + chainLength(capChain(halfKnots(figures, "back")))
+  );
+}
+
 /**
  * The cap depth, mm, whose whole cap seam measures armhole + ease. Fails, naming the figure in the way: a biceps line
  * too wide or too narrow for the armhole, or a guide mark that the depth found does not suit.
  */
 export function solveCapDepth(ask: CapDepthAsk): Result<{ readonly capDepth: number }> {
-  const { armhole, biceps, headEase } = ask;
-  const target = armhole + headEase;
+  const { biceps } = ask;
+  const target = ask.armhole + ask.headEase;
   const capLength = (capDepth: number) => {
     const figures = capFigures(ask, capDepth);
     return (
@@ -96,8 +103,7 @@ export function solveCapDepth(ask: CapDepthAsk): Result<{ readonly capDepth: num
   let low = high;
   while (miss(low) > 0) {
     high = low;
-    if (low <= FLATTEST * biceps)
-      return { ok: false, problems: [tooWide(biceps, target, headEase, capLength(low))] };
+    if (low <= FLATTEST * biceps) return { ok: false, problems: [tooLong(ask, capLength(low))] };
     low = Math.max(FLATTEST * biceps, low * 0.75);
   }
   const capDepth = low === high ? low : findRoot(miss, low, high, TOLERANCE);
@@ -121,14 +127,25 @@ export function solveCapDepth(ask: CapDepthAsk): Result<{ readonly capDepth: num
   };
 }
 
-function lowerFirst([first, ...rest]: readonly (string | { readonly mm: number })[]) {
+function lowerFirst([first, ...rest]: Phrase) {
   return typeof first === "string" ? [first[0]!.toLowerCase() + first.slice(1), ...rest] : [first!, ...rest];
 }
 
-function tooWide(biceps: number, target: number, headEase: number, shortest: number) {
+/** Even the flattest cap is longer than armhole and ease: the given marks are at fault if the default ones would do. */
+function tooLong({ biceps, headEase, armhole, beside, marks }: CapDepthAsk, shortest: number): DraftProblem {
+  const target = armhole + headEase;
+  const usual = capSeamLength({ biceps, headEase, armhole, beside }, FLATTEST * biceps);
+  if (usual < target) {
+    return {
+      id: "marks-too-far",
+      figure: marks?.front ? "frontMarks" : "backMarks",
+      phrase: say`The armhole with ${headEase} of ease is ${target}. With these marks even the flattest cap measures ${shortest}.`,
+      remedy: say`Raise and hollow the marks less, or take the usual ones.`,
+    };
+  }
   return {
     id: "biceps-too-wide",
-    figure: "biceps" as const,
+    figure: "biceps",
     phrase: say`The armhole with ${headEase} of ease is ${target}. Over a biceps line of ${biceps} even the flattest cap measures ${shortest}.`,
     remedy: say`Make the biceps line ${(biceps * target) / shortest} or narrower, or measure the armhole again.`,
   };

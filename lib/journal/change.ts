@@ -57,9 +57,7 @@ export function make<T extends TableName>(table: T, fields: FieldsByTable[T], id
 export function edit<T extends TableName>(table: T, seen: RowOf<T>, patch: Partial<FieldsByTable[T]>): Write {
   const before = seen as unknown as Record<string, unknown>;
   const fields = Object.fromEntries(
-    Object.entries(patch).filter(
-      ([name, value]) => JSON.stringify(before[name]) !== JSON.stringify(value),
-    ),
+    Object.entries(patch).filter(([name, value]) => JSON.stringify(before[name]) !== JSON.stringify(value)),
   );
   return { table, id: seen.id, makes: false, fields, bases: seen.stamps } as unknown as Write;
 }

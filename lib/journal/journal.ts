@@ -11,6 +11,7 @@ import { v4 as uuidv4 } from "uuid";
 import { type Clock, newClock, observe, tick, writeStamp } from "@/lib/clock/stamp";
 import { receiptNumber, seriesOf } from "@/lib/receipts/number";
 import { type Change, newId, type RowChange, SCHEMA_NUMBER, type Write } from "./change";
+import { upgradeChange } from "./upgrade";
 
 export interface Head {
   /** This install, as a UUID. A new book on the same phone is a new device. */
@@ -131,10 +132,12 @@ export function openJournal(store: UseStore, now: () => number = Date.now): Jour
       updateHead((head) => head),
     append: (build) => put((_head, stamp, numbers) => stamped(build(numbers), stamp)),
     appendRows: (rows, workshopId) => put(() => rows, workshopId),
-    since: (after, limit) =>
-      store("readonly", (objects) =>
+    since: async (after, limit) => {
+      const held = await store("readonly", (objects) =>
         promisifyRequest<Change[]>(objects.getAll(IDBKeyRange.bound(after, Infinity, true), limit)),
-      ),
+      );
+      return held.map((change) => upgradeChange(change));
+    },
     confirm: (number) =>
       updateHead((head) => (number > head.confirmed ? { ...head, confirmed: number } : head)),
     noteCopy: () =>

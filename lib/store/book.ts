@@ -63,7 +63,10 @@ export class Book {
    */
   async keep(build: Write[] | ((numbers: Numbers) => Write[])): Promise<Change> {
     try {
-      return this.show(await this.journal.append(typeof build === "function" ? build : () => build));
+      const start = performance.now();
+      const change = await this.journal.append(typeof build === "function" ? build : () => build);
+      performance.measure("notchbook:kept", { start });
+      return this.show(change);
     } catch (error) {
       throw keepProblem(error);
     }
@@ -143,7 +146,10 @@ export class Book {
     this.news.tell({ kind: "state-wanted" });
     this.worker = this.startWorker();
     this.worker.onerror = (event) =>
-      this.setDatabase({ phase: "failed", say: event.message || "The database's program could not be loaded." });
+      this.setDatabase({
+        phase: "failed",
+        say: event.message || "The database's program could not be loaded.",
+      });
   }
 
   private show(change: Change): Change {
@@ -167,7 +173,8 @@ export class Book {
     if (item.kind === "journal-grew") void this.catchUpWithOthers().catch(() => undefined);
     if (item.kind === "state") this.setDatabase(item.state);
     if (item.kind === "rows-changed") this.tellRowsChanged(item.applied);
-    if (item.kind === "book-changed") location.assign("/");
+    // A whole new page: nothing of the book that was cleared may stay in memory.
+    if (item.kind === "book-changed") location.reload();
   }
 
   private setDatabase(database: DatabaseState): void {
@@ -192,6 +199,8 @@ let book: Book | undefined;
 
 /** This tab's book; browser only. */
 export function openBook(): Book {
-  book ??= new Book(() => new Worker(new URL("../../worker/database.ts", import.meta.url), { type: "module" }));
+  book ??= new Book(
+    () => new Worker(new URL("../../worker/database.ts", import.meta.url), { type: "module" }),
+  );
   return book;
 }

@@ -19,7 +19,9 @@ export async function getDraft<T>(key: string): Promise<Draft<T> | null> {
 
 /** Resolves when the draft has reached the disk. */
 export async function setDraft<T>(key: string, value: T): Promise<void> {
+  const start = performance.now();
   await set(key, { savedAt: new Date().toISOString(), value } satisfies Draft<T>, store);
+  performance.measure("notchbook:draft-kept", { start });
 }
 
 export async function dropDraft(key: string): Promise<void> {

@@ -19,10 +19,14 @@ export class AppServer {
   }
 
   async start(): Promise<void> {
-    this.child = spawn(process.execPath, ["node_modules/next/dist/bin/next", "start", "-p", String(this.port)], {
-      stdio: "ignore",
-      env: { ...process.env, NOTCHBOOK_DATA: this.dataDir },
-    });
+    this.child = spawn(
+      process.execPath,
+      ["node_modules/next/dist/bin/next", "start", "-p", String(this.port)],
+      {
+        stdio: "ignore",
+        env: { ...process.env, NOTCHBOOK_DATA: this.dataDir },
+      },
+    );
     for (let tried = 0; tried < 100; tried++) {
       const answered = await fetch(`${this.url}/manifest.webmanifest`).then(
         (response) => response.ok,
@@ -50,21 +54,23 @@ async function freePort(): Promise<number> {
     probe.once("error", reject);
     probe.listen(0, () => {
       const address = probe.address();
-      probe.close(() => (typeof address === "object" && address ? resolve(address.port) : reject(new Error("no port"))));
+      probe.close(() =>
+        typeof address === "object" && address ? resolve(address.port) : reject(new Error("no port")),
+      );
     });
   });
 }
 
 export const test = base.extend<{ server: AppServer; page: Page }>({
-  server: async ({}, use) => {
+  server: async ({}, provide) => {
     const dataDir = mkdtempSync(join(tmpdir(), "notchbook-data-"));
     const server = new AppServer(await freePort(), dataDir);
     await server.start();
-    await use(server);
+    await provide(server);
     await server.stop();
     rmSync(dataDir, { recursive: true, force: true });
   },
-  page: async ({ page }, use) => {
+  page: async ({ page }, provide) => {
     const problems: string[] = [];
     page.on("pageerror", (error) => problems.push(`${error.name}: ${error.message}`));
     page.on("console", (message) => {
@@ -72,7 +78,7 @@ export const test = base.extend<{ server: AppServer; page: Page }>({
       if (message.type() === "error" && !/Failed to load resource|net::ERR_/.test(message.text()))
         problems.push(message.text());
     });
-    await use(page);
+    await provide(page);
     expect(problems.filter((problem) => !problem.startsWith("ErrnoError"))).toEqual([]);
   },
 });
@@ -81,7 +87,9 @@ export { expect };
 
 /** Waits until every screen is on the phone: from here on the server may be stopped. */
 export async function untilReadyWithoutALine(page: Page): Promise<void> {
-  await page.waitForFunction(() => navigator.serviceWorker.ready.then(() => navigator.serviceWorker.controller !== null));
+  await page.waitForFunction(() =>
+    navigator.serviceWorker.ready.then(() => navigator.serviceWorker.controller !== null),
+  );
 }
 
 /** Waits until the phone's database has opened and followed the journal. */
@@ -90,7 +98,10 @@ export async function untilDatabaseOpen(page: Page): Promise<void> {
 }
 
 /** A browser with a profile on the disk, to be killed and started again. */
-export async function openProfile(dir: string, options: { width?: number; height?: number } = {}): Promise<BrowserContext> {
+export async function openProfile(
+  dir: string,
+  options: { width?: number; height?: number } = {},
+): Promise<BrowserContext> {
   return chromium.launchPersistentContext(dir, {
     executablePath: process.env.CHROMIUM ?? "/usr/bin/chromium",
     args: ["--no-sandbox", "--disable-background-networking", "--disable-component-update", "--disable-sync"],

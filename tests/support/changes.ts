@@ -16,11 +16,29 @@ const wearerId = fc.integer({ min: 0, max: 7 }).map((n) => idOf(2, n));
 const orderId = fc.integer({ min: 0, max: 6 }).map((n) => idOf(5, n));
 const lineId = fc.integer({ min: 0, max: 9 }).map((n) => idOf(7, n));
 const paymentId = fc.integer({ min: 0, max: 9 }).map((n) => idOf(8, n));
-const day = fc.integer({ min: 0, max: 60 }).map((n) => new Date(Date.UTC(2026, 2, 1 + n)).toISOString().slice(0, 10));
-const name = fc.constantFrom("Ana Brdar", "Ánna Břdar", "Łucja Øst", "Zoë", "مريم", "Émile-Ann", "Bo 2nd", "an");
-const removedAt = fc.option(day.map((on) => `${on}T10:00:00.000Z`), { freq: 4, nil: null });
+const day = fc
+  .integer({ min: 0, max: 60 })
+  .map((n) => new Date(Date.UTC(2026, 2, 1 + n)).toISOString().slice(0, 10));
+const name = fc.constantFrom(
+  "Ana Brdar",
+  "Ánna Břdar",
+  "Łucja Øst",
+  "Zoë",
+  "مريم",
+  "Émile-Ann",
+  "Bo 2nd",
+  "an",
+);
+const removedAt = fc.option(
+  day.map((on) => `${on}T10:00:00.000Z`),
+  { freq: 4, nil: null },
+);
 
-type Made<T extends TableName> = { table: T; id: string; fields: FieldsByTable[T] & { removedAt: string | null } };
+type Made<T extends TableName> = {
+  table: T;
+  id: string;
+  fields: FieldsByTable[T] & { removedAt: string | null };
+};
 
 const client: fc.Arbitrary<Made<"clients">> = fc.record({
   table: fc.constant("clients" as const),

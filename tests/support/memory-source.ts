@@ -15,7 +15,8 @@ export function memorySource(rows: Rows): RowSource {
   return {
     workshop: () => asRows(all("workshops")),
     byIds: (table, ids) => asRows(all(table).filter((row) => ids.includes(row.id))),
-    byParents: (table, column, ids) => asRows(all(table).filter((row) => ids.includes(row[column] as string))),
+    byParents: (table, column, ids) =>
+      asRows(all(table).filter((row) => ids.includes(row[column] as string))),
     newest: (table, limit) => asRows(live(table).sort(newestFirst).slice(0, limit)),
     binned: (table, limit) =>
       asRows(

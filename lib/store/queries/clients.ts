@@ -1,5 +1,6 @@
 import { groupBy } from "@/lib/collections";
-import { type Client, type MeasurementSet, type Sleeve, type Wearer } from "@/lib/records/types";
+import { wentWithClient } from "@/lib/clients/bin-question";
+import { type Client, type MeasurementSet, type Order, type Sleeve, type Wearer } from "@/lib/records/types";
 import { fold } from "@/lib/search/fold";
 import { matchesAll, searchText } from "@/lib/search/match";
 import { byKey, findRow, idsIn, liveRowsOf, newestFirst, type Query, rowsOf } from "../query";
@@ -30,7 +31,14 @@ export const clientListQuery: Query<{ find: string; limit: number }, ClientListV
   name: "clientList",
   need: async (source, { find, limit }) => {
     const clients = await source.clientsFound(find, limit + 1);
-    return { clients, wearers: await source.byParents("wearers", "clientId", clients.map((row) => row.id)) };
+    return {
+      clients,
+      wearers: await source.byParents(
+        "wearers",
+        "clientId",
+        clients.map((row) => row.id),
+      ),
+    };
   },
   view: (rows, { find, limit }) => {
     const wearersOf = groupBy(liveRowsOf(rows, "wearers"), (wearer) => wearer.clientId);
@@ -52,6 +60,8 @@ export interface ClientCardView {
   client: Client;
   wearers: WearerSummary[];
   orders: OrderWithMoney[];
+  /** Where the client is in the bin: the orders that went in along with it. */
+  binnedWith: Order[];
 }
 
 /** One client with wearers and orders; null where there is no such client. */
@@ -92,6 +102,7 @@ export const clientCardQuery: Query<{ id: string }, ClientCardView | null> = {
         .filter((order) => order.clientId === id)
         .sort(newestFirst)
         .map((order) => moneyOf(rows, order)),
+      binnedWith: wentWithClient(client, rowsOf(rows, "orders")),
     };
   },
 };

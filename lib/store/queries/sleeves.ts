@@ -14,7 +14,12 @@ async function withPeople(source: RowSource, sleeves: AnyRow[]): Promise<Rows> {
     source.byIds("wearers", idsIn(sleeves, "wearerId")),
     source.byIds("measurementSets", idsIn(sleeves, "setId")),
   ]);
-  return { sleeves, wearers, measurementSets, clients: await source.byIds("clients", idsIn(wearers, "clientId")) };
+  return {
+    sleeves,
+    wearers,
+    measurementSets,
+    clients: await source.byIds("clients", idsIn(wearers, "clientId")),
+  };
 }
 
 function sleeveView(rows: Rows, sleeve: Sleeve): SleeveView {

@@ -44,7 +44,10 @@ export const todayQuery: Query<{ on: string }, TodayView> = {
   },
   view: (rows, { on }) => {
     const live = liveRowsOf(rows, "orders");
-    const open = live.filter((order) => order.stage !== "handed-over").sort(byKey(dueKey)).slice(0, LIMIT);
+    const open = live
+      .filter((order) => order.stage !== "handed-over")
+      .sort(byKey(dueKey))
+      .slice(0, LIMIT);
     const soon = addDays(on, DAYS);
     const items = orderItems(rows, open);
     const late = items.filter(({ order }) => order.dueOn !== null && order.dueOn < on);
@@ -52,8 +55,13 @@ export const todayQuery: Query<{ on: string }, TodayView> = {
     const back = addDays(on, -DAYS);
     const fittings = items
       .flatMap((item) => item.garments.map((garment) => ({ ...item, garment })))
-      .filter(({ garment }) => garment.fittingOn !== null && garment.fittingOn >= back && garment.fittingOn <= soon)
-      .sort((a, b) => compareText(a.garment.fittingOn!, b.garment.fittingOn!) || compareText(a.garment.id, b.garment.id));
+      .filter(
+        ({ garment }) => garment.fittingOn !== null && garment.fittingOn >= back && garment.fittingOn <= soon,
+      )
+      .sort(
+        (a, b) =>
+          compareText(a.garment.fittingOn!, b.garment.fittingOn!) || compareText(a.garment.id, b.garment.id),
+      );
     const owed = orderItems(rows, live)
       .filter(({ sums }) => sums.balanceMinor !== 0)
       .sort((a, b) => byKey<Order>((order) => order.agreedOn)(a.order, b.order))

@@ -1,6 +1,8 @@
-import { type Client, type MeasurementSet, type Sleeve, type Wearer } from "@/lib/records/types";
+import { type Client, type Garment, type MeasurementSet, type Order, type Sleeve, type Wearer } from "@/lib/records/types";
+import { type Rows } from "@/lib/journal/merge";
 import { byKey, findRow, idsIn, liveRowsOf, newestFirst, type Query, rowsOf } from "../query";
 import { standingSets } from "./clients";
+import { dueKey } from "./orders";
 
 export interface WearerCardView {
   wearer: Wearer;
@@ -10,6 +12,8 @@ export interface WearerCardView {
   /** Every set ever taken, newest first, those put right too. */
   allSets: MeasurementSet[];
   sleeves: Sleeve[];
+  /** Garments of orders that are not handed over, the soonest due first. */
+  openGarments: { garment: Garment; order: Order }[];
 }
 
 /** One wearer with every set and sleeve; null where there is no such wearer. */
@@ -17,12 +21,14 @@ export const wearerCardQuery: Query<{ id: string }, WearerCardView | null> = {
   name: "wearerCard",
   need: async (source, { id }) => {
     const wearers = await source.byIds("wearers", [id]);
-    const [clients, measurementSets, sleeves] = await Promise.all([
+    const [clients, measurementSets, sleeves, garments] = await Promise.all([
       source.byIds("clients", idsIn(wearers, "clientId")),
       source.byParents("measurementSets", "wearerId", [id]),
       source.byParents("sleeves", "wearerId", [id]),
+      source.byParents("garments", "wearerId", [id]),
     ]);
-    return { wearers, clients, measurementSets, sleeves };
+    const orders = await source.byIds("orders", idsIn(garments, "orderId"));
+    return { wearers, clients, measurementSets, sleeves, garments, orders };
   },
   view: (rows, { id }) => {
     const wearer = findRow(rows, "wearers", id);
@@ -36,9 +42,21 @@ export const wearerCardQuery: Query<{ id: string }, WearerCardView | null> = {
       sleeves: liveRowsOf(rows, "sleeves")
         .filter((sleeve) => sleeve.wearerId === id)
         .sort(newestFirst),
+      openGarments: openGarments(rows, id),
     };
   },
 };
+
+function openGarments(rows: Rows, wearerId: string): WearerCardView["openGarments"] {
+  return liveRowsOf(rows, "garments")
+    .flatMap((garment) => {
+      const order = garment.wearerId === wearerId ? findRow(rows, "orders", garment.orderId) : null;
+      return order && order.removedAt === null && order.stage !== "handed-over" ? [{ garment, order }] : [];
+    })
+    .sort(
+      (a, b) => byKey(dueKey)(a.order, b.order) || byKey<Garment>((garment) => garment.id)(a.garment, b.garment),
+    );
+}
 
 export interface SetCardView {
   set: MeasurementSet;
@@ -58,7 +76,11 @@ export const setCardQuery: Query<{ id: string }, SetCardView | null> = {
     const wearers = await source.byIds("wearers", idsIn(measurementSets, "wearerId"));
     const [clients, siblings] = await Promise.all([
       source.byIds("clients", idsIn(wearers, "clientId")),
-      source.byParents("measurementSets", "wearerId", wearers.map((row) => row.id)),
+      source.byParents(
+        "measurementSets",
+        "wearerId",
+        wearers.map((row) => row.id),
+      ),
     ]);
     return { measurementSets: siblings, wearers, clients };
   },

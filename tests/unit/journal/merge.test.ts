@@ -11,7 +11,11 @@ const rowChange: fc.Arbitrary<RowChange> = fc.record({
   makes: fc.boolean(),
   fields: fc.dictionary(
     fc.constantFrom("name", "note", "phone"),
-    fc.record({ value: fc.oneof(fc.constant(null), fc.string({ maxLength: 3 })), stamp, base: fc.constant(null) }),
+    fc.record({
+      value: fc.oneof(fc.constant(null), fc.string({ maxLength: 3 })),
+      stamp,
+      base: fc.constant(null),
+    }),
   ),
 });
 const mergeAll = (changes: readonly RowChange[]): AnyRow | undefined =>
@@ -20,13 +24,17 @@ const mergeAll = (changes: readonly RowChange[]): AnyRow | undefined =>
 describe("P2 merging", () => {
   it("is commutative: any order gives the same row", () => {
     fc.assert(
-      fc.property(fc.array(rowChange, { minLength: 1, maxLength: 6 }), fc.infiniteStream(fc.nat()), (changes, luck) => {
-        const shuffled = changes
-          .map((change) => ({ change, at: luck.next().value as number }))
-          .sort((a, b) => a.at - b.at)
-          .map(({ change }) => change);
-        expect(mergeAll(shuffled)).toEqual(mergeAll(changes));
-      }),
+      fc.property(
+        fc.array(rowChange, { minLength: 1, maxLength: 6 }),
+        fc.infiniteStream(fc.nat()),
+        (changes, luck) => {
+          const shuffled = changes
+            .map((change) => ({ change, at: luck.next().value as number }))
+            .sort((a, b) => a.at - b.at)
+            .map(({ change }) => change);
+          expect(mergeAll(shuffled)).toEqual(mergeAll(changes));
+        },
+      ),
     );
   });
 
@@ -44,13 +52,19 @@ describe("P2 merging", () => {
       table: "clients",
       id: "one",
       makes: true,
-      fields: { name: { value: "Ada", stamp: "1", base: null }, note: { value: "tall", stamp: "3", base: null } },
+      fields: {
+        name: { value: "Ada", stamp: "1", base: null },
+        note: { value: "tall", stamp: "3", base: null },
+      },
     };
     const late: RowChange = {
       table: "clients",
       id: "one",
       makes: false,
-      fields: { name: { value: "Ida", stamp: "2", base: "1" }, note: { value: "short", stamp: "2", base: null } },
+      fields: {
+        name: { value: "Ida", stamp: "2", base: "1" },
+        note: { value: "short", stamp: "2", base: null },
+      },
     };
     expect(mergeAll([early, late])).toMatchObject({ name: "Ida", note: "tall" });
   });
@@ -59,7 +73,10 @@ describe("P2 merging", () => {
 describe("overlay", () => {
   const byId = (rows: Rows) =>
     Object.fromEntries(
-      Object.entries(rows).map(([table, held]) => [table, new Map((held as AnyRow[]).map((row) => [row.id, row]))]),
+      Object.entries(rows).map(([table, held]) => [
+        table,
+        new Map((held as AnyRow[]).map((row) => [row.id, row])),
+      ]),
     );
 
   it("L2 replaying gives the same rows, wherever the database had come to", () => {
@@ -83,7 +100,14 @@ describe("overlay", () => {
         workshopId: WORKSHOP,
         schema: 1,
         writtenAt: "",
-        rows: [{ table: "clients", id: "gone", makes: false, fields: { name: { value: "x", stamp: "1", base: null } } }],
+        rows: [
+          {
+            table: "clients",
+            id: "gone",
+            makes: false,
+            fields: { name: { value: "x", stamp: "1", base: null } },
+          },
+        ],
       },
     ]);
     expect(edited.clients).toEqual([]);

@@ -32,7 +32,10 @@ async function everything(): Promise<Rows> {
 function plain(rows: Rows): unknown {
   return Object.fromEntries(
     tableNames
-      .map((table) => [table, [...(rows[table] ?? [])].sort((a, b) => (a.id < b.id ? -1 : 1))] as [TableName, AnyRow[]])
+      .map(
+        (table) =>
+          [table, [...(rows[table] ?? [])].sort((a, b) => (a.id < b.id ? -1 : 1))] as [TableName, AnyRow[]],
+      )
       .filter(([, held]) => held.length > 0),
   );
 }
@@ -41,9 +44,10 @@ function plain(rows: Rows): unknown {
 const asked: [string, unknown][] = [
   ["workshop", {}],
   ["today", { on: "2026-03-20" }],
-  ...["", "br", "ost lucja", "zoe 7946", "44 2079", "مريم", "an"].map(
-    (find): [string, unknown] => ["clientList", { find, limit: 3 }],
-  ),
+  ...["", "br", "ost lucja", "zoe 7946", "44 2079", "مريم", "an"].map((find): [string, unknown] => [
+    "clientList",
+    { find, limit: 3 },
+  ]),
   ["clientList", { find: "", limit: 50 }],
   ...[0, 1].map((n): [string, unknown] => ["clientCard", { id: idOf(1, n) }]),
   ["wearerCard", { id: idOf(2, 0) }],
@@ -84,7 +88,9 @@ describe("applying the journal to PGlite", () => {
     const [change] = fc.sample(changesOf({ max: 3 }), { numRuns: 1, seed: 5 })[0]!;
     await applyChanges(db, [change!]);
     const table = change!.rows[0]!.table;
-    await client.exec(`delete from ${{ clients: "clients", wearers: "wearers", orders: "orders", priceLines: "price_lines", payments: "payments" }[table as "clients"]}`);
+    await client.exec(
+      `delete from ${{ clients: "clients", wearers: "wearers", orders: "orders", priceLines: "price_lines", payments: "payments" }[table as "clients"]}`,
+    );
     await expect(checkCounts(db, await readMark(db, DEVICE))).rejects.toThrow(/0 rows where \d were kept/);
   });
 });
@@ -101,7 +107,10 @@ describe("every query", () => {
           const expected = queriesByName.get(name)!.view(overlay({}, changes), args) as unknown;
           expect(await viewOf(whole, name, args), `${name} from memory`).toEqual(expected);
           if (upTo === changes.length || SEES_UNAPPLIED.has(name))
-            expect(await viewOf(drizzleSource(db, WORKSHOP), name, args, changes.slice(upTo)), `${name} from PGlite`).toEqual(expected);
+            expect(
+              await viewOf(drizzleSource(db, WORKSHOP), name, args, changes.slice(upTo)),
+              `${name} from PGlite`,
+            ).toEqual(expected);
         }
       }),
       { numRuns: 40 },
