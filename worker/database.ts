@@ -6,7 +6,7 @@
 import { asc, gt } from "drizzle-orm";
 import { type PgColumn, type PgTable } from "drizzle-orm/pg-core";
 import { type Endpoint, expose } from "comlink";
-import { applyChanges, checkCounts, readMark } from "@/db/apply";
+import { applyChanges, type BookDatabase, checkCounts, readMark } from "@/db/apply";
 import {
   deleteDatabase,
   deleteOthers,
@@ -65,79 +65,133 @@ async function catchUp(
   }
 }
 
-/** Opens the database, made anew from the journal where it is spoilt. */
-async function openChecked(head: Head): Promise<{ open: OpenDatabase; rebuilt: boolean }> {
-  const name = databaseName(head.book);
-  const engine = await fetchEngine((done, of) => become({ phase: "fetching", done, of }));
-  const attempt = async (): Promise<OpenDatabase> => {
-    become({ phase: "opening" });
-    const open = await openDatabase(name, engine);
-    try {
-      const mark = await readMark(open.db, head.device);
-      // Whatever the mark says was really saved: it has just come out of a reopened database.
-      if (mark.applied >= head.next) throw new Error("the database is ahead of the journal");
-      await checkCounts(open.db, mark);
-      await journal.confirm(mark.applied);
-      await catchUp(open, head, (done, of) => become({ phase: "reading", done, of }));
-      return open;
-    } catch (error) {
-      await open.close().catch(() => undefined);
-      throw error;
-    }
-  };
+type Engine = Awaited<ReturnType<typeof fetchEngine>>;
+
+async function openOnce(head: Head, engine: Engine): Promise<OpenDatabase> {
+  become({ phase: "opening" });
+  const open = await openDatabase(databaseName(head.book), engine);
   try {
-    return { open: await attempt(), rebuilt: false };
+    const mark = await readMark(open.db, head.device);
+    if (mark.applied >= head.next) throw new Error("the database is ahead of the journal");
+    await checkCounts(open.db, mark);
+    // What the mark says was really saved: it has just come out of a reopened database.
+    await journal.confirm(mark.applied);
+    await catchUp(open, head, (done, of) => become({ phase: "reading", done, of }));
+    return open;
   } catch (error) {
-    console.warn("The database is made anew from the journal.", error);
-    await deleteDatabase(name);
-    return { open: await attempt(), rebuilt: true };
+    await open.close().catch(() => undefined);
+    throw error;
+  }
+}
+
+/** The database while this thread leads. Where it turns out to be spoilt it is made anew, once, from the journal. */
+class Leader {
+  private rebuilding: Promise<void> | null = null;
+  private rebuilt = false;
+  private running: Promise<void> | null = null;
+  private again = false;
+  private applied = 0;
+
+  private constructor(
+    private readonly head: Head,
+    private readonly engine: Engine,
+    private open: OpenDatabase | null,
+  ) {}
+
+  static async start(): Promise<Leader> {
+    const head = await journal.head();
+    const engine = await fetchEngine((done, of) => become({ phase: "fetching", done, of }));
+    const leader = new Leader(head, engine, null);
+    try {
+      leader.open = await openOnce(head, engine);
+    } catch (error) {
+      await leader.rebuild(error);
+    }
+    return leader;
+  }
+
+  /** Asks the database; where it cannot answer, asks again the one made anew. */
+  async ask<T>(question: (db: BookDatabase) => Promise<T>): Promise<T> {
+    await this.rebuilding;
+    try {
+      return await question(this.open!.db);
+    } catch (error) {
+      await this.rebuild(error);
+      this.ready();
+      return question(this.open!.db);
+    }
+  }
+
+  source(db: BookDatabase) {
+    return drizzleSource(db, this.head.workshopId);
+  }
+
+  /** Brings the database up to the journal, now or after the round that is running. */
+  follow(): void {
+    this.again = true;
+    this.running ??= this.followToTheEnd()
+      .catch((error: unknown) => become({ phase: "failed", say: sayWhy(error) }))
+      .finally(() => (this.running = null));
+  }
+
+  private async followToTheEnd(): Promise<void> {
+    while (this.again) {
+      this.again = false;
+      this.applied = await this.ask(() => catchUp(this.open!, this.head));
+      state = { phase: "ready", applied: this.applied, rebuilt: this.rebuilt };
+      news.tell({ kind: "rows-changed", applied: this.applied });
+    }
+  }
+
+  ready(): void {
+    become({ phase: "ready", applied: this.applied, rebuilt: this.rebuilt });
+  }
+
+  private rebuild(because: unknown): Promise<void> {
+    if (this.rebuilt) return Promise.reject(because as Error);
+    this.rebuilding ??= this.makeAnew(because).finally(() => (this.rebuilding = null));
+    return this.rebuilding;
+  }
+
+  private async makeAnew(because: unknown): Promise<void> {
+    console.warn("The database is made anew from the journal.", because);
+    await this.open?.close().catch(() => undefined);
+    this.open = null;
+    await deleteDatabase(databaseName(this.head.book));
+    this.open = await openOnce(this.head, this.engine);
+    this.rebuilt = true;
   }
 }
 
 async function lead(): Promise<void> {
   leads = true;
   try {
-    const head = await journal.head();
-    const { open, rebuilt } = await openChecked(head);
-    const source = drizzleSource(open.db, head.workshopId);
+    const leader = await Leader.start();
     const api: DatabaseApi = {
       read: async (queryName, args) => {
         const query = queriesByName.get(queryName);
         if (!query) throw new Error(`No query ${queryName}`);
-        return query.need(source, args);
+        return leader.ask((db) => query.need(leader.source(db), args));
       },
-      page: async (table, afterId, limit) => {
-        const from = bookTables[table] as PgTable & { id: PgColumn };
-        const rows = await open.db
-          .select()
-          .from(from)
-          .where(afterId === null ? undefined : gt(from.id, afterId))
-          .orderBy(asc(from.id))
-          .limit(limit);
-        return rows as AnyRow[];
-      },
+      page: (table, afterId, limit) =>
+        leader.ask(async (db) => {
+          const from = bookTables[table] as PgTable & { id: PgColumn };
+          const rows = await db
+            .select()
+            .from(from)
+            .where(afterId === null ? undefined : gt(from.id, afterId))
+            .orderBy(asc(from.id))
+            .limit(limit);
+          return rows as AnyRow[];
+        }),
     };
     expose(api, new BroadcastChannel(CALLS_CHANNEL) as unknown as Endpoint);
-
-    let running: Promise<void> | null = null;
-    let again = false;
-    const run = async (): Promise<void> => {
-      do {
-        again = false;
-        const applied = await catchUp(open, head);
-        state = { phase: "ready", applied, rebuilt };
-        news.tell({ kind: "rows-changed", applied });
-      } while (again);
-    };
-    follow = () => {
-      again = true;
-      running ??= run()
-        .catch((error: unknown) => become({ phase: "failed", say: sayWhy(error) }))
-        .finally(() => (running = null));
-    };
-    become({ phase: "ready", applied: (await readMark(open.db, head.device)).applied, rebuilt });
+    // Not before it listens: a call that nobody hears is asked again only after its time limit.
+    leader.ready();
+    follow = () => leader.follow();
     // Changes that came between the last look and now.
     follow();
+    const head = await journal.head();
     void deleteOthers(databaseName(head.book)).catch(() => undefined);
   } catch (error) {
     become({ phase: "failed", say: sayWhy(error) });

@@ -1,5 +1,8 @@
-import { Screen } from "@/components/ui/screen";
+import { type Metadata } from "next";
+import { ClientsScreen } from "@/components/clients/clients-screen";
+
+export const metadata: Metadata = { title: "Clients" };
 
 export default function Page() {
-  return <Screen title="clients">{null}</Screen>;
+  return <ClientsScreen />;
 }

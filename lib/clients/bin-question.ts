@@ -1,7 +1,7 @@
 import { currency as currencyOf } from "@/lib/money/currencies";
 import { formatMoney } from "@/lib/money/format-money";
 import { type OrderSums } from "@/lib/money/order-sums";
-import { type Client, type Order, type Sleeve, type Wearer } from "@/lib/records/types";
+import { type Client, type Order, type Wearer } from "@/lib/records/types";
 
 /** What a question before the bin says: the question, and what goes along, a sentence each. */
 export interface BinQuestion {
@@ -12,6 +12,11 @@ export interface BinQuestion {
 type Counted = { order: Pick<Order, "stage" | "currency">; sums: Pick<OrderSums, "balanceMinor"> };
 
 const count = (n: number, one: string, many = `${one}s`): string => `${n} ${n === 1 ? one : many}`;
+
+function openWords(open: number, all: number): string {
+  if (open === 0) return "";
+  return open === all ? " not handed over" : `, ${open} of them not handed over`;
+}
 
 function amounts(orders: readonly Counted[], of: (balance: number) => number): string[] {
   const byCurrency = new Map<string, number>();
@@ -36,9 +41,7 @@ export function clientBinQuestion(
   const back = amounts(orders, (balance) => -balance);
   const parts = [
     ...(wearers > 0 ? [`${count(wearers, "wearer")} with all figures`] : []),
-    ...(orders.length > 0
-      ? [`${count(orders.length, "order")}${open > 0 ? `, ${open} of them not handed over` : ""}`]
-      : []),
+    ...(orders.length > 0 ? [`${count(orders.length, "order")}${openWords(open, orders.length)}`] : []),
   ];
   return {
     title: `Put ${client.name} in the bin?`,
@@ -55,7 +58,7 @@ export function clientBinQuestion(
 export function wearerBinQuestion(
   wearer: Pick<Wearer, "name">,
   sets: number,
-  sleeves: readonly Pick<Sleeve, "id">[],
+  sleeves: number,
   openGarments: readonly string[],
 ): BinQuestion {
   return {
@@ -69,18 +72,8 @@ export function wearerBinQuestion(
             } not handed over yet: ${openGarments.join(", ")}. The orders stay.`,
           ]
         : []),
-      ...(sleeves.length > 0 ? [`${count(sleeves.length, "sleeve")} stay${sleeves.length === 1 ? "s" : ""} under Sleeves.`] : []),
+      ...(sleeves > 0 ? [`${count(sleeves, "sleeve")} stay${sleeves === 1 ? "s" : ""} under Sleeves.`] : []),
       "All of it can be brought back from the bin.",
     ],
   };
-}
-
-/** Orders that went into the bin in the same change as their client, and come back with it. */
-export function wentWithClient<T extends Pick<Order, "clientId" | "removedAt">>(
-  client: Pick<Client, "id" | "removedAt">,
-  orders: readonly T[],
-): T[] {
-  return client.removedAt === null
-    ? []
-    : orders.filter((order) => order.clientId === client.id && order.removedAt === client.removedAt);
 }

@@ -1,5 +1,11 @@
 import { z } from "zod";
-import { isBlankWearer, NAME_AT_MOST, wearerProblems, wearerShape, type WearerValues } from "@/lib/clients/wearer-form";
+import {
+  isBlankWearer,
+  NAME_AT_MOST,
+  wearerProblems,
+  wearerShape,
+  type WearerValues,
+} from "@/lib/clients/wearer-form";
 import { type IsoDate } from "@/lib/people/iso-date";
 import { type Client, type ClientFields, type WearerFields } from "@/lib/records/types";
 import { wearerFields } from "./wearer-form";
@@ -46,13 +52,15 @@ export const clientSchema = clientShape;
 
 /** As `clientSchema`, with the wearers; a wearer with nothing typed is passed over. */
 export const newClientSchema = (today: IsoDate) =>
-  clientShape.extend({ self: z.boolean(), wearers: z.array(wearerShape) }).superRefine(({ wearers }, context) => {
-    wearers.forEach((wearer, i) => {
-      if (isBlankWearer(wearer)) return;
-      for (const { field, say } of wearerProblems(wearer, today))
-        context.addIssue({ code: "custom", path: ["wearers", i, field], message: say });
+  clientShape
+    .extend({ self: z.boolean(), wearers: z.array(wearerShape) })
+    .superRefine(({ wearers }, context) => {
+      wearers.forEach((wearer, i) => {
+        if (isBlankWearer(wearer)) return;
+        for (const { field, say } of wearerProblems(wearer, today))
+          context.addIssue({ code: "custom", path: ["wearers", i, field], message: say });
+      });
     });
-  });
 
 /** The row's fields. `phoneE164` is what the phone reads as, or null. */
 export function clientFields(values: ClientValues, phoneE164: string | null): ClientFields {

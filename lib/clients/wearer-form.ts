@@ -65,11 +65,23 @@ function birthProblems({ month, year }: WearerValues, today: IsoDate): Problem<"
     return [{ field: "year", say: "Type the year with all four figures, such as 2019." }];
   const born = Number(typed);
   if (born > now.year)
-    return [{ field: "year", say: `${born} is still to come. Type the year of birth, at the latest ${now.year}.` }];
+    return [
+      { field: "year", say: `${born} is still to come. Type the year of birth, at the latest ${now.year}.` },
+    ];
   if (now.year - born > OLDEST)
-    return [{ field: "year", say: `Born in ${born} would be ${now.year - born} years old. Type the year of birth again.` }];
+    return [
+      {
+        field: "year",
+        say: `Born in ${born} would be ${now.year - born} years old. Type the year of birth again.`,
+      },
+    ];
   if (born === now.year && Number(month) > now.month)
-    return [{ field: "month", say: `${monthNames[Number(month) - 1]} ${born} is still to come. Choose the month of birth.` }];
+    return [
+      {
+        field: "month",
+        say: `${monthNames[Number(month) - 1]} ${born} is still to come. Choose the month of birth.`,
+      },
+    ];
   return [];
 }
 
@@ -79,11 +91,18 @@ function toldProblems({ age, on }: WearerValues, today: IsoDate): Problem<"age" 
   if (!/^\d+$/u.test(typed))
     problems.push({ field: "age", say: "Type the age in whole years, such as 7; under one year type 0." });
   else if (Number(typed) > OLDEST)
-    problems.push({ field: "age", say: `${Number(typed)} years is more than anyone has lived. Type the age in whole years, such as 7.` });
+    problems.push({
+      field: "age",
+      say: `${Number(typed)} years is more than anyone has lived. Type the age in whole years, such as 7.`,
+    });
   if (!isDay(on)) problems.push({ field: "on", say: "Choose the day on which this was the age." });
-  else if (on > today) problems.push({ field: "on", say: "That day is still to come. Choose today or an earlier day." });
+  else if (on > today)
+    problems.push({ field: "on", say: "That day is still to come. Choose today or an earlier day." });
   else if (problems.length === 0 && Number(typed) + monthsBetween(on, today) / 12 > OLDEST)
-    problems.push({ field: "on", say: "At this age on that day, nobody would be alive now. Choose a later day." });
+    problems.push({
+      field: "on",
+      say: "At this age on that day, nobody would be alive now. Choose a later day.",
+    });
   return problems;
 }
 
@@ -94,7 +113,12 @@ export function wearerProblems(values: WearerValues, today: IsoDate): Problem<ke
     ...(name === ""
       ? [{ field: "name" as const, say: "Type the name of the one who will wear it." }]
       : name.length > NAME_AT_MOST
-        ? [{ field: "name" as const, say: `Type a name of at most ${NAME_AT_MOST} letters; the rest can stand in the note.` }]
+        ? [
+            {
+              field: "name" as const,
+              say: `Type a name of at most ${NAME_AT_MOST} letters; the rest can stand in the note.`,
+            },
+          ]
         : []),
     ...(values.known === "born" ? birthProblems(values, today) : []),
     ...(values.known === "told" ? toldProblems(values, today) : []),

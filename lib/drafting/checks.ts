@@ -122,10 +122,11 @@ function capShape({ figures: { biceps, capDepth } }: Subject): Check {
   };
 }
 
+/** "Near" is taken as within a fifth of it. */
 function capThird({ ask: { armhole }, figures: { capDepth } }: Subject): Check | undefined {
   if (!armhole) return undefined;
   const third = (armhole.front + armhole.back) / 3;
-  const [low, high] = [0.85 * third, 1.15 * third];
+  const [low, high] = [0.8 * third, 1.2 * third];
   const verdict = judge(capDepth, low, high);
   return {
     id: "cap-third",
@@ -253,7 +254,7 @@ function balance({ ask: { armhole }, draft: { lengths } }: Subject): Check | und
     remedy:
       verdict === "good"
         ? NOTHING
-        : say`Set the crown to the shoulder seam ${value / 2} towards the ${full} of the sleeve, or raise the ${lean} marks.`,
+        : say`Set the shoulder mark ${value / 2} from the crown towards the ${full}, or raise the ${lean} marks.`,
     ...PRACTICE,
   };
 }

@@ -47,6 +47,8 @@ const LIMITS: readonly (readonly [
   ["elbowGirth", "The elbow", 60, 800, (ask) => ask.elbowGirth],
   ["wrist", "The wrist", 50, 400, (ask) => ask.wrist],
   ["hand", "The hand", 60, 500, (ask) => ask.hand],
+  ["notches", "The front notch", 5, 700, (ask) => ask.notches?.front],
+  ["notches", "The back notch", 5, 700, (ask) => ask.notches?.back],
 ];
 
 /** Drafts and checks a sleeve. Throws on nothing a form can send. */
@@ -234,7 +236,7 @@ function figureProblems({ length, capDepth, elbow }: SleeveFigures): DraftProble
 function notchProblem(figures: SleeveFigures, draft: SleeveDraft, side: Side): DraftProblem[] {
   const notch = figures.notches[side];
   const seam = side === "front" ? draft.lengths.capFront : draft.lengths.capBack;
-  if (notch > 0 && notch < seam) return [];
+  if (notch < seam) return [];
   return [
     {
       id: "notch-off-seam",

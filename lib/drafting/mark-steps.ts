@@ -198,7 +198,7 @@ function guides(figures: SleeveFigures, draft: SleeveDraft): NewStep[] {
     {
       kind: "join",
       through: SIDES.map((side): PointName[] => [`underarm${half(side)}`, guideTop(figures, side)]),
-      phrase: say`Join each underarm point to the mark beside the crown on its own side: the guide lines.`,
+      phrase: say`Join each underarm point to ${beside === 0 ? "the crown" : "the mark beside the crown on its own side"}: the guide lines.`,
       draws: SIDES.map((side) =>
         segment(draft, `guide${half(side)}`, `underarm${half(side)}`, guideTop(figures, side)),
       ),

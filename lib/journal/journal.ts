@@ -41,18 +41,24 @@ export interface Journal {
   /**
    * Keeps one change. `build` is called inside the transaction and must not wait for anything.
    * Resolves when the change has reached the disk; rejects, with nothing kept, when it could not be.
+   * @param book the book that it was written for. @throws BookReplaced where another one stands here by now.
    */
-  append(build: (numbers: Numbers) => Write[]): Promise<Change>;
+  append(build: (numbers: Numbers) => Write[], book?: string): Promise<Change>;
   /** Keeps rows with the stamps they already have (a copy that is read back), as one change. */
   appendRows(rows: RowChange[], workshopId: string): Promise<Change>;
   /** Changes numbered above `after`, in order, at most `limit`. */
   since(after: number, limit?: number): Promise<Change[]>;
   /** Notes what a reopened database was seen to hold. */
   confirm(number: number): Promise<Head>;
-  /** Notes that a copy of everything up to now was saved. */
-  noteCopy(): Promise<Head>;
+  /** Notes that a copy was saved: the last change in it, and when it was made. */
+  noteCopy(copy: { number: number; at: string }): Promise<Head>;
   /** Empties everything in one transaction and begins a new book for `workshopId`. */
   startAnew(workshopId?: string): Promise<Head>;
+}
+
+/** Another window has cleared this book or read in another. Its rows are no more: nothing may be written about them. */
+export class BookReplaced extends Error {
+  override readonly name = "BookReplaced";
 }
 
 function freshHead(workshopId: string = newId()): Head {
@@ -90,12 +96,16 @@ export function openJournal(store: UseStore, now: () => number = Date.now): Jour
     return held ?? freshHead();
   };
 
-  const put = (build: (head: Head, stamp: string, numbers: Numbers) => RowChange[], workshopId?: string) =>
+  const put = (
+    build: (head: Head, stamp: string, numbers: Numbers) => RowChange[],
+    { workshopId, book }: { workshopId?: string; book?: string },
+  ) =>
     store("readwrite", async (objects) => {
       const done = promisifyRequest(objects.transaction);
       // A failing request also rejects below; the transaction's own rejection must not go unheard.
       done.catch(() => undefined);
       const head = await readHead(objects);
+      if (book !== undefined && head.book !== book) throw new BookReplaced("This book is no more.");
       let clock = tick(head.clock, now());
       let nextReceipt = head.nextReceipt;
       const rows = build(head, writeStamp(clock, head.device), {
@@ -130,8 +140,8 @@ export function openJournal(store: UseStore, now: () => number = Date.now): Jour
     head: async () =>
       (await store("readonly", (objects) => promisifyRequest<Head | undefined>(objects.get("head")))) ??
       updateHead((head) => head),
-    append: (build) => put((_head, stamp, numbers) => stamped(build(numbers), stamp)),
-    appendRows: (rows, workshopId) => put(() => rows, workshopId),
+    append: (build, book) => put((_head, stamp, numbers) => stamped(build(numbers), stamp), { book }),
+    appendRows: (rows, workshopId) => put(() => rows, { workshopId }),
     since: async (after, limit) => {
       const held = await store("readonly", (objects) =>
         promisifyRequest<Change[]>(objects.getAll(IDBKeyRange.bound(after, Infinity, true), limit)),
@@ -140,11 +150,7 @@ export function openJournal(store: UseStore, now: () => number = Date.now): Jour
     },
     confirm: (number) =>
       updateHead((head) => (number > head.confirmed ? { ...head, confirmed: number } : head)),
-    noteCopy: () =>
-      updateHead((head) => ({
-        ...head,
-        lastCopy: { number: head.next - 1, at: new Date(now()).toISOString() },
-      })),
+    noteCopy: (lastCopy) => updateHead((head) => ({ ...head, lastCopy })),
     startAnew: (workshopId) =>
       store("readwrite", async (objects) => {
         const done = promisifyRequest(objects.transaction);

@@ -64,7 +64,8 @@ export class Book {
   async keep(build: Write[] | ((numbers: Numbers) => Write[])): Promise<Change> {
     try {
       const start = performance.now();
-      const change = await this.journal.append(typeof build === "function" ? build : () => build);
+      const { book } = await this.opened;
+      const change = await this.journal.append(typeof build === "function" ? build : () => build, book);
       performance.measure("notchbook:kept", { start });
       return this.show(change);
     } catch (error) {
@@ -96,10 +97,15 @@ export class Book {
     this.news.tell({ kind: "book-changed" });
   }
 
-  /** Notes that a copy of everything up to now was saved. */
-  async noteCopy(): Promise<void> {
-    await this.journal.noteCopy();
+  /** Notes that a copy was saved: the last change in it, and when it was made. */
+  async noteCopy(copy: { number: number; at: string }): Promise<void> {
+    await this.journal.noteCopy(copy);
     await this.refreshHead();
+  }
+
+  /** The device's state as it is now, whichever tab moved it. */
+  head(): Promise<Head> {
+    return this.journal.head();
   }
 
   /** All changes in the journal after one, for a copy without the database. */

@@ -15,7 +15,12 @@ export function keepProblem(error: unknown): KeepProblem {
   const name = error instanceof DOMException || error instanceof Error ? error.name : "";
   if (name === "QuotaExceededError")
     return new KeepProblem(
-      "Not kept: this phone has no room left. Nothing you typed is lost. Delete photos or apps you do not need, then press again.",
+      "Not kept: this phone has no room left. What you typed still stands here. Delete photos or apps that you do not need, then press again.",
+      error,
+    );
+  if (name === "BookReplaced")
+    return new KeepProblem(
+      "Not kept: in another window the book was cleared or another one was read in. Note down what you typed, then open Notchbook again.",
       error,
     );
   if (name === "InvalidStateError" || name === "SecurityError" || name === "NotAllowedError")
@@ -24,7 +29,7 @@ export function keepProblem(error: unknown): KeepProblem {
       error,
     );
   return new KeepProblem(
-    "Not kept: the phone's storage did not answer. Nothing you typed is lost. Press again; if it fails again, save a copy under Workshop and restart the phone.",
+    "Not kept: the phone's storage did not answer. What you typed still stands here. Press again; if it fails again, save a copy under Workshop and restart the phone.",
     error,
   );
 }

@@ -1,5 +1,14 @@
-import { Screen } from "@/components/ui/screen";
+import { type Metadata } from "next";
+import { Suspense } from "react";
+import { ScreenOpening } from "@/components/clients/not-shown";
+import { ClientCardScreen } from "@/components/clients/client-card-screen";
+
+export const metadata: Metadata = { title: "Client" };
 
 export default function Page() {
-  return <Screen title="clients card">{null}</Screen>;
+  return (
+    <Suspense fallback={<ScreenOpening title="Client" />}>
+      <ClientCardScreen />
+    </Suspense>
+  );
 }

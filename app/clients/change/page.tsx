@@ -1,5 +1,14 @@
-import { Screen } from "@/components/ui/screen";
+import { type Metadata } from "next";
+import { Suspense } from "react";
+import { ScreenOpening } from "@/components/clients/not-shown";
+import { ChangeClientScreen } from "@/components/clients/change-client-screen";
+
+export const metadata: Metadata = { title: "Change the client" };
 
 export default function Page() {
-  return <Screen title="clients change">{null}</Screen>;
+  return (
+    <Suspense fallback={<ScreenOpening title="Change the client" />}>
+      <ChangeClientScreen />
+    </Suspense>
+  );
 }

@@ -1,5 +1,14 @@
-import { Screen } from "@/components/ui/screen";
+import { type Metadata } from "next";
+import { Suspense } from "react";
+import { ScreenOpening } from "@/components/clients/not-shown";
+import { NewClientScreen } from "@/components/clients/new-client-screen";
+
+export const metadata: Metadata = { title: "New client" };
 
 export default function Page() {
-  return <Screen title="clients new">{null}</Screen>;
+  return (
+    <Suspense fallback={<ScreenOpening title="New client" />}>
+      <NewClientScreen />
+    </Suspense>
+  );
 }

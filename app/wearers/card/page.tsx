@@ -1,5 +1,14 @@
-import { Screen } from "@/components/ui/screen";
+import { type Metadata } from "next";
+import { Suspense } from "react";
+import { ScreenOpening } from "@/components/clients/not-shown";
+import { WearerCardScreen } from "@/components/wearers/wearer-card-screen";
+
+export const metadata: Metadata = { title: "Wearer" };
 
 export default function Page() {
-  return <Screen title="wearers card">{null}</Screen>;
+  return (
+    <Suspense fallback={<ScreenOpening title="Wearer" />}>
+      <WearerCardScreen />
+    </Suspense>
+  );
 }

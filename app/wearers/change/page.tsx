@@ -1,5 +1,14 @@
-import { Screen } from "@/components/ui/screen";
+import { type Metadata } from "next";
+import { Suspense } from "react";
+import { ScreenOpening } from "@/components/clients/not-shown";
+import { ChangeWearerScreen } from "@/components/wearers/change-wearer-screen";
+
+export const metadata: Metadata = { title: "Change the wearer" };
 
 export default function Page() {
-  return <Screen title="wearers change">{null}</Screen>;
+  return (
+    <Suspense fallback={<ScreenOpening title="Change the wearer" />}>
+      <ChangeWearerScreen />
+    </Suspense>
+  );
 }

@@ -1,5 +1,14 @@
-import { Screen } from "@/components/ui/screen";
+import { type Metadata } from "next";
+import { Suspense } from "react";
+import { ScreenOpening } from "@/components/clients/not-shown";
+import { NewWearerScreen } from "@/components/wearers/new-wearer-screen";
+
+export const metadata: Metadata = { title: "New wearer" };
 
 export default function Page() {
-  return <Screen title="wearers new">{null}</Screen>;
+  return (
+    <Suspense fallback={<ScreenOpening title="New wearer" />}>
+      <NewWearerScreen />
+    </Suspense>
+  );
 }

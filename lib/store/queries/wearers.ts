@@ -1,4 +1,11 @@
-import { type Client, type Garment, type MeasurementSet, type Order, type Sleeve, type Wearer } from "@/lib/records/types";
+import {
+  type Client,
+  type Garment,
+  type MeasurementSet,
+  type Order,
+  type Sleeve,
+  type Wearer,
+} from "@/lib/records/types";
 import { type Rows } from "@/lib/journal/merge";
 import { byKey, findRow, idsIn, liveRowsOf, newestFirst, type Query, rowsOf } from "../query";
 import { standingSets } from "./clients";
@@ -54,7 +61,8 @@ function openGarments(rows: Rows, wearerId: string): WearerCardView["openGarment
       return order && order.removedAt === null && order.stage !== "handed-over" ? [{ garment, order }] : [];
     })
     .sort(
-      (a, b) => byKey(dueKey)(a.order, b.order) || byKey<Garment>((garment) => garment.id)(a.garment, b.garment),
+      (a, b) =>
+        byKey(dueKey)(a.order, b.order) || byKey<Garment>((garment) => garment.id)(a.garment, b.garment),
     );
 }
 

@@ -72,7 +72,7 @@ describe("cap seam", () => {
           }
         }
       }),
-      { numRuns: 1500 },
+      { numRuns: 600 },
     );
     // Both kinds must have been met, or the property says nothing.
     expect(fair).toBeGreaterThan(20);

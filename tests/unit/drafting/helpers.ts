@@ -52,20 +52,19 @@ export const human = fc
     figures(biceps, biceps * cap, biceps * cap + under, biceps * taper),
   );
 
-/** Any marks a hand might try, most of them poor. */
+/** Marks as a hand might change them: up to a fifth of the guide line along and a quarter inch in twelve out or in. */
 export const anyMarks = fc
   .record({
     base: human,
-    shares: fc.tuple(...Array.from({ length: 6 }, () => between(0.08, 0.95))),
-    outs: fc.tuple(...Array.from({ length: 6 }, () => between(-0.08, 0.09))),
+    along: fc.array(between(-0.2, 0.2), { minLength: 6, maxLength: 6 }),
+    out: fc.array(between(-1 / 48, 1 / 48), { minLength: 6, maxLength: 6 }),
   })
-  .map(({ base, shares, outs }): SleeveFigures => {
-    const marks = (from: number) =>
-      shares
-        .slice(from, from + 3)
-        .sort((a, b) => a - b)
-        .map((share, i) => ({ share, out: outs[from + i]! * base.biceps }));
-    return { ...base, front: marks(0), back: marks(3) };
+  .map(({ base, along, out }): SleeveFigures => {
+    const moved = (marks: SleeveFigures["front"], from: number) =>
+      marks
+        .map((m, i) => ({ share: m.share + along[from + i]!, out: m.out + out[from + i]! * base.biceps }))
+        .sort((a, b) => a.share - b.share);
+    return { ...base, front: moved(base.front, 0), back: moved(base.back, 3) };
   });
 
 /** Points evenly spread in the parameter, by de Casteljau, so that no library of the engine measures itself. */
