@@ -1,18 +1,11 @@
 /** The painter of the worker: text drawn on an OffscreenCanvas, with whatever fonts the phone has. */
-import { isRightToLeft } from "@/lib/pdf/text-runs";
+import { directionOf } from "@/lib/pdf/text-runs";
 import { type PaintedText, type TextBox, type TextPainter } from "@/lib/pdf/text-painter";
 
 const DOTS_A_POINT = 600 / 72;
 // Large letters are smooth with fewer dots, and a cheap phone has little memory.
 const LARGEST_LETTER = 100;
 const WIDEST_CANVAS = 8192;
-
-const FIRST_LETTER = /[\p{L}\u200e\u200f]/u;
-
-export const directionOf = (text: string): "rtl" | "ltr" => {
-  const first = FIRST_LETTER.exec(text)?.[0];
-  return first && isRightToLeft(first) ? "rtl" : "ltr";
-};
 
 /** `families` is a CSS list; the print fonts first, so that Latin words in an Arabic line look like the rest. */
 export function canvasPainter(families: string): TextPainter {

@@ -25,7 +25,15 @@ const RIGHT_TO_LEFT =
 const UNSEEN = /^[\p{Cf}\p{Cc}]+$/u;
 const BLANK = /^\s+$/;
 
+const FIRST_LETTER = /[\p{L}\u200e\u200f]/u;
+
 export const isRightToLeft = (text: string): boolean => RIGHT_TO_LEFT.test(text);
+
+/** The direction of a paragraph: that of its first letter or direction mark. */
+export function directionOf(text: string): "rtl" | "ltr" {
+  const first = FIRST_LETTER.exec(text)?.[0];
+  return first && isRightToLeft(first) ? "rtl" : "ltr";
+}
 
 /**
  * Text as it is printed: composed, hyphens and spaces of one kind, without control characters. Line ends stay.

@@ -1,8 +1,7 @@
 /** Breaks text into measured lines: at words, then, where a word is wider than its column, between letters. */
 import { type Item, type Line, shiftAll } from "@/lib/pdf/blocks";
 import { type PrintFonts } from "@/lib/pdf/print-fonts";
-import { isRightToLeft, splitGraphemes, splitRuns, tidy } from "@/lib/pdf/text-runs";
-import { directionOf } from "@/lib/pdf/canvas-painter";
+import { directionOf, isRightToLeft, splitGraphemes, splitRuns, tidy } from "@/lib/pdf/text-runs";
 import { type TextPainter } from "@/lib/pdf/text-painter";
 
 export interface TextStyle {
@@ -37,7 +36,7 @@ const CLOSING = /^[\p{Pe}\p{Pf}\p{Po}\p{Mn}]/u;
 
 /** Pieces that a line may end after; the spaces stay at their ends. */
 function breakable(text: string): string[] {
-  const pieces = text.match(/ *[^ ]+ *?(?= |$)|[^ ]+/g) ?? [];
+  const pieces = text.match(/[^ ]+ */g) ?? [];
   return pieces
     .flatMap((piece) => piece.split(/(?<=\p{L}[-–—/])(?=\p{L})|(?<=\u200b)/u))
     .flatMap((piece) => {
