@@ -1,5 +1,8 @@
-import { Screen } from "@/components/ui/screen";
+import { type Metadata } from "next";
+import { BinScreen } from "@/components/bin/bin-screen";
+
+export const metadata: Metadata = { title: "The bin" };
 
 export default function Page() {
-  return <Screen title="bin">{null}</Screen>;
+  return <BinScreen />;
 }

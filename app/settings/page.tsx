@@ -1,5 +1,8 @@
-import { Screen } from "@/components/ui/screen";
+import { type Metadata } from "next";
+import { SettingsScreen } from "@/components/workshop/settings-screen";
+
+export const metadata: Metadata = { title: "Workshop" };
 
 export default function Page() {
-  return <Screen title="settings">{null}</Screen>;
+  return <SettingsScreen />;
 }

@@ -1,5 +1,8 @@
-import { Screen } from "@/components/ui/screen";
+import { type Metadata } from "next";
+import { SleeveListScreen } from "@/components/sleeves/sleeve-list-screen";
+
+export const metadata: Metadata = { title: "Sleeves" };
 
 export default function Page() {
-  return <Screen title="sleeves">{null}</Screen>;
+  return <SleeveListScreen />;
 }

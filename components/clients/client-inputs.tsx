@@ -48,7 +48,7 @@ export function RestOfClient({ register, errors }: Pick<ClientInputsProps, "regi
       <Field label="Address" optional>
         <TextArea {...register("address")} rows={2} autoComplete="off" />
       </Field>
-      <Field label="Note" optional hint="The way to the house, the best time to ring, what she likes.">
+      <Field label="Note" optional hint="The way to the house, the best time to ring, what they like.">
         <TextArea {...register("note")} rows={2} />
       </Field>
     </>

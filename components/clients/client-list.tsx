@@ -72,7 +72,10 @@ function FindField({ find }: { find: string }) {
         Find by name, phone or wearer
       </label>
       <div className="relative">
-        <Search aria-hidden="true" className="pointer-events-none absolute start-3 top-1/2 size-5 -translate-y-1/2 text-soft" />
+        <Search
+          aria-hidden="true"
+          className="pointer-events-none absolute start-3 top-1/2 size-5 -translate-y-1/2 text-soft"
+        />
         <TextInput
           id={id}
           ref={input}

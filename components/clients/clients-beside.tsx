@@ -3,6 +3,7 @@
 import { usePathname } from "next/navigation";
 import { type ReactNode, Suspense, useSyncExternalStore } from "react";
 import { useView } from "@/components/store/use-book";
+import { ButtonLink } from "@/components/ui/button";
 import { wearerCardQuery } from "@/lib/store/queries/wearers";
 import { ClientList } from "./client-list";
 import { useIdParam } from "./use-id-param";
@@ -26,16 +27,19 @@ export function ClientsBeside({ children }: { children: ReactNode }) {
   );
   if (path === "/clients") return children;
   return (
-    <div className="lg:grid lg:grid-cols-[minmax(0,24rem)_minmax(0,1fr)]">
+    <div className="lg:grid lg:grid-cols-[minmax(0,24.25rem)_minmax(0,1fr)]">
       <aside
         aria-labelledby="clients-beside"
         className="hidden lg:sticky lg:top-0 lg:block lg:max-h-dvh lg:self-start lg:overflow-y-auto lg:py-2 lg:ps-8 lg:pe-1"
       >
         {wide && (
           <>
-            <h2 id="clients-beside" className="mb-4 font-figure text-2xl font-bold">
-              Clients
-            </h2>
+            <div className="mb-4 flex items-center justify-between gap-2">
+              <h2 id="clients-beside" className="font-figure text-2xl font-bold">
+                Clients
+              </h2>
+              <ButtonLink href="/clients/new">New client</ButtonLink>
+            </div>
             <div className="grid grid-cols-[minmax(0,1fr)] gap-4 pb-4">
               <Suspense>{path.startsWith("/wearers/") ? <ListWithWearer /> : <ListWithClient />}</Suspense>
             </div>

@@ -20,7 +20,7 @@ export function FirstWearers({ form, today }: { form: UseFormReturn<NewClientVal
       </h2>
       <Check
         {...form.register("self")}
-        label="The client herself or himself"
+        label="The client too"
         hint="Kept as grown up, age not asked. Both can be changed later."
       />
       {fields.map((field, i) => (
@@ -29,7 +29,11 @@ export function FirstWearers({ form, today }: { form: UseFormReturn<NewClientVal
             level={3}
             title={wearers[i]?.name.trim() || "Someone to sew for"}
             end={
-              <Button variant="quiet" onClick={() => remove(i)} aria-label={`Leave out ${wearers[i]?.name.trim() || "this one"}`}>
+              <Button
+                variant="quiet"
+                onClick={() => remove(i)}
+                aria-label={`Leave out ${wearers[i]?.name.trim() || "this one"}`}
+              >
                 Leave out
               </Button>
             }

@@ -41,7 +41,13 @@ export function NewClientScreen() {
   return <NewClientForm initial={initial} handle={handle} />;
 }
 
-function NewClientForm({ initial, handle }: { initial: NewClientValues; handle: DraftHandle<NewClientValues> }) {
+function NewClientForm({
+  initial,
+  handle,
+}: {
+  initial: NewClientValues;
+  handle: DraftHandle<NewClientValues>;
+}) {
   const router = useRouter();
   const today = useToday();
   const country = useWorkshop()?.country ?? "";

@@ -20,13 +20,14 @@ export function NotShown({
   return (
     <Screen title={title} back={backToClients}>
       {state === "opening" && <Progress label="Opening the book" />}
-      {state === "failed" && <Notice tone="wrong" title="The book on this phone did not answer. Close Notchbook and open it again." />}
-      {state === "known" && (
+      {state === "failed" && (
         <Notice
-          tone="look"
-          title={say}
-          action={<ButtonLink href="/clients">All clients</ButtonLink>}
-        >
+          tone="wrong"
+          title="The book on this phone did not answer. Close Notchbook and open it again."
+        />
+      )}
+      {state === "known" && (
+        <Notice tone="look" title={say} action={<ButtonLink href="/clients">All clients</ButtonLink>}>
           <p>It may be in another book, or the link may be cut short.</p>
         </Notice>
       )}

@@ -25,7 +25,8 @@ export function useFormDraft<T extends FieldValues>(
     () =>
       form.subscribe({
         formState: { values: true },
-        callback: ({ values }) => void (same(values, initial) ? dropDraft(key).catch(() => undefined) : save(values)),
+        callback: ({ values }) =>
+          void (same(values, initial) ? dropDraft(key).catch(() => undefined) : save(values)),
       }),
     [form, key, initial, save],
   );

@@ -2,9 +2,10 @@
 
 import { usePathname, useRouter } from "next/navigation";
 import { type ReactNode, useEffect } from "react";
-import { Notice } from "@/components/ui/notice";
-import { Screen } from "@/components/ui/screen";
 import { useBookState } from "@/components/store/use-book";
+import { openBook } from "@/lib/store/book";
+import { forgetOtherScreens } from "@/lib/workshop/clear-phone";
+import { NoStorage } from "./no-storage";
 
 /** Leads a first visit to the start; says plainly where this browser can keep nothing. */
 export function BookGate({ children }: { children: ReactNode }) {
@@ -12,18 +13,17 @@ export function BookGate({ children }: { children: ReactNode }) {
   const router = useRouter();
   const path = usePathname();
   const isNew = state.phase === "open" && state.head.next === 1;
+  const book = state.phase === "open" ? state.head.book : null;
+  const leadsOn = isNew && path !== "/start";
 
   useEffect(() => {
-    if (isNew && path !== "/start") router.replace("/start");
-  }, [isNew, path, router]);
+    // The first change shows before the head has moved on.
+    if (leadsOn && openBook().pending.last === 0) router.replace("/start");
+  }, [leadsOn, router]);
+  useEffect(() => {
+    if (book) forgetOtherScreens(book).catch(() => undefined);
+  }, [book]);
 
-  if (state.phase === "no-storage")
-    return (
-      <Screen title="Nothing can be kept here">
-        <Notice tone="wrong" title="This browser does not let Notchbook keep anything on the phone.">
-          <p>{state.say}</p>
-        </Notice>
-      </Screen>
-    );
+  if (state.phase === "no-storage") return <NoStorage say={state.say} />;
   return children;
 }

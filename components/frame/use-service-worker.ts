@@ -1,72 +1,90 @@
 "use client";
 
-import { useCallback, useEffect, useState } from "react";
+import { useSyncExternalStore } from "react";
 
+/** How far the app itself is on this phone. One store for the page: it registers once, whoever asks. */
 export interface ShellState {
-  /** Every screen is on the phone: the app works without a line. */
-  ready: boolean;
+  /** "off": this browser has no service workers, or this is no built app. "ready": every screen works without a line. */
+  phase: "off" | "getting" | "ready" | "failed";
   /** It has just become so, for the first time. */
   justReady: boolean;
-  /** Why it could not be made ready, or null. */
-  failed: string | null;
   updateWaits: boolean;
-  useUpdate(): void;
-  dismissReady(): void;
 }
 
 const SAID_KEY = "notchbook-ready-said";
 
-/** Registers the service worker and follows it. */
-export function useServiceWorker(): ShellState {
-  const [ready, setReady] = useState(false);
-  const [justReady, setJustReady] = useState(false);
-  const [failed, setFailed] = useState<string | null>(null);
-  const [waiting, setWaiting] = useState<ServiceWorker | null>(null);
+const atFirst: ShellState = { phase: "off", justReady: false, updateWaits: false };
+let state = atFirst;
+let started = false;
+let waiting: ServiceWorker | null = null;
+const listeners = new Set<() => void>();
 
-  useEffect(() => {
-    if (!("serviceWorker" in navigator) || process.env.NODE_ENV === "development") return;
-    let current = true;
-    const hadController = navigator.serviceWorker.controller !== null;
+function become(next: Partial<ShellState>): void {
+  state = { ...state, ...next };
+  for (const listener of listeners) listener();
+}
 
-    const follow = (registration: ServiceWorkerRegistration) => {
-      const look = () => {
-        if (!current) return;
-        if (registration.active) {
-          setReady(true);
-          if (!localStorage.getItem(SAID_KEY)) {
-            localStorage.setItem(SAID_KEY, "1");
-            setJustReady(true);
-          }
-        }
-        // A first install also waits for a moment; only with an active one before it is it an update.
-        setWaiting(registration.active ? registration.waiting : null);
-      };
+/** True once: the first time that the phone has everything. */
+function firstTime(): boolean {
+  try {
+    if (localStorage.getItem(SAID_KEY)) return false;
+    localStorage.setItem(SAID_KEY, "1");
+    return true;
+  } catch {
+    return false;
+  }
+}
+
+function follow(registration: ServiceWorkerRegistration): void {
+  const look = () => {
+    if (registration.active && state.phase !== "ready") become({ phase: "ready", justReady: firstTime() });
+    // A first install also waits for a moment; only with an active one before it is it an update.
+    waiting = registration.active ? registration.waiting : null;
+    become({ updateWaits: waiting !== null });
+  };
+  const watch = (worker: ServiceWorker | null) =>
+    worker?.addEventListener("statechange", () => {
+      if (worker.state === "redundant" && !registration.active) become({ phase: "failed" });
       look();
-      const watch = (worker: ServiceWorker | null) =>
-        worker?.addEventListener("statechange", () => {
-          if (worker.state === "redundant" && !registration.active)
-            setFailed("Notchbook could not be put on this phone. Stay on the line and open it again.");
-          look();
-        });
-      watch(registration.installing);
-      registration.addEventListener("updatefound", () => watch(registration.installing));
-    };
-    navigator.serviceWorker
-      .register("/sw.js", { scope: "/", updateViaCache: "none" })
-      .then(follow, () => {
-        if (current && !hadController)
-          setFailed("Notchbook could not be put on this phone. Stay on the line and open it again.");
-      });
-    return () => {
-      current = false;
-    };
-  }, []);
+    });
+  look();
+  watch(registration.installing);
+  registration.addEventListener("updatefound", () => watch(registration.installing));
+}
 
-  const useUpdate = useCallback(() => {
-    if (!waiting) return;
-    navigator.serviceWorker.addEventListener("controllerchange", () => location.reload(), { once: true });
-    waiting.postMessage({ type: "SKIP_WAITING" });
-  }, [waiting]);
-  const dismissReady = useCallback(() => setJustReady(false), []);
-  return { ready, justReady, failed, updateWaits: waiting !== null, useUpdate, dismissReady };
+function start(): void {
+  if (started) return;
+  started = true;
+  if (!("serviceWorker" in navigator) || process.env.NODE_ENV === "development") return;
+  state = { ...state, phase: "getting" };
+  const known = navigator.serviceWorker.controller !== null;
+  navigator.serviceWorker.register("/sw.js", { scope: "/", updateViaCache: "none" }).then(follow, () => {
+    // Without a line the one that is there goes on; only a first visit is left without.
+    become({ phase: known ? "ready" : "failed" });
+  });
+}
+
+function subscribe(listener: () => void): () => void {
+  start();
+  listeners.add(listener);
+  return () => listeners.delete(listener);
+}
+
+export function useServiceWorker(): ShellState {
+  return useSyncExternalStore(
+    subscribe,
+    () => state,
+    () => atFirst,
+  );
+}
+
+/** Goes over to the newer build that waits; the page begins again. */
+export function takeUpdate(): void {
+  if (!waiting) return;
+  navigator.serviceWorker.addEventListener("controllerchange", () => location.reload(), { once: true });
+  waiting.postMessage({ type: "SKIP_WAITING" });
+}
+
+export function dismissReady(): void {
+  become({ justReady: false });
 }

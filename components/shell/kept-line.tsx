@@ -1,42 +1,28 @@
-import { CloudOff, CloudUpload, HardDriveDownload, LoaderCircle } from "lucide-react";
+import { CloudOff, LoaderCircle } from "lucide-react";
+import { AppLink } from "@/components/ui/app-link";
 
 export type KeptLineProps = {
-  /** Changes kept here and not yet sent; null where there is no server to send to. */
-  waiting: number | null;
-  /** Since when the oldest waits, in words ready to print: "Tuesday", "14:20". */
-  since?: string;
-  /** `opening` the database of the phone opens; `reading` it is filled from the journal or the server. */
-  state: "ready" | "opening" | "reading";
-  /** How far reading is. */
-  progress?: { done: number; total: number };
+  /** What is kept, and what waits. */
+  said: string;
+  /** The phone is still at work on it. */
+  working: boolean;
+  /** Where more about it stands. */
+  href: string;
 };
 
-const changes = (count: number) => `${count} ${count === 1 ? "change" : "changes"} to send`;
-
-const words = ({ waiting, since, state, progress }: KeptLineProps): string => {
-  if (state === "opening") return "Opening the book on this phone";
-  if (state === "reading")
-    return progress ? `Reading the book, ${progress.done} of ${progress.total}` : "Reading the book";
-  if (waiting === null) return "Kept on this phone";
-  if (waiting === 0) return "Kept on this phone · all sent";
-  return `Kept on this phone · ${changes(waiting)}${since ? `, since ${since}` : ""}`;
-};
-
-/** The line at the top of every screen: what is kept, and what is still to be sent. */
-export function KeptLine(props: KeptLineProps) {
-  const { waiting, state } = props;
-  const Sign =
-    state !== "ready"
-      ? LoaderCircle
-      : waiting === null
-        ? CloudOff
-        : waiting
-          ? CloudUpload
-          : HardDriveDownload;
+/** The line at the top of every screen: what is kept, and what no copy has yet. */
+export function KeptLine({ said, working, href }: KeptLineProps) {
+  const Sign = working ? LoaderCircle : CloudOff;
   return (
     <p role="status" className="kept-line">
-      <Sign aria-hidden="true" className="size-4 shrink-0" />
-      <span>{words(props)}</span>
+      {/* The line is small; what can be touched reaches beyond it. */}
+      <AppLink
+        href={href}
+        className="relative flex items-center gap-2 text-soft no-underline after:absolute after:-inset-x-2 after:-inset-y-2.5 hover:underline"
+      >
+        <Sign aria-hidden="true" className="size-4 shrink-0" />
+        <span>{said}</span>
+      </AppLink>
     </p>
   );
 }

@@ -78,9 +78,9 @@ export const places: readonly Place[] = [
   },
 ];
 
-/** The place a path belongs to: the one it is, or lies below; measuring belongs to the clients. */
+/** The place a path belongs to: the one it is, or lies below; wearers and measuring belong to the clients. */
 export const placeOf = (path: string): string => {
-  if (path === "/measure" || path.startsWith("/measure/")) return "/clients";
+  if (/^\/(measure|wearers)(\/|$)/.test(path)) return "/clients";
   const below = places.find(({ href }) => href !== "/" && (path === href || path.startsWith(`${href}/`)));
   return below?.href ?? (path === "/" ? "/" : "");
 };

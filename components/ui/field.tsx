@@ -70,7 +70,7 @@ export function Field({ label, hint, error, id, optional, className, children }:
 
 const box =
   "w-full min-w-0 rounded border-2 border-edge bg-well px-3 py-2 text-ink placeholder:text-soft " +
-  "aria-invalid:border-pin aria-invalid:border-dashed read-only:bg-transparent disabled:border-dashed disabled:text-soft";
+  "aria-invalid:border-pin aria-invalid:border-dashed disabled:border-dashed disabled:text-soft";
 
 export type TextInputProps = ComponentProps<"input"> & {
   /** A figure: large, tabular, with the number keys on a phone. */

@@ -17,7 +17,11 @@ const NOT_HERE = "The client of this wearer is not in the book.";
 
 export function NewWearerScreen() {
   const client = useIdParam("client");
-  return client ? <NewOf key={client} clientId={client} /> : <NotShown title={TITLE} state="known" say={NOT_HERE} />;
+  return client ? (
+    <NewOf key={client} clientId={client} />
+  ) : (
+    <NotShown title={TITLE} state="known" say={NOT_HERE} />
+  );
 }
 
 function NewOf({ clientId }: { clientId: string }) {

@@ -28,7 +28,7 @@ export function WearerInputs({ register, errors, known, today, short }: WearerIn
           { value: "told", label: "Age" },
           { value: "grown", label: "Grown up", sub: "not asked" },
         ]}
-        hint={known === "born" ? "A child’s figures grow old: the age says how fast." : undefined}
+        hint={known === "born" ? "A child's figures grow old: the age says how fast." : undefined}
       />
       {known === "born" && (
         <div className="grid grid-cols-[repeat(auto-fit,minmax(min(100%,9rem),1fr))] items-start gap-3">

@@ -1,5 +1,3 @@
-import { currency as currencyOf } from "@/lib/money/currencies";
-import { formatMoney } from "@/lib/money/format-money";
 import { type OrderSums } from "@/lib/money/order-sums";
 import { type Client, type Order, type Wearer } from "@/lib/records/types";
 
@@ -11,6 +9,9 @@ export interface BinQuestion {
 
 type Counted = { order: Pick<Order, "stage" | "currency">; sums: Pick<OrderSums, "balanceMinor"> };
 
+/** Minor units and an ISO 4217 code, in words. */
+type SayMoney = (minor: number, currency: string) => string;
+
 const count = (n: number, one: string, many = `${one}s`): string => `${n} ${n === 1 ? one : many}`;
 
 function openWords(open: number, all: number): string {
@@ -18,16 +19,14 @@ function openWords(open: number, all: number): string {
   return open === all ? " not handed over" : `, ${open} of them not handed over`;
 }
 
-function amounts(orders: readonly Counted[], of: (balance: number) => number): string[] {
+/** Sums of one sign, each currency by itself. */
+function amounts(orders: readonly Counted[], sign: 1 | -1, money: SayMoney): string[] {
   const byCurrency = new Map<string, number>();
   for (const { order, sums } of orders) {
-    const minor = of(sums.balanceMinor);
+    const minor = sums.balanceMinor * sign;
     if (minor > 0) byCurrency.set(order.currency, (byCurrency.get(order.currency) ?? 0) + minor);
   }
-  return [...byCurrency].map(([code, minor]) => {
-    const known = currencyOf(code);
-    return known ? formatMoney(minor, known) : `${minor} ${code}`;
-  });
+  return [...byCurrency].map(([code, minor]) => money(minor, code));
 }
 
 /** Before a client is put in the bin: what goes along, and what money stands out. */
@@ -35,10 +34,11 @@ export function clientBinQuestion(
   client: Pick<Client, "name">,
   wearers: number,
   orders: readonly Counted[],
+  money: SayMoney,
 ): BinQuestion {
   const open = orders.filter(({ order }) => order.stage !== "handed-over").length;
-  const owed = amounts(orders, (balance) => balance);
-  const back = amounts(orders, (balance) => -balance);
+  const owed = amounts(orders, 1, money);
+  const back = amounts(orders, -1, money);
   const parts = [
     ...(wearers > 0 ? [`${count(wearers, "wearer")} with all figures`] : []),
     ...(orders.length > 0 ? [`${count(orders.length, "order")}${openWords(open, orders.length)}`] : []),
@@ -76,4 +76,14 @@ export function wearerBinQuestion(
       "All of it can be brought back from the bin.",
     ],
   };
+}
+
+/** Orders that went into the bin in the same change as their client, and come back with it. */
+export function wentWithClient<T extends Pick<Order, "clientId" | "removedAt">>(
+  client: Pick<Client, "id" | "removedAt">,
+  orders: readonly T[],
+): T[] {
+  return client.removedAt === null
+    ? []
+    : orders.filter((order) => order.clientId === client.id && order.removedAt === client.removedAt);
 }

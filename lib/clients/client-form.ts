@@ -2,13 +2,13 @@ import { z } from "zod";
 import {
   isBlankWearer,
   NAME_AT_MOST,
+  wearerFields,
   wearerProblems,
   wearerShape,
   type WearerValues,
 } from "@/lib/clients/wearer-form";
 import { type IsoDate } from "@/lib/people/iso-date";
 import { type Client, type ClientFields, type WearerFields } from "@/lib/records/types";
-import { wearerFields } from "./wearer-form";
 
 /** What the form holds of a client, as typed. */
 export interface ClientValues {

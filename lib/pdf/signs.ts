@@ -1,5 +1,5 @@
 /** The signs of the house on paper: the notch and the tape. */
-import { BLACK, type Block, type Colour, type Item, type PathStep, shape, strokeLine } from "@/lib/pdf/blocks";
+import { BLACK, type Block, type Colour, type Item, moved, type PathStep, shape, strokeLine } from "@/lib/pdf/blocks";
 import { MM } from "@/lib/pdf/papers";
 
 export type TapeUnit = "inch" | "cm";
@@ -48,15 +48,15 @@ export function card(block: Block, width: number, padding: number, fill?: Colour
   const inset = line / 2;
   const outline = shape(
     [
-      inset, inset,
-      notchAt - half, inset,
-      notchAt, inset + NOTCH_DEPTH * 1.3,
-      notchAt + half, inset,
-      width - inset, inset,
-      width - inset, height - inset,
-      inset, height - inset,
-    ], // prettier-ignore
+      ...[inset, inset],
+      ...[notchAt - half, inset],
+      ...[notchAt, inset + NOTCH_DEPTH * 1.3],
+      ...[notchAt + half, inset],
+      ...[width - inset, inset],
+      ...[width - inset, height - inset],
+      ...[inset, height - inset],
+    ],
     { fill, stroke: { width: line, colour: BLACK } },
   );
-  return { height, items: [outline, ...block.items.map((item) => item)] };
+  return { height, items: [outline, ...moved(block, padding, padding).items] };
 }

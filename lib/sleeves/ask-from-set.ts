@@ -5,10 +5,9 @@ import { type Phrase } from "@/lib/lengths/phrase";
 import { mmPerInch } from "@/lib/lengths/units";
 import { type Fineness, type Unit } from "@/lib/records/types";
 import { grownArmMm, usualBicepsEase } from "@/lib/sleeves/make-from-record";
+import { type Reach, reaches } from "@/lib/sleeves/reach";
 import { type FigureKey } from "@/lib/sleeves/sleeve-figures";
 import { type SleeveForm } from "@/lib/sleeves/sleeve-form";
-
-export type Reach = "short" | "three-quarter" | "long";
 
 export interface SetAsk {
   /** As the form would have it typed. */
@@ -117,7 +116,11 @@ export function askFromSet({ figures, ageYears, reach, unit, fineness }: AskFrom
     if (reach === "long") return put("length", arm, as("Arm length", arm));
     if (upper === undefined) return;
     if (reach === "short")
-      return put("length", upper * shortShare, ["Six tenths of the upper arm, ", { mm: upper }, ` ${practice}.`]);
+      return put("length", upper * shortShare, [
+        "Six tenths of the upper arm, ",
+        { mm: upper },
+        ` ${practice}.`,
+      ]);
     if (arm !== undefined)
       put("length", (upper + arm) / 2, [
         "Half-way between the elbow, ",
@@ -160,7 +163,24 @@ export function fillFromSet(form: SleeveForm, now: SetAsk, before: SetAsk | null
     const untouched = typed[key] === "" || typed[key] === before?.typed[key];
     if (untouched) typed[key] = now.typed[key] ?? "";
   }
-  if (before) return { ...form, typed, hemOpens: form.hemOpens === before.hemOpens ? now.hemOpens : form.hemOpens };
+  if (before)
+    return { ...form, typed, hemOpens: form.hemOpens === before.hemOpens ? now.hemOpens : form.hemOpens };
   const { armholeBy, bicepsBy, capBy, hemOpens } = now;
   return { ...form, typed, armholeBy, bicepsBy, capBy, hemOpens };
+}
+
+/** Where each figure on the form was taken from, as far as it still stands as the set has it. */
+export function saidOf(
+  form: SleeveForm,
+  options: Omit<AskFromSetOptions, "reach" | "unit" | "fineness">,
+): SetAsk["said"] {
+  const tried = form.reach ? [form.reach] : reaches.map(({ value }) => value);
+  const said: SetAsk["said"] = {};
+  for (const reach of tried) {
+    const ask = askFromSet({ ...options, reach, unit: form.unit, fineness: form.fineness });
+    for (const key of Object.keys(ask.said) as FigureKey[]) {
+      if (!said[key] && form.typed[key] === ask.typed[key]) said[key] = ask.said[key]!;
+    }
+  }
+  return said;
 }

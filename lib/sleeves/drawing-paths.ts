@@ -150,3 +150,14 @@ export function highlightOf(key: FigureKey | null): Highlight {
 export function alwaysShown({ name }: Dimension): boolean {
   return name !== "capFront" && name !== "capBack";
 }
+
+/** Boxes grow by whole steps of this, mm, so that a small change of a figure does not shift the whole drawing. */
+const boxStep = 25.4;
+
+/** The box of a draft, widened evenly to the next step: the same one while a figure changes a little. */
+export function steadyBox(draft: Pick<SleeveDraft, "guides" | "piece">): Box {
+  const { h, w, y } = boxOf(draft);
+  const up = (value: number) => Math.ceil(value / boxStep - 1e-9) * boxStep;
+  const wide = up(w);
+  return { x: -wide / 2, y, w: wide, h: up(h) };
+}

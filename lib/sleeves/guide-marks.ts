@@ -36,7 +36,10 @@ export function parseShare(text: string): { ok: true; share: number } | { ok: fa
   const plain = westernDigits(text).normalize("NFKC").replace(/%/u, "").replace(",", ".").trim();
   const number = /^\d{1,3}(\.\d+)?$/u.test(plain) ? Number(plain) : NaN;
   if (!(number > 0 && number < 100))
-    return { ok: false, say: "Type a number above 0 and below 100: hundredths of the guide line, such as 25." };
+    return {
+      ok: false,
+      say: "Type a number above 0 and below 100: hundredths of the guide line, such as 25.",
+    };
   return { ok: true, share: number / 100 };
 }
 

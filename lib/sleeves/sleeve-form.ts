@@ -9,6 +9,7 @@ import {
   type Unit,
 } from "@/lib/records/types";
 import { marksOf, type MarkProblem, markTexts, type MarkText } from "@/lib/sleeves/guide-marks";
+import { type Reach } from "@/lib/sleeves/reach";
 import { type FigureKey, sleeveFigure, sleeveFigures } from "@/lib/sleeves/sleeve-figures";
 
 export interface SleeveForm {
@@ -17,6 +18,8 @@ export interface SleeveForm {
   name: string;
   wearerId: string | null;
   setId: string | null;
+  /** How far down the arm the set was asked to fill the form; null where it was not. */
+  reach: Reach | null;
   /** As typed; "" where left out. */
   typed: Record<FigureKey, string>;
   /** The cap depth is given, or found from the armhole. */
@@ -37,6 +40,7 @@ export function emptyForm(unit: Unit, fineness: Fineness): SleeveForm {
     name: "",
     wearerId: null,
     setId: null,
+    reach: null,
     typed: Object.fromEntries(sleeveFigures.map(({ key }) => [key, ""])) as Record<FigureKey, string>,
     capBy: "given",
     armholeBy: "halves",
@@ -87,6 +91,22 @@ export function formInUnit(form: SleeveForm, unit: Unit): SleeveForm {
   const marks = (texts: MarkText[] | null) =>
     texts && texts.map((mark) => ({ ...mark, outTyped: mark.outTyped && again(mark.outTyped) }));
   return { ...form, unit, typed, marks: { front: marks(form.marks.front), back: marks(form.marks.back) } };
+}
+
+/** A form that was put down earlier, in this unit; what it has not got is as on an empty one. */
+export function restoredForm(draft: Partial<SleeveForm>, unit: Unit, fineness: Fineness): SleeveForm {
+  const empty = emptyForm(unit, fineness);
+  return formInUnit({ ...empty, ...draft, typed: { ...empty.typed, ...draft.typed } }, unit);
+}
+
+/** The form with a figure set from outside its field: by a handle, or taken over from what was found. */
+export function withFigure(form: SleeveForm, key: FigureKey, mm: number): SleeveForm {
+  return {
+    ...form,
+    typed: { ...form.typed, [key]: formatLength(mm, form.unit, form.fineness).figure },
+    ...(key === "capDepth" && { capBy: "given" as const }),
+    ...(key === "biceps" && { bicepsBy: "given" as const }),
+  };
 }
 
 /** The figures that the form asks for as it is set, in order. */

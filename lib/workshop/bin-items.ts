@@ -46,6 +46,14 @@ export function comesBack(item: BinItem, bin: readonly BinItem[]): BinItem[] {
   return back;
 }
 
+/** "With it comes the client Ana."; empty where it comes alone. */
+export function alongWords(all: readonly BinItem[], item: BinItem): string {
+  const others = all.filter((other) => other !== item).map(binWords);
+  if (others.length === 0) return "";
+  const named = others.map(({ kind, name }) => `${kind.toLowerCase()} ${name}`);
+  return `With it ${others.length === 1 ? "comes" : "come"} ${named.join(", ")}.`;
+}
+
 export function bringBack(items: readonly BinItem[]): Write[] {
   return items.map(({ table, row }) => setRemoved(table, row, null));
 }

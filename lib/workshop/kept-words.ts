@@ -26,8 +26,21 @@ function waiting(head: Head, now: Date): string {
   return n === 0 ? `all in the copy of ${when}` : `${changes(n)} since the last copy, ${when}`;
 }
 
+/** The same as a sentence of its own. */
+export function copyWords(head: Head, now: Date): string {
+  const n = changesSinceCopy(head);
+  if (!head.lastCopy)
+    return n === 0
+      ? "Nothing to copy yet."
+      : `No copy yet: ${changes(n)} ${n === 1 ? "is" : "are"} only on this phone.`;
+  const when = sinceWords(new Date(head.lastCopy.at), now);
+  return n === 0
+    ? `The last copy, ${when}, has everything.`
+    : `Last copy: ${when}. ${changes(n)} since then ${n === 1 ? "is" : "are"} in no copy.`;
+}
+
 /** Null where there is nothing to say yet: before the first start, and before the journal has been read. */
-export function keptWords(state: BookState, now: Date): KeptWords | null {
+export function keptWords(state: BookState, { demo, now }: { demo: boolean; now: Date }): KeptWords | null {
   if (state.phase !== "open" || state.head.next === 1) return null;
   const { database, head } = state;
   const kept = (said: string, working = false): KeptWords => ({
@@ -45,6 +58,6 @@ export function keptWords(state: BookState, now: Date): KeptWords | null {
     case "failed":
       return kept("the book does not open");
     case "ready":
-      return kept(waiting(head, now));
+      return kept(demo ? "an invented workshop to look round in" : waiting(head, now));
   }
 }

@@ -1,6 +1,7 @@
 /** A book of many years, invented from a seed: `clients` clients with a wearer each and four orders on average. */
 import { writeStamp } from "@/lib/clock/stamp";
 import { type RowChange } from "@/lib/journal/change";
+import { evenNumbers } from "@/tests/support/even-numbers";
 import { type FieldsByTable, type Stage, type TableName } from "@/lib/records/types";
 
 const first = [
@@ -39,17 +40,6 @@ const last = [
   "Okpara",
   "Pelham",
 ];
-
-/** A small generator of even numbers in [0, 1), the same for the same seed (mulberry32). */
-export function evenNumbers(seed: number): () => number {
-  let state = seed;
-  return () => {
-    state = (state + 0x6d2b79f5) | 0;
-    let t = Math.imul(state ^ (state >>> 15), 1 | state);
-    t = (t + Math.imul(t ^ (t >>> 7), 61 | t)) ^ t;
-    return ((t ^ (t >>> 14)) >>> 0) / 4294967296;
-  };
-}
 
 export interface BigBookOptions {
   clients: number;

@@ -48,7 +48,7 @@ export class AppServer {
   }
 }
 
-async function freePort(): Promise<number> {
+export async function freePort(): Promise<number> {
   return new Promise((resolve, reject) => {
     const probe = createServer();
     probe.once("error", reject);
@@ -109,4 +109,16 @@ export async function openProfile(
     locale: "en-GB",
     timezoneId: "Europe/Malta",
   });
+}
+
+/** First visit: a workshop of our own. */
+export async function beginWorkshop(
+  page: Page,
+  { name = "Thimble Lane", unit = "Inches" } = {},
+): Promise<void> {
+  await page.getByLabel("Name of your workshop").fill(name);
+  await page.getByText(unit, { exact: true }).click();
+  await page.getByLabel("Clients pay in").selectOption("EUR");
+  await page.getByRole("button", { name: "Begin", exact: true }).click();
+  await page.waitForURL((url) => url.pathname === "/");
 }

@@ -1,5 +1,14 @@
-import { Screen } from "@/components/ui/screen";
+import { type Metadata } from "next";
+import { Suspense } from "react";
+import { ScreenOpening } from "@/components/clients/not-shown";
+import { CompareScreen } from "@/components/sleeves/compare-screen";
+
+export const metadata: Metadata = { title: "Compare sleeves" };
 
 export default function Page() {
-  return <Screen title="sleeves compare">{null}</Screen>;
+  return (
+    <Suspense fallback={<ScreenOpening title="Compare sleeves" />}>
+      <CompareScreen />
+    </Suspense>
+  );
 }

@@ -1,5 +1,14 @@
-import { Screen } from "@/components/ui/screen";
+import { type Metadata } from "next";
+import { Suspense } from "react";
+import { ScreenOpening } from "@/components/clients/not-shown";
+import { SleeveDraftScreen } from "@/components/sleeves/sleeve-draft-screen";
+
+export const metadata: Metadata = { title: "Draft a sleeve" };
 
 export default function Page() {
-  return <Screen title="sleeves draft">{null}</Screen>;
+  return (
+    <Suspense fallback={<ScreenOpening title="Draft a sleeve" />}>
+      <SleeveDraftScreen />
+    </Suspense>
+  );
 }

@@ -1,5 +1,14 @@
-import { Screen } from "@/components/ui/screen";
+import { type Metadata } from "next";
+import { Suspense } from "react";
+import { ScreenOpening } from "@/components/clients/not-shown";
+import { MarksScreen } from "@/components/sleeves/marks-screen";
+
+export const metadata: Metadata = { title: "Mark out" };
 
 export default function Page() {
-  return <Screen title="sleeves marks">{null}</Screen>;
+  return (
+    <Suspense fallback={<ScreenOpening title="Mark out" />}>
+      <MarksScreen />
+    </Suspense>
+  );
 }

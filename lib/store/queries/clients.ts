@@ -1,5 +1,5 @@
 import { groupBy } from "@/lib/collections";
-import { wentWithClient } from "@/lib/clients/went-with";
+import { wentWithClient } from "@/lib/clients/bin-question";
 import { type Client, type MeasurementSet, type Order, type Sleeve, type Wearer } from "@/lib/records/types";
 import { fold } from "@/lib/search/fold";
 import { matchesAll, searchText } from "@/lib/search/match";

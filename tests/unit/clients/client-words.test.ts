@@ -1,9 +1,10 @@
 import { describe, expect, it } from "vitest";
 import { ageWords, wearerWords } from "@/lib/clients/age-words";
-import { clientBinQuestion, wearerBinQuestion } from "@/lib/clients/bin-question";
+import { clientBinQuestion, wearerBinQuestion, wentWithClient } from "@/lib/clients/bin-question";
 import { countWords, namesInWords, newClientHref, PAGE, readListPlace } from "@/lib/clients/list-words";
+import { balanceWords } from "@/lib/clients/order-words";
 import { phoneLinks } from "@/lib/clients/phone-links";
-import { wentWithClient } from "@/lib/clients/went-with";
+import { setWords } from "@/lib/clients/set-words";
 import { type BirthFacts } from "@/lib/people/age";
 import { type Stage } from "@/lib/records/types";
 
@@ -90,28 +91,34 @@ describe("what goes into the bin", () => {
     order: { stage, currency },
     sums: { balanceMinor },
   });
+  const money = (minor: number, code: string) => `${minor} ${code}`;
   it("says only that it can be undone where nothing goes along", () =>
-    expect(clientBinQuestion({ name: "Ama" }, 0, [])).toEqual({
+    expect(clientBinQuestion({ name: "Ama" }, 0, [], money)).toEqual({
       title: "Put Ama in the bin?",
       say: ["All of it can be brought back from the bin."],
     }));
   it("names wearers, orders not handed over, and money by currency, both ways", () => {
-    const { say } = clientBinQuestion({ name: "Ama" }, 2, [
-      order("agreed", 12000),
-      order("handed-over", 550),
-      order("handed-over", -300),
-      order("cut", 900, "JPY"),
-    ]);
+    const { say } = clientBinQuestion(
+      { name: "Ama" },
+      2,
+      [
+        order("agreed", 12000),
+        order("handed-over", 550),
+        order("handed-over", -300),
+        order("cut", 900, "JPY"),
+      ],
+      money,
+    );
     expect(say[0]).toBe(
       "With this client go 2 wearers with all figures and 4 orders, 2 of them not handed over.",
     );
-    expect(say[1]).toMatch(/125\.50 is still to come in\.$/);
-    expect(say[2]).toMatch(/900 is still to come in\.$/);
-    expect(say[3]).toMatch(/3\.00 is still to be given back\.$/);
+    expect(say[1]).toBe("12550 EUR is still to come in.");
+    expect(say[2]).toBe("900 JPY is still to come in.");
+    expect(say[3]).toBe("300 EUR is still to be given back.");
     expect(say).toHaveLength(5);
   });
   it("counts one as one", () =>
-    expect(clientBinQuestion({ name: "Ama" }, 1, [order("sewing", 0)]).say[0]).toBe(
+    expect(clientBinQuestion({ name: "Ama" }, 1, [order("sewing", 0)], money).say[0]).toBe(
       "With this client go 1 wearer with all figures and 1 order not handed over.",
     ));
   it("says what stays of a wearer's work", () =>
@@ -132,4 +139,36 @@ describe("what goes into the bin", () => {
     expect(wentWithClient({ id: "c", removedAt: at }, orders).map(({ id }) => id)).toEqual(["a"]);
     expect(wentWithClient({ id: "c", removedAt: null }, orders)).toEqual([]);
   });
+});
+
+describe("a measurement set in the list", () => {
+  const figure = (typed: string) => ({ key: "wristGirth", typed, mm: 150 });
+  const set = {
+    id: "a",
+    figures: [figure("6"), figure("6 1/4"), figure("")],
+    takenBy: "Efua",
+    correctsId: null,
+  };
+  it("counts the figures that were taken, and says who took them", () => {
+    expect(setWords(set, [set])).toEqual({ sub: "2 figures, taken by Efua", mark: null });
+    expect(setWords({ ...set, figures: [figure("6")], takenBy: "" }, []).sub).toBe("1 figure");
+  });
+  it("says that it was put right, before that it puts another right", () => {
+    const second = { ...set, id: "b", correctsId: "a" };
+    const third = { ...set, id: "c", correctsId: "b" };
+    expect(setWords(set, [set, second]).mark).toBe("Put right by a later set");
+    expect(setWords(second, [set, second]).mark).toBe("Puts an earlier set right");
+    expect(setWords(second, [set, second, third]).mark).toBe("Put right by a later set");
+  });
+});
+
+describe("an order's balance in words", () => {
+  it.each([
+    [0, 0, "No price yet"],
+    [500, 0, "Paid"],
+    [500, 200, "to come"],
+    [500, -100, "to give back"],
+  ])("total %d, balance %d: %s", (totalMinor, balanceMinor, words) =>
+    expect(balanceWords({ totalMinor, balanceMinor })).toBe(words),
+  );
 });

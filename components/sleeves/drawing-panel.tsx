@@ -1,0 +1,158 @@
+"use client";
+
+import { type PointerEvent, type ReactNode, useState } from "react";
+import { Maximize2 } from "lucide-react";
+import { type MadeSleeve } from "@/lib/drafting";
+import { type Fineness, type Unit } from "@/lib/records/types";
+import { steadyBox } from "@/lib/sleeves/drawing-paths";
+import { fitView, type Size, toScreen, type View } from "@/lib/sleeves/drawing-view";
+import { draggedFigure, type HandleName, handleNames, handlePoint } from "@/lib/sleeves/handles";
+import { type FigureKey } from "@/lib/sleeves/sleeve-figures";
+import { Tape } from "@/components/ui/tape";
+import { LookClosely } from "./look-closely";
+import { labelRoom, SleeveDrawing } from "./sleeve-drawing";
+import { useSize } from "./use-size";
+import "./sleeves.css";
+
+type Good = MadeSleeve & { ok: true };
+
+export interface DrawingPanelProps {
+  /** The sleeve, or the last that could be drawn; null while there is none yet. */
+  made: Good | null;
+  faint: boolean;
+  focus: FigureKey | null;
+  unit: Unit;
+  fineness: Fineness;
+  label: string;
+  /** What is said above the drawing. */
+  head: ReactNode;
+  /** What stands in place of a drawing while there is none. */
+  nothing: ReactNode;
+  /** A handle was dragged. */
+  onFigure(name: HandleName, mm: number): void;
+}
+
+interface Drag {
+  name: HandleName;
+  pointer: number;
+  from: { x: number; y: number };
+  made: Good;
+  view: View;
+}
+
+/** The drawing above the figures: it stays in view, and can be taken by its handles. */
+export function DrawingPanel(props: DrawingPanelProps) {
+  const { faint, fineness, focus, head, label, made, nothing, onFigure, unit } = props;
+  const [ref, size] = useSize<HTMLDivElement>();
+  const [drag, setDrag] = useState<Drag | null>(null);
+  const [closely, setClosely] = useState(false);
+  const view =
+    made && size && (drag ? draggedView(drag, made) : fitView(steadyBox(made.draft), size, labelRoom));
+
+  return (
+    <section aria-label="Drawing" className="drawing-panel">
+      <div className="px-4 py-1.5">{head}</div>
+      <Tape unit={unit} className="shrink-0" />
+      <div ref={ref} className="marking-paper">
+        {made && size && view ? (
+          <>
+            <SleeveDrawing
+              {...{ size, view, unit, fineness, focus, faint, label }}
+              figures={made.figures}
+              draft={made.draft}
+            />
+            <Handles
+              {...{ made, size, view, drag, setDrag }}
+              onMove={(now, at) => {
+                const by = {
+                  x: (at.x - now.from.x) / now.view.scale,
+                  y: (at.y - now.from.y) / now.view.scale,
+                };
+                onFigure(now.name, draggedFigure(now.name, now.made.figures, by, unit, fineness));
+              }}
+            />
+            <button
+              type="button"
+              onClick={() => setClosely(true)}
+              className="absolute end-1 bottom-1 flex size-target items-center justify-center rounded border-2 border-edge bg-well"
+            >
+              <Maximize2 aria-hidden="true" className="size-5" />
+              <span className="sr-only">Look closely</span>
+            </button>
+            <span aria-hidden="true" className="absolute start-2 bottom-1 text-fine text-soft">
+              {unit === "in" ? "inches" : "cm"}
+            </span>
+            <LookClosely
+              {...{ unit, fineness, focus, faint, label }}
+              made={made}
+              open={closely}
+              onOpenChange={setClosely}
+            />
+          </>
+        ) : (
+          !made && <div className="flex h-full items-center justify-center p-4 text-center">{nothing}</div>
+        )}
+      </div>
+    </section>
+  );
+}
+
+/** While a handle is held the paper stands still; for the crown, the cap line does. */
+function draggedView({ made: before, name, view }: Drag, now: Good): View {
+  if (name !== "capDepth") return view;
+  return { ...view, y: view.y + (before.figures.capDepth - now.figures.capDepth) * view.scale };
+}
+
+interface HandlesProps {
+  made: Good;
+  size: Size;
+  view: View;
+  drag: Drag | null;
+  setDrag(drag: Drag | null): void;
+  onMove(drag: Drag, at: { x: number; y: number }): void;
+}
+
+/** For a finger; the same figures have keys beside their fields, for everyone. */
+function Handles({ drag, made, onMove, setDrag, size, view }: HandlesProps) {
+  const down = (name: HandleName) => (event: PointerEvent<SVGCircleElement>) => {
+    if (drag || event.button !== 0) return;
+    event.currentTarget.setPointerCapture(event.pointerId);
+    const from = { x: event.clientX, y: event.clientY };
+    setDrag({ name, pointer: event.pointerId, from, made, view });
+  };
+  const move = (event: PointerEvent) => {
+    if (drag?.pointer === event.pointerId) onMove(drag, { x: event.clientX, y: event.clientY });
+  };
+  const end = (event: PointerEvent) => {
+    if (drag?.pointer === event.pointerId) setDrag(null);
+  };
+  return (
+    <svg
+      aria-hidden="true"
+      width={size.width}
+      height={size.height}
+      className="pointer-events-none absolute inset-0"
+    >
+      {handleNames.map((name) => {
+        const { x, y } = toScreen(view, handlePoint(name, made.draft));
+        return (
+          <g key={name} className="pointer-events-auto">
+            <circle cx={x} cy={y} r={drag?.name === name ? 11 : 7} className="handle-dot" />
+            <circle
+              cx={x}
+              cy={y}
+              r={23}
+              className="handle-hit"
+              data-handle={name}
+              onPointerDown={down(name)}
+              onPointerMove={move}
+              onPointerUp={end}
+              onPointerCancel={end}
+              onLostPointerCapture={end}
+            />
+          </g>
+        );
+      })}
+    </svg>
+  );
+}

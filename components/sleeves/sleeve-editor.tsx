@@ -1,0 +1,203 @@
+"use client";
+
+import { useCallback, useDeferredValue, useMemo, useState } from "react";
+import { useRouter } from "next/navigation";
+import { BroughtBack, KeepTrouble } from "@/components/clients/form-notices";
+import { BinAsk } from "@/components/clients/bin-ask";
+import { type DraftHandle } from "@/components/store/use-draft";
+import { useKeep, useView } from "@/components/store/use-book";
+import { Button, ButtonLink } from "@/components/ui/button";
+import { Phrase } from "@/components/ui/fraction";
+import { Notice } from "@/components/ui/notice";
+import { Screen } from "@/components/ui/screen";
+import { edit, make, newId, setRemoved } from "@/lib/journal/change";
+import { phraseText } from "@/lib/lengths/phrase";
+import { formatDay } from "@/lib/people/format-day";
+import { type MeasurementSet, type Sleeve, type SleeveFields, type Wearer } from "@/lib/records/types";
+import { type HandleName } from "@/lib/sleeves/handles";
+import { countLine, type HeadLine, headLine } from "@/lib/sleeves/head-line";
+import { makeFromRecord } from "@/lib/sleeves/make-from-record";
+import { fieldProblems } from "@/lib/sleeves/field-problems";
+import { type FigureKey } from "@/lib/sleeves/sleeve-figures";
+import { namesOf, readForm, type SleeveForm, withFigure } from "@/lib/sleeves/sleeve-form";
+import { suggestedName } from "@/lib/sleeves/sleeve-name";
+import { wearerCardQuery } from "@/lib/store/queries/wearers";
+import { ChecksList } from "./checks-list";
+import { DrawingPanel } from "./drawing-panel";
+import { FiguresForm } from "./figures-form";
+import { HeadLineView } from "./head-line-view";
+import { backToSleeves } from "./not-here";
+import { SleeveDetails } from "./sleeve-details";
+import { useLastGood } from "./use-last-good";
+import { useSavedForm } from "./use-saved-form";
+
+export interface SleeveEditorProps {
+  initial: SleeveForm;
+  /** What was being typed when the screen was left, or null. */
+  begun: SleeveForm | null;
+  sleeve: Sleeve | null;
+  wearer: Wearer | null;
+  set: MeasurementSet | null;
+  handle: DraftHandle<SleeveForm>;
+  today: string;
+  justKept: boolean;
+  /** Kept, and the screen stays. */
+  onKept?(): void;
+}
+
+export function SleeveEditor(props: SleeveEditorProps) {
+  const { begun, handle, initial, justKept, onKept, set, sleeve, today, wearer } = props;
+  const router = useRouter();
+  const { busy, keep, problem } = useKeep();
+  const [form, setForm] = useState(begun ?? initial);
+  const [focus, setFocus] = useState<FigureKey | null>(null);
+  const [pressed, setPressed] = useState(false);
+  useSavedForm(form, form !== initial && form !== begun, handle.save);
+
+  const { view: chosen } = useView(wearerCardQuery, { id: form.wearerId ?? "" });
+  const whose = form.wearerId === wearer?.id ? wearer : (chosen?.wearer ?? null);
+  const suggested = suggestedName(whose?.name ?? null, formatDay(today, { style: "short" }));
+  const { fineness, unit } = form;
+  const read = useMemo(() => readForm(form), [form]);
+  const made = useMemo(() => (read.drawable ? makeFromRecord(read.record) : null), [read]);
+  const shown = useLastGood(made);
+  const line = useMemo((): HeadLine => {
+    if (made) return headLine(made, read.record);
+    const bad = Object.keys(read.errors).length > 0;
+    return {
+      verdict: "plain",
+      phrase: [bad ? "Put right what is marked below, and it is drawn." : startWords(read.missing)],
+    };
+  }, [made, read]);
+  const beside = useMemo(() => fieldProblems(form, made, read, pressed), [form, made, read, pressed]);
+  // The drawing comes first; the list of checks may follow in the frame after.
+  const checks = useDeferredValue(made?.ok ? made.checks : null);
+
+  const onType = useCallback((key: FigureKey, text: string) => {
+    setForm((now) => ({ ...now, typed: { ...now.typed, [key]: text } }));
+  }, []);
+  const onHandle = useCallback((name: HandleName, mm: number) => {
+    setFocus(name);
+    setForm((now) => withFigure(now, name, mm));
+  }, []);
+  const onPatch = useCallback((patch: (now: SleeveForm) => SleeveForm) => setForm(patch), []);
+
+  const blocked = !made?.ok || Object.keys(read.errors).length > 0 || read.markErrors.length > 0;
+  const keepIt = async (then: "marks" | "stay") => {
+    setPressed(true);
+    if (blocked) {
+      focusFirstBad();
+      return;
+    }
+    const id = sleeve?.id ?? newId();
+    const fields: SleeveFields = {
+      wearerId: form.wearerId,
+      setId: form.setId,
+      name: form.name.trim() || suggested,
+      style: "plain",
+      ask: read.record,
+      fineness,
+      note: form.note.trim(),
+    };
+    const write = sleeve ? edit("sleeves", sleeve, fields) : make("sleeves", fields, id);
+    if (!(await keep([write]))) return;
+    await handle.drop();
+    if (then === "marks") router.push(`/sleeves/marks?id=${id}`);
+    else if (onKept) onKept();
+    else router.replace(`/sleeves/draft?id=${id}`);
+  };
+
+  return (
+    <Screen
+      title={sleeve?.name ?? "Draft a sleeve"}
+      sub={whose ? whose.name : "From bare figures"}
+      back={backToSleeves}
+      wide
+      action={
+        <div className="grid gap-2">
+          {pressed && blocked && <Notice live tone="wrong" title={blockedWords(read, made?.ok ?? false)} />}
+          <KeepTrouble keep={problem} draft={handle.problem} />
+          <div className="grid grid-cols-[auto_minmax(0,1fr)] gap-2">
+            <Button className="min-h-key" busy={busy} onClick={() => void keepIt("stay")}>
+              Keep
+            </Button>
+            <Button variant="main" full busy={busy} onClick={() => void keepIt("marks")}>
+              Keep and mark out
+            </Button>
+          </div>
+        </div>
+      }
+    >
+      <BroughtBack
+        draft={{
+          broughtBack: begun !== null && JSON.stringify(begun) !== JSON.stringify(initial),
+          startOver: () => {
+            setForm({ ...initial });
+            setPressed(false);
+          },
+        }}
+      />
+      {justKept && form === initial && sleeve && (
+        <Notice
+          live
+          tone="good"
+          title={`${sleeve.name} is kept on this phone.`}
+          action={<ButtonLink href={`/sleeves/marks?id=${sleeve.id}`}>Mark it out</ButtonLink>}
+        />
+      )}
+      <div className="grid grid-cols-[minmax(0,1fr)] items-start gap-4 lg:grid-cols-[minmax(0,27rem)_minmax(0,1fr)] lg:gap-6">
+        <DrawingPanel
+          made={shown}
+          faint={shown !== made}
+          {...{ focus, unit, fineness }}
+          label={shown ? `The sleeve drawn. ${phraseText(line.phrase, unit, fineness)}` : ""}
+          head={
+            <HeadLineView {...{ line, unit, fineness }} sub={made?.ok ? countLine(made.checks) : undefined} />
+          }
+          nothing={<p className="max-w-[26rem] text-balance text-soft">{startWords(read.missing)}</p>}
+          onFigure={onHandle}
+        />
+        <div className="sleeve-form grid min-w-0 content-start gap-5">
+          <FiguresForm
+            {...{ form, beside, made, set, wearer, today }}
+            isNew={!sleeve}
+            onType={onType}
+            onFocusFigure={setFocus}
+            onPatch={onPatch}
+          />
+          {checks && <ChecksList checks={checks} unit={unit} fineness={fineness} sub={countLine(checks)} />}
+          {beside.general.map((text, i) => (
+            <Notice key={i} tone="wrong" title={<Phrase parts={text} unit={unit} fineness={fineness} />} />
+          ))}
+          <SleeveDetails {...{ form, suggested }} whose={whose} onPatch={onPatch} />
+          {sleeve && (
+            <BinAsk
+              question={{
+                title: `Put ${sleeve.name} in the bin?`,
+                say: ["It can be brought back from the bin. Marks already on paper stay as they are."],
+              }}
+              busy={busy}
+              onYes={() => void keep([setRemoved("sleeves", sleeve, new Date().toISOString())])}
+            />
+          )}
+        </div>
+      </div>
+    </Screen>
+  );
+}
+
+function startWords(missing: readonly FigureKey[]): string {
+  return missing.length === 0 ? "" : `Type ${namesOf(missing)}, and the sleeve is drawn.`;
+}
+
+function blockedWords(read: ReturnType<typeof readForm>, drawn: boolean): string {
+  if (read.missing.length > 0) return startWords(read.missing);
+  return drawn
+    ? "Put right what is marked above, then keep it."
+    : "This sleeve cannot be drawn yet. Put right what is marked above, then keep it.";
+}
+
+function focusFirstBad(): void {
+  // After the errors have been set out.
+  setTimeout(() => document.querySelector<HTMLElement>('.sleeve-form [aria-invalid="true"]')?.focus(), 0);
+}
