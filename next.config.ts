@@ -17,6 +17,10 @@ process.env.NOTCHBOOK_BUILD_ID = buildId;
 
 const forEver = { key: "Cache-Control", value: "public, max-age=31536000, immutable" };
 
+const isBuilt = process.env.NODE_ENV === "production";
+const builtFiles = "/_next/static/:path*.:ext(js|css)";
+const readsBrotli = { type: "header" as const, key: "accept-encoding", value: ".*\\bbr\\b.*" };
+
 const config: NextConfig = {
   reactStrictMode: true,
   poweredByHeader: false,
@@ -43,8 +47,29 @@ const config: NextConfig = {
         forEver,
       ],
     },
+    ...(isBuilt
+      ? [
+          {
+            source: builtFiles,
+            has: [readsBrotli],
+            headers: [
+              { key: "Content-Encoding", value: "br" },
+              { key: "Vary", value: "Accept-Encoding" },
+              forEver,
+            ],
+          },
+        ]
+      : []),
     { source: "/sw.js", headers: [{ key: "Cache-Control", value: "no-cache" }] },
   ],
+  // Compressed by `db/compress-static.mjs` after the build.
+  rewrites: async () => ({
+    beforeFiles: isBuilt
+      ? [{ source: builtFiles, has: [readsBrotli], destination: "/static-br/:path*.:ext" }]
+      : [],
+    afterFiles: [],
+    fallback: [],
+  }),
   webpack: (webpackConfig, { isServer }) => {
     if (!isServer) {
       // PGlite names Node's modules in paths that a browser never takes.

@@ -38,7 +38,9 @@ const blocks = [
 ];
 
 const letters = blocks
-  .flatMap(([first, last]) => Array.from({ length: last - first + 1 }, (_, i) => String.fromCodePoint(first + i)))
+  .flatMap(([first, last]) =>
+    Array.from({ length: last - first + 1 }, (_, i) => String.fromCodePoint(first + i)),
+  )
   .join("");
 
 function isFresh(output, inputs) {

@@ -26,7 +26,10 @@ function newest(path) {
   const stat = statSync(path);
   if (!stat.isDirectory()) return stat.mtimeMs;
   return readdirSync(path)
-    .filter((name) => !["pglite", "fonts", "sw.js", "migrations.json", "browser-files.json"].includes(name))
+    .filter(
+      (name) =>
+        !["pglite", "fonts", "static-br", "sw.js", "migrations.json", "browser-files.json"].includes(name),
+    )
     .reduce((latest, name) => Math.max(latest, newest(join(path, name))), stat.mtimeMs);
 }
 

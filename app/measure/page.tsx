@@ -1,5 +1,14 @@
-import { Screen } from "@/components/ui/screen";
+import { type Metadata } from "next";
+import { Suspense } from "react";
+import { ScreenOpening } from "@/components/clients/not-shown";
+import { MeasureScreen } from "@/components/measure/measure-screen";
+
+export const metadata: Metadata = { title: "Measure" };
 
 export default function Page() {
-  return <Screen title="measure">{null}</Screen>;
+  return (
+    <Suspense fallback={<ScreenOpening title="Measure" />}>
+      <MeasureScreen />
+    </Suspense>
+  );
 }

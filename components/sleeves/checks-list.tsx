@@ -24,7 +24,7 @@ export const ChecksList = memo(function ChecksList({ checks, fineness, sub, unit
   const { good, look, wrong } = sortedChecks(checks);
   const units = { unit, fineness };
   return (
-    <Card id="checks" aria-labelledby="checks-title">
+    <Card id="checks" className="checks-card" aria-labelledby="checks-title">
       <CardHead id="checks-title" title="Checks before cutting" sub={sub} />
       {wrong.length + look.length > 0 && (
         <ul className="grid gap-3">
@@ -34,7 +34,7 @@ export const ChecksList = memo(function ChecksList({ checks, fineness, sub, unit
         </ul>
       )}
       {good.length > 0 && (
-        <details className="mt-2" open={wrong.length + look.length === 0}>
+        <details className="mt-2">
           <summary className="flex min-h-target items-center font-semibold">
             {good.length === 1 ? "1 check is good" : `${good.length} checks are good`}
           </summary>

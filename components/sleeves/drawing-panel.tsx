@@ -2,7 +2,7 @@
 
 import { type PointerEvent, type ReactNode, useState } from "react";
 import { Maximize2 } from "lucide-react";
-import { type MadeSleeve } from "@/lib/drafting";
+import { type MadeSleeve, makeSleeve } from "@/lib/drafting";
 import { type Fineness, type Unit } from "@/lib/records/types";
 import { steadyBox } from "@/lib/sleeves/drawing-paths";
 import { fitView, type Size, toScreen, type View } from "@/lib/sleeves/drawing-view";
@@ -26,8 +26,6 @@ export interface DrawingPanelProps {
   label: string;
   /** What is said above the drawing. */
   head: ReactNode;
-  /** What stands in place of a drawing while there is none. */
-  nothing: ReactNode;
   /** A handle was dragged. */
   onFigure(name: HandleName, mm: number): void;
 }
@@ -42,7 +40,7 @@ interface Drag {
 
 /** The drawing above the figures: it stays in view, and can be taken by its handles. */
 export function DrawingPanel(props: DrawingPanelProps) {
-  const { faint, fineness, focus, head, label, made, nothing, onFigure, unit } = props;
+  const { faint, fineness, focus, head, label, made, onFigure, unit } = props;
   const [ref, size] = useSize<HTMLDivElement>();
   const [drag, setDrag] = useState<Drag | null>(null);
   const [closely, setClosely] = useState(false);
@@ -82,6 +80,12 @@ export function DrawingPanel(props: DrawingPanelProps) {
             <span aria-hidden="true" className="absolute start-2 bottom-1 text-fine text-soft">
               {unit === "in" ? "inches" : "cm"}
             </span>
+            <span aria-hidden="true" className="absolute start-2 top-1 text-fine text-soft">
+              front
+            </span>
+            <span aria-hidden="true" className="absolute end-2 top-1 text-fine text-soft">
+              back
+            </span>
             <LookClosely
               {...{ unit, fineness, focus, faint, label }}
               made={made}
@@ -90,10 +94,28 @@ export function DrawingPanel(props: DrawingPanelProps) {
             />
           </>
         ) : (
-          !made && <div className="flex h-full items-center justify-center p-4 text-center">{nothing}</div>
+          !made && size && <Example {...{ size, unit, fineness, focus }} />
         )}
       </div>
     </section>
+  );
+}
+
+/** The child's sleeve of the hand practice (B 12 in, C 6 1/4 in): what the names mean, until there is a sleeve of one's own. */
+const example = makeSleeve({ length: 230, capDepth: 158.75, biceps: 304.8, hem: 280 });
+
+function Example({ size, ...rest }: { size: Size; unit: Unit; fineness: Fineness; focus: FigureKey | null }) {
+  if (!example.ok) return null;
+  return (
+    <SleeveDrawing
+      {...rest}
+      named
+      figures={example.figures}
+      draft={example.draft}
+      size={size}
+      view={fitView(steadyBox(example.draft), size, { ...labelRoom, left: 64 })}
+      label="An example of a sleeve, with what its length, cap depth, biceps line and hem are."
+    />
   );
 }
 

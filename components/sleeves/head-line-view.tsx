@@ -1,6 +1,7 @@
 import { CircleCheck, Info, OctagonX, TriangleAlert } from "lucide-react";
+import { type Check } from "@/lib/drafting";
 import { type Fineness, type Unit } from "@/lib/records/types";
-import { type HeadLine } from "@/lib/sleeves/head-line";
+import { countLine, type HeadLine } from "@/lib/sleeves/head-line";
 import { Phrase } from "@/components/ui/fraction";
 
 const signs = {
@@ -14,12 +15,12 @@ export interface HeadLineViewProps {
   line: HeadLine;
   unit: Unit;
   fineness: Fineness;
-  /** A second line: how the other checks stand. */
-  sub?: string;
+  /** How they stand is a second line, which leads to them. */
+  checks?: readonly Check[];
 }
 
 /** Whether the sleeve goes in, before anything else. */
-export function HeadLineView({ fineness, line, sub, unit }: HeadLineViewProps) {
+export function HeadLineView({ checks, fineness, line, unit }: HeadLineViewProps) {
   const { Sign, colour, says } = signs[line.verdict];
   return (
     <div className="leading-snug">
@@ -30,7 +31,15 @@ export function HeadLineView({ fineness, line, sub, unit }: HeadLineViewProps) {
           <Phrase parts={line.phrase} unit={unit} fineness={fineness} />
         </span>
       </p>
-      {sub && <p className="ps-[1.7em] text-sm text-soft">{sub}</p>}
+      {checks && (
+        <button
+          type="button"
+          onClick={() => document.getElementById("checks")?.scrollIntoView({ block: "start" })}
+          className="ms-[1.45em] min-h-8 px-1 text-start text-sm text-chalk underline underline-offset-4"
+        >
+          Checks: {countLine(checks)}
+        </button>
+      )}
     </div>
   );
 }

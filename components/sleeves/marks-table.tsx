@@ -51,7 +51,7 @@ export function MarksTable({
         </caption>
         <thead>
           <tr className="text-sm text-soft">
-            <th scope="col" className="text-start font-normal">
+            <th scope="col" className="pe-2 text-start font-normal">
               Mark
             </th>
             <th scope="col" className="text-start font-normal">

@@ -70,11 +70,6 @@ export function OneStep({ back, fineness, go, pictures, place, stale, unit, wron
     <Screen
       title="Mark out"
       back={back}
-      tools={
-        <Button icon={<List className="size-5" />} onClick={() => go({ ...place, all: true })}>
-          All steps
-        </Button>
-      }
       action={
         <div className="grid grid-cols-[minmax(0,2fr)_minmax(0,3fr)] gap-2">
           <Button
@@ -105,17 +100,28 @@ export function OneStep({ back, fineness, go, pictures, place, stale, unit, wron
       {place.at === 0 && stale && <Notice tone="look" title={stale} />}
       <section
         aria-label="Step"
-        className="grid touch-pan-y grid-cols-[minmax(0,1fr)] gap-3 select-none lg:grid-cols-2 lg:gap-8"
+        className="-mt-2 grid touch-pan-y grid-cols-[minmax(0,1fr)] gap-3 select-none lg:grid-cols-2 lg:gap-8"
         onPointerDown={down}
         onPointerUp={up}
         onPointerCancel={() => (start.current = null)}
       >
         <div className="grid content-start gap-2">
           <StepTrack at={place.at} count={pictures.length} />
-          <div aria-live="polite" className="grid gap-2">
+          <div className="flex flex-wrap items-center justify-between gap-2">
             <p className="font-semibold text-soft">
               Step {step.n} of {pictures.length}
             </p>
+            <Button
+              variant="quiet"
+              className="-me-3"
+              icon={<List className="size-5" />}
+              onClick={() => go({ ...place, all: true })}
+            >
+              All steps
+            </Button>
+          </div>
+          <div aria-live="polite" className="grid gap-2">
+            <p className="sr-only">Step {step.n}.</p>
             {step.distance !== undefined && (
               <p>
                 <Length mm={step.distance} unit={unit} fineness={fineness} size="giant" />
@@ -126,7 +132,7 @@ export function OneStep({ back, fineness, go, pictures, place, stale, unit, wron
             </p>
           </div>
         </div>
-        <StepDrawing picture={picture} className="h-[34dvh] min-h-44 lg:h-[60dvh]" />
+        <StepDrawing picture={picture} className="h-[27dvh] min-h-40 lg:h-[60dvh]" />
       </section>
       <p className="text-sm text-soft">
         {awake === "held" && "The screen stays on. "}
@@ -134,7 +140,7 @@ export function OneStep({ back, fineness, go, pictures, place, stale, unit, wron
           "This browser cannot keep the screen on; your place is kept if it goes dark. "}
         {awake === "refused" &&
           "The phone does not let the screen stay on, perhaps to save its battery; your place is kept if it goes dark. "}
-        Swipe, or press the arrow keys, to go on.
+        {place.at === 0 && "Swipe, or press the arrow keys, to go on."}
       </p>
     </Screen>
   );

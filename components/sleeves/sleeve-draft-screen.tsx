@@ -43,6 +43,7 @@ function FromSleeve({ id, workshop }: { id: string; workshop: Workshop }) {
   const { view, state } = useView(sleevesQuery, { ids: [id] });
   // Kept on this screen: the editor begins again from the row as it was kept.
   const [kept, setKept] = useState(0);
+  const cameKept = useSearchParams().has("kept");
   const found = view[0];
   if (!found) return <NotHere title="Sleeve" state={state} say="This sleeve is not in the book." />;
   const { set, sleeve, wearer } = found;
@@ -52,7 +53,7 @@ function FromSleeve({ id, workshop }: { id: string; workshop: Workshop }) {
       key={kept}
       draftKey={`sleeve:${id}`}
       {...{ sleeve, wearer, set, workshop }}
-      justKept={kept > 0}
+      justKept={kept > 0 || cameKept}
       onKept={() => setKept((before) => before + 1)}
     />
   );

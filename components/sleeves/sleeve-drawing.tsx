@@ -19,7 +19,7 @@ import { DrawingFigure } from "./drawing-figure";
 import "./sleeves.css";
 
 /** What the labels beside the sleeve take, px. */
-export const labelRoom: Room = { top: 22, right: 50, bottom: 40, left: 50 };
+export const labelRoom: Room = { top: 16, right: 50, bottom: 36, left: 50 };
 
 export interface SleeveDrawingProps {
   figures: SleeveFigures;
@@ -32,21 +32,25 @@ export interface SleeveDrawingProps {
   focus: FigureKey | null;
   /** Only the last that could be drawn. */
   faint?: boolean;
+  /** Each length by its name in place of its figure, for an example. */
+  named?: boolean;
   /** What a screen reader is told. */
   label: string;
 }
 
 /** The sleeve as on marking paper, with its lengths. Lines keep their width at any scale. */
 export const SleeveDrawing = memo(function SleeveDrawing(props: SleeveDrawingProps) {
-  const { draft, faint, fineness, figures, focus, label, size, unit, view } = props;
+  const { draft, faint, fineness, figures, focus, label, named, size, unit, view } = props;
   const picked = highlightOf(focus);
   const mmPerPx = 1 / view.scale;
   const dimensions = dimensionsOf(figures, draft).filter(
     (one) => alwaysShown(one) || picked.dimensions.includes(one.name),
   );
   const { piece } = draft;
+  // On a long sleeve shown small a notch must not fill its cap.
+  const notch = Math.min(9 * mmPerPx, figures.capDepth * 0.12);
   return (
-    <div className={cx("absolute inset-0", faint && "opacity-35")}>
+    <div className={cx("absolute inset-0", faint && "opacity-35", named && "drawing-example")}>
       <svg width={size.width} height={size.height} role="img" aria-label={label} className="block">
         <g transform={`translate(${view.x} ${view.y}) scale(${view.scale})`}>
           {draft.guides.map(({ curves, name }, i) => (
@@ -67,7 +71,7 @@ export const SleeveDrawing = memo(function SleeveDrawing(props: SleeveDrawingPro
             />
           ))}
           <path d={outlineOf(piece)} className="line-cut" vectorEffect="non-scaling-stroke" data-outline />
-          {notchPaths(piece, 9 * mmPerPx).map((d) => (
+          {notchPaths(piece, notch).map((d) => (
             <path key={d} d={d} fill="var(--ink)" />
           ))}
         </g>
@@ -90,7 +94,11 @@ export const SleeveDrawing = memo(function SleeveDrawing(props: SleeveDrawingPro
             data-picked={picked.dimensions.includes(one.name) || undefined}
             style={{ left: at.x, top: at.y }}
           >
-            <DrawingFigure mm={one.mm} unit={unit} fineness={fineness} />
+            {named ? (
+              <span aria-hidden="true">{dimensionNames[one.name]}</span>
+            ) : (
+              <DrawingFigure mm={one.mm} unit={unit} fineness={fineness} />
+            )}
           </span>
         );
       })}
@@ -104,9 +112,27 @@ function Dots({ draft, view }: { draft: SleeveDraft; view: View }) {
   return names.map((name) => {
     const { x, y } = toScreen(view, draft.points[name as keyof SleeveDraft["points"]]!);
     const big = !name.startsWith("mark");
-    return <circle key={name} cx={x} cy={y} r={big ? 4.5 : 3} fill={big ? "var(--ink)" : "var(--chalk)"} />;
+    return (
+      <circle
+        key={name}
+        cx={x}
+        cy={y}
+        r={big ? 4 : Math.min(3, Math.max(1.75, view.scale * 6))}
+        fill={big ? "var(--ink)" : "var(--chalk)"}
+      />
+    );
   });
 }
+
+const dimensionNames: Record<Dimension["name"], string> = {
+  length: "length",
+  capDepth: "cap",
+  biceps: "biceps line",
+  elbowWidth: "elbow",
+  hem: "hem",
+  capFront: "front",
+  capBack: "back",
+};
 
 const beside = 18;
 
@@ -137,5 +163,5 @@ function labelPlace(
     const side = name === "capFront" ? -1 : 1;
     return toScreen(view, { x: (side * biceps) / 5, y: capDepth * 0.62 });
   }
-  return { x: middle.x, y: middle.y };
+  return { x: middle.x, y: middle.y + 17 };
 }

@@ -104,7 +104,7 @@ export function SleeveEditor(props: SleeveEditorProps) {
     await handle.drop();
     if (then === "marks") router.push(`/sleeves/marks?id=${id}`);
     else if (onKept) onKept();
-    else router.replace(`/sleeves/draft?id=${id}`);
+    else router.replace(`/sleeves/draft?id=${id}&kept=1`);
   };
 
   return (
@@ -151,10 +151,7 @@ export function SleeveEditor(props: SleeveEditorProps) {
           faint={shown !== made}
           {...{ focus, unit, fineness }}
           label={shown ? `The sleeve drawn. ${phraseText(line.phrase, unit, fineness)}` : ""}
-          head={
-            <HeadLineView {...{ line, unit, fineness }} sub={made?.ok ? countLine(made.checks) : undefined} />
-          }
-          nothing={<p className="max-w-[26rem] text-balance text-soft">{startWords(read.missing)}</p>}
+          head={<HeadLineView {...{ line, unit, fineness }} checks={made?.ok ? made.checks : undefined} />}
           onFigure={onHandle}
         />
         <div className="sleeve-form grid min-w-0 content-start gap-5">

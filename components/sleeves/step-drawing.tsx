@@ -79,6 +79,8 @@ export const StepDrawing = memo(function StepDrawing({ className, picture }: Ste
           })}
         </svg>
       )}
+      <span className="absolute start-2 top-1 text-fine text-soft">front</span>
+      <span className="absolute end-2 top-1 text-fine text-soft">back</span>
     </div>
   );
 });

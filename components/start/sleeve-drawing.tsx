@@ -6,7 +6,11 @@ const outline =
 /** The picture at the head of the start: a sleeve on the table, cut line, stitch line, guides, notches, grain. */
 export function SleeveDrawing() {
   return (
-    <svg aria-hidden="true" viewBox="-200 -14 400 250" className="mx-auto w-full max-w-[26rem]">
+    <svg
+      aria-hidden="true"
+      viewBox="-200 -14 400 250"
+      className="mx-auto w-full max-w-[15rem] lg:max-w-[24rem]"
+    >
       <g fill="none" stroke="currentColor" strokeLinejoin="round" strokeLinecap="round">
         <path d={outline} className="fill-card text-ink" strokeWidth="4" />
         <path

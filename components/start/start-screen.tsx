@@ -20,8 +20,8 @@ export function StartScreen() {
         <SleeveDrawing />
         <h1 className="mt-2 font-figure text-2xl font-bold">Notchbook</h1>
         <p className="mx-auto max-w-[24rem] text-balance">
-          A dressmaker’s book: clients, figures, sleeves that fit the armhole, orders and money. It lives on
-          this phone and works without data.
+          A dressmaker’s book on this phone: clients, figures, sleeves that fit, orders and money. It works
+          without data.
         </p>
       </header>
       <div className="grid flex-1 grid-cols-[minmax(0,1fr)] content-start gap-4">

@@ -8,13 +8,13 @@ import { ReadInCopy } from "./read-in-copy";
 import { SaveCopy } from "./save-copy";
 
 /** Copies of everything: what the last one has, saving one, and reading one in. */
-export function CopiesCard({ head }: { head: Head | null }) {
+export function CopiesCard({ head, demo }: { head: Head | null; demo: boolean }) {
   const now = useNow();
   return (
     <Card id="copy" aria-labelledby="copy-title" className="scroll-mt-4">
       <CardHead title="A copy of everything" id="copy-title" />
       <div className="grid gap-3">
-        {head && <p className="font-semibold">{copyWords(head, now)}</p>}
+        {head && !demo && <p className="font-semibold">{copyWords(head, now)}</p>}
         <p className="text-soft">
           One file with every client, figure, sleeve, order and receipt. It can be read back at any time, on
           this phone or on another one.

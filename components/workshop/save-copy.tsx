@@ -75,7 +75,7 @@ function Saved({
     <Notice
       live
       tone="good"
-      title={`${entries} entries are in the copy, ${bytesWords(file.bytes.length)}.`}
+      title={`The copy is made: ${entries === 1 ? "1 entry" : `${entries} entries`}, ${bytesWords(file.bytes.length)}.`}
       action={
         canSend && (
           <Button icon={<Send className="size-5" />} onClick={onSend}>

@@ -43,7 +43,7 @@ export function SettingsScreen() {
           <Progress label="Opening the book" />
         )}
       </Card>
-      <CopiesCard head={head} />
+      <CopiesCard head={head} demo={workshop?.demo ?? false} />
       <Card flush aria-label="The bin">
         <Rows>
           <RowLink href="/bin" title="The bin" sub="What was put there, and how to bring it back" />

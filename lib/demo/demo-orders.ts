@@ -44,7 +44,7 @@ export const demoOrders: readonly DemoOrder[] = [
     ],
   },
   {
-    client: "mehwish",
+    client: "maryam",
     occasion: "Eid",
     agreed: -45,
     due: -9,
@@ -129,7 +129,7 @@ export const demoOrders: readonly DemoOrder[] = [
     payments: [{ kind: "deposit", method: "transfer", amountMinor: 19_000, on: -15 }],
   },
   {
-    client: "mira",
+    client: "eleni",
     occasion: "Birthday",
     agreed: -10,
     due: 6,

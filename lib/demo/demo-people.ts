@@ -22,7 +22,7 @@ export interface DemoWearer {
 }
 
 export interface DemoClient {
-  key: "amara" | "lucja" | "mira" | "sian" | "mehwish" | "thuha" | "zoe" | "josephine";
+  key: "amara" | "lucja" | "eleni" | "sian" | "maryam" | "thuha" | "zoe" | "josephine";
   name: string;
   phone: string;
   phoneE164: string;
@@ -136,13 +136,13 @@ export const demoClients: readonly DemoClient[] = [
     ],
   },
   {
-    key: "mira",
-    name: "मीरा सोनवाडे",
+    key: "eleni",
+    name: "Ελένη Καρυώτη",
     ...mobile(143),
-    note: "Mīrā. Her mother brings the cloth.",
+    note: "Eléni. Her mother brings the cloth.",
     wearers: [
       {
-        name: "अनू",
+        name: "Νεφέλη",
         months: 54,
         sets: [
           { daysAgo: 160, by: OWNER, figures: sleeveSet("9 3/8, 6 1/4, 6 3/8, 4 1/2, 5 1/8, 8 1/8, 13 1/4") },
@@ -174,13 +174,13 @@ export const demoClients: readonly DemoClient[] = [
     ],
   },
   {
-    key: "mehwish",
-    name: "مہوش زرگر",
+    key: "maryam",
+    name: "مريم الشامي",
     ...mobile(171),
-    note: "Mehwish. Full sleeves, always.",
+    note: "Maryam. Full sleeves, always.",
     wearers: [
       {
-        name: "مہوش زرگر",
+        name: "مريم الشامي",
         sets: [
           {
             daysAgo: 45,

@@ -50,8 +50,8 @@ export function shownEntry(text: string, unit: Unit): Shown {
 
 export type ReadEntry = { ok: true; typed: string; mm: number; unit: Unit } | { ok: false; say: string };
 
-/** The unit that a figure was typed in: named in the text, or the pad's. */
-function unitTyped(text: string, unit: Unit): Unit {
+/** The unit that a figure was typed in: named in the text, or the one that bare numbers are in. */
+export function unitTyped(text: string, unit: Unit): Unit {
   if (/["”″]|''|in|yd|yard/iu.test(text)) return "in";
   return /m/iu.test(text) ? "cm" : unit;
 }
@@ -65,7 +65,7 @@ export function readEntry(text: string, unit: Unit, bookUnit: Unit): ReadEntry {
   if (!read.ok) return read;
   if (read.mm === 0)
     return { ok: false, say: "A figure is more than 0. Type what the tape says, or press Skip." };
-  const bare = !/[^\d\s.,/-]/u.test(text);
+  const bare = !/[\p{L}'"’”′″]/u.test(text);
   const typed = text.trim() + (bare && unit !== bookUnit ? ` ${unit}` : "");
   return { ok: true, typed, mm: read.mm, unit: unitTyped(text, unit) };
 }

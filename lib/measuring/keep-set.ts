@@ -37,7 +37,9 @@ const says = ({ takenOn, takenBy, note, figures }: Omit<MeasurementSetFields, "w
     takenBy,
     note,
     // Figures by name: a set from elsewhere may have them in another order.
-    figures.map(({ key, typed, mm }) => [key, typed, mm]).sort(([a], [b]) => (String(a) < String(b) ? -1 : 1)),
+    figures
+      .map(({ key, typed, mm }) => [key, typed, mm])
+      .sort(([a], [b]) => (String(a) < String(b) ? -1 : 1)),
   ]);
 
 /** What keeps a set from being kept, each with what to do instead. `old` is the set that is being put right. */
@@ -48,6 +50,7 @@ export function reviewProblems(taking: Taking, today: IsoDate, old: MeasurementS
   else if (old && says(fields) === says(old))
     problems.figures = "Nothing is changed yet. Tap the figure that is wrong, and take it again.";
   if (!isDay(taking.takenOn)) problems.takenOn = "Choose the day on which the tape was taken.";
-  else if (taking.takenOn > today) problems.takenOn = "That day is still to come. Choose today or an earlier one.";
+  else if (taking.takenOn > today)
+    problems.takenOn = "That day is still to come. Choose today or an earlier one.";
   return problems;
 }

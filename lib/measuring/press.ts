@@ -8,8 +8,9 @@ import {
   readEntry,
   setPart,
   typedAgain,
+  unitTyped,
 } from "@/lib/measuring/entry";
-import { allOpenQuestions, meantFigure, openQuestionsAbout } from "@/lib/measuring/questions";
+import { meantFigure, openQuestionsAbout } from "@/lib/measuring/questions";
 import { type Known, type TakenHere, type Taking, withKeys } from "@/lib/measuring/taking";
 import { type Unit } from "@/lib/records/types";
 
@@ -68,7 +69,7 @@ function onPad(taking: Taking, at: MeasureKey, key: Press, known: Known): Taking
       return entry !== "" ? typing("") : without(taking, at);
     case "same": {
       const figure = known.previous[at];
-      return figure ? take(taking, at, sameFigure(figure, taking.unit, known), known) : taking;
+      return figure ? take(taking, at, sameFigure(figure, known), known) : taking;
     }
     case "next":
       if (entry !== "") return finish(taking, at, known);
@@ -97,8 +98,9 @@ function answer(taking: Taking, at: MeasureKey, what: Press["do"], known: Known)
   return what === "next" || what === "skip" ? moveOn({ ...taking, held: false }) : taking;
 }
 
-function sameFigure(figure: { typed: string; mm: number }, unit: Unit, known: Known): TakenHere {
-  return { typed: typedAgain(figure, known.bookUnit), mm: figure.mm, unit };
+function sameFigure(figure: { typed: string; mm: number }, { bookUnit }: Known): TakenHere {
+  const typed = typedAgain(figure, bookUnit);
+  return { typed, mm: figure.mm, unit: unitTyped(typed, bookUnit) };
 }
 
 function without(taking: Taking, at: MeasureKey): Taking {
@@ -155,15 +157,7 @@ function beforeThis({ keys, at }: Taking): MeasureKey | "review" {
 /** To another figure. What was being typed is taken first; where it cannot be read, one stays with it. */
 function goTo(taking: Taking, to: MeasureKey | "review", known: Known): Taking {
   if (to !== "review" && !taking.keys.includes(to)) return taking;
-  const put1 = taking.at !== "review" && taking.entry !== "" ? put(taking, taking.at, known) : taking;
-  if (put1.problem !== null && put1.entry !== "") return put1;
-  return { ...put1, at: to, held: false, problem: null };
-}
-
-/** Whether anything is left to do but to look the figures over. */
-export function standsOpen(taking: Taking, known: Known): boolean {
-  return (
-    allOpenQuestions(taking, known).length > 0 ||
-    taking.keys.some((key) => !taking.taken[key] && !taking.skipped.includes(key))
-  );
+  const settled = taking.at !== "review" && taking.entry !== "" ? put(taking, taking.at, known) : taking;
+  if (settled.problem !== null && settled.entry !== "") return settled;
+  return { ...settled, at: to, held: false, problem: null };
 }

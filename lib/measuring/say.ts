@@ -21,12 +21,16 @@ export function announce(before: Taking, after: Taking, known: Known, fineness: 
   const old = before.at === "review" ? undefined : before.taken[before.at];
   if (figure && (figure.mm !== old?.mm || figure.typed !== old?.typed) && before.at !== "review")
     said.push(
-      sentence(`${bodyMeasure(before.at).name.toLowerCase()} ${speakLength(figure.mm, figure.unit, fineness)}`),
+      sentence(
+        `${bodyMeasure(before.at).name.toLowerCase()} ${speakLength(figure.mm, figure.unit, fineness)}`,
+      ),
     );
   if (after.held && after.at !== "review" && !before.held) {
     for (const { say } of openQuestionsAbout(after, after.at, known))
       said.push(
-        say.map((part) => (typeof part === "string" ? part : speakLength(part.mm, after.unit, fineness))).join(""),
+        say
+          .map((part) => (typeof part === "string" ? part : speakLength(part.mm, after.unit, fineness)))
+          .join(""),
       );
   } else if (after.at !== before.at) {
     if (after.at === "review") said.push("All figures are through. Look them over.");
@@ -34,7 +38,8 @@ export function announce(before: Taking, after: Taking, known: Known, fineness: 
       said.push(
         `Now ${bodyMeasure(after.at).name.toLowerCase()}, ${after.keys.indexOf(after.at) + 1} of ${after.keys.length}.`,
       );
-  } else if (after.entry !== before.entry) said.push(after.entry === "" ? "Empty." : sentence(entryWords(after)));
+  } else if (after.entry !== before.entry)
+    said.push(after.entry === "" ? "Empty." : sentence(entryWords(after)));
   else if (after.unit !== before.unit)
     said.push(after.unit === "in" ? "Counting in inches." : "Counting in centimetres.");
   else if (old && !figure) said.push("Taken away.");

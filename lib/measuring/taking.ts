@@ -1,5 +1,6 @@
 /** A set as it is being taken: a plain value, put down on the phone at each key and brought back as it was. */
 import { fullSet, isMeasureKey, type MeasureKey } from "@/lib/figures/body-measures";
+import { typedAgain, unitTyped } from "@/lib/measuring/entry";
 import { type IsoDate } from "@/lib/people/iso-date";
 import { type MeasurementSet, type Unit } from "@/lib/records/types";
 import { type PreviousFigures } from "@/lib/measuring/previous";
@@ -106,7 +107,12 @@ export function beginCorrection(
     ...begin({ setId, wearerId: old.wearerId, keys, unit, now, today: old.takenOn, takenBy: old.takenBy }),
     correctsId: old.id,
     at: "review",
-    taken: Object.fromEntries(figures.map(({ key, typed, mm }) => [key, { typed, mm, unit }])),
+    taken: Object.fromEntries(
+      figures.map(({ key, mm, typed }) => {
+        const again = typedAgain({ typed, mm }, unit);
+        return [key, { typed: again, mm, unit: unitTyped(again, unit) }];
+      }),
+    ),
     note: old.note,
   };
 }

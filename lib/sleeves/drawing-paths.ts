@@ -56,7 +56,7 @@ export function unionOf(boxes: readonly Box[]): Box {
 export function notchPaths(piece: Piece, size: number): string[] {
   return piece.notches.flatMap(({ at, count, edge }) => {
     const { curves } = piece.edges.find((one) => one.name === edge)!;
-    const offsets = count === 1 ? [0] : [-size * 0.7, size * 0.7];
+    const offsets = count === 1 ? [0] : [-size * 0.9, size * 0.9];
     return offsets.map((offset) => {
       const { direction: d, point: p } = pointAt(curves, at + offset);
       const half = size * 0.6;

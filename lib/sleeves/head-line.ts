@@ -24,11 +24,7 @@ export function headLine(made: MadeSleeve, record: SleeveAskRecord): HeadLine {
   if (armhole === undefined)
     return {
       verdict: "plain",
-      phrase: [
-        "Cap seam ",
-        { mm: cap },
-        ". With the armhole typed in, it says here whether the sleeve goes in.",
-      ],
+      phrase: ["Cap seam ", { mm: cap }, ". Type the armhole below to see whether it goes in."],
     };
   const measured: Phrase = [": cap ", { mm: cap }, ", armhole ", { mm: armhole }, ", "];
   const ease = cap - armhole;

@@ -58,6 +58,6 @@ export function keptWords(state: BookState, { demo, now }: { demo: boolean; now:
     case "failed":
       return kept("the book does not open");
     case "ready":
-      return kept(demo ? "an invented workshop to look round in" : waiting(head, now));
+      return kept(demo ? "an invented workshop" : waiting(head, now));
   }
 }

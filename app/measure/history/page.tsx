@@ -1,5 +1,14 @@
-import { Screen } from "@/components/ui/screen";
+import { type Metadata } from "next";
+import { Suspense } from "react";
+import { ScreenOpening } from "@/components/clients/not-shown";
+import { HistoryScreen } from "@/components/measure/history-screen";
+
+export const metadata: Metadata = { title: "History of a figure" };
 
 export default function Page() {
-  return <Screen title="measure history">{null}</Screen>;
+  return (
+    <Suspense fallback={<ScreenOpening title="History of a figure" />}>
+      <HistoryScreen />
+    </Suspense>
+  );
 }

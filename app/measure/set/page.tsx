@@ -1,5 +1,14 @@
-import { Screen } from "@/components/ui/screen";
+import { type Metadata } from "next";
+import { Suspense } from "react";
+import { ScreenOpening } from "@/components/clients/not-shown";
+import { SetScreen } from "@/components/measure/set-screen";
+
+export const metadata: Metadata = { title: "Measurement set" };
 
 export default function Page() {
-  return <Screen title="measure set">{null}</Screen>;
+  return (
+    <Suspense fallback={<ScreenOpening title="Measurement set" />}>
+      <SetScreen />
+    </Suspense>
+  );
 }

@@ -157,19 +157,22 @@ describe("the bin", () => {
     stamps: { removedAt: "s" },
     removedAt,
   });
-  const client: BinItem = { table: "clients", row: { ...rowHead("c"), name: "Ana" } as Client };
-  const wearer: BinItem = { table: "wearers", row: { ...rowHead("v"), clientId: "c", name: "Zo" } as Wearer };
+  const client: BinItem = { table: "clients", row: { ...rowHead("c"), name: "Ana" } as unknown as Client };
+  const wearer: BinItem = {
+    table: "wearers",
+    row: { ...rowHead("v"), clientId: "c", name: "Zo" } as unknown as Wearer,
+  };
   const sleeve: BinItem = {
     table: "sleeves",
-    row: { ...rowHead("s"), wearerId: "v", name: "Short" } as Sleeve,
+    row: { ...rowHead("s"), wearerId: "v", name: "Short" } as unknown as Sleeve,
   };
   const along: BinItem = {
     table: "orders",
-    row: { ...rowHead("o"), clientId: "c", occasion: "Play" } as Order,
+    row: { ...rowHead("o"), clientId: "c", occasion: "Play" } as unknown as Order,
   };
   const earlier: BinItem = {
     table: "orders",
-    row: { ...rowHead("p", "2026-01-01T10:00:00.000Z"), clientId: "c", occasion: "" } as Order,
+    row: { ...rowHead("p", "2026-01-01T10:00:00.000Z"), clientId: "c", occasion: "" } as unknown as Order,
   };
 
   it("brings a thing back alone where what it stands in is there", () => {

@@ -1,0 +1,61 @@
+import { AppLink } from "@/components/ui/app-link";
+import { Length } from "@/components/ui/fraction";
+import { type HistoryPoint } from "@/lib/measuring/history";
+import { formatDay } from "@/lib/people/format-day";
+import { type Fineness, type Unit } from "@/lib/records/types";
+
+/** Each taking of one figure, the newest at the head. */
+export function HistoryTable({
+  points,
+  unit,
+  fineness,
+}: {
+  /** Oldest first. */
+  points: readonly HistoryPoint[];
+  unit: Unit;
+  fineness: Fineness;
+}) {
+  const rows = points.map((point, i) => ({ ...point, before: points[i - 1] })).reverse();
+  return (
+    <table className="w-full text-start">
+      <caption className="sr-only">Each time it was taken, the newest first</caption>
+      <thead>
+        <tr className="border-b-2 border-edge text-start">
+          <th scope="col" className="py-2 pe-3 text-start font-semibold">
+            Taken
+          </th>
+          <th scope="col" className="py-2 pe-3 text-end font-semibold">
+            Figure
+          </th>
+          <th scope="col" className="py-2 text-end font-semibold">
+            Change
+          </th>
+        </tr>
+      </thead>
+      <tbody>
+        {rows.map(({ setId, on, mm, before }) => (
+          <tr key={setId} className="border-b border-line">
+            <th scope="row" className="pe-3 text-start font-normal">
+              <AppLink href={`/measure/set?id=${setId}`} className="inline-flex min-h-target items-center">
+                {formatDay(on)}
+              </AppLink>
+            </th>
+            <td className="pe-3 text-end text-lg font-bold">
+              <Length mm={mm} unit={unit} fineness={fineness} />
+            </td>
+            <td className="text-end">
+              {before ? (
+                <>
+                  {mm > before.mm && <span aria-hidden="true">+</span>}
+                  <Length mm={mm - before.mm} unit={unit} fineness={fineness} />
+                </>
+              ) : (
+                <span className="text-soft">first</span>
+              )}
+            </td>
+          </tr>
+        ))}
+      </tbody>
+    </table>
+  );
+}
