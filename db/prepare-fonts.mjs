@@ -2,7 +2,7 @@
  * Makes the two fonts that printed papers are set in: complete TrueType fonts cut down to the scripts that jsPDF
  * can set without shaping. Fontsource's files will not do: each holds one script, and jsPDF reads no WOFF2.
  */
-import { existsSync, mkdirSync, readFileSync, statSync, writeFileSync } from "node:fs";
+import { existsSync, mkdirSync, readFileSync, renameSync, statSync, writeFileSync } from "node:fs";
 import { createRequire } from "node:module";
 import { dirname, join, resolve } from "node:path";
 import { fileURLToPath } from "node:url";
@@ -65,7 +65,10 @@ export async function prepareFonts(outDir) {
       noHinting: true,
       dropTables: ["GSUB", "GPOS", "GDEF", "BASE", "STAT", "DSIG", "gasp"],
     });
-    writeFileSync(output, subset);
+    // Whole or not at all: a server may be reading it.
+    const draft = `${output}.${process.pid}`;
+    writeFileSync(draft, subset);
+    renameSync(draft, output);
   }
 }
 

@@ -7,13 +7,7 @@ import { asc, gt } from "drizzle-orm";
 import { type PgColumn, type PgTable } from "drizzle-orm/pg-core";
 import { type Endpoint, expose } from "comlink";
 import { applyChanges, type BookDatabase, checkCounts, readMark } from "@/db/apply";
-import {
-  deleteDatabase,
-  deleteOthers,
-  fetchEngine,
-  openDatabase,
-  type OpenDatabase,
-} from "@/db/browser/open";
+import { deleteOthers, fetchEngine, openDatabase, type OpenDatabase } from "@/db/browser/open";
 import { bookTables } from "@/db/schema";
 import { drizzleSource } from "@/db/source";
 import { type Head, openJournal } from "@/lib/journal/journal";
@@ -69,7 +63,7 @@ type Engine = Awaited<ReturnType<typeof fetchEngine>>;
 
 async function openOnce(head: Head, engine: Engine): Promise<OpenDatabase> {
   become({ phase: "opening" });
-  const open = await openDatabase(databaseName(head.book), engine);
+  const open = await openDatabase(databaseName(head), engine);
   try {
     const mark = await readMark(open.db, head.device);
     if (mark.applied >= head.next) throw new Error("the database is ahead of the journal");
@@ -93,7 +87,7 @@ class Leader {
   private applied = 0;
 
   private constructor(
-    private readonly head: Head,
+    private head: Head,
     private readonly engine: Engine,
     private open: OpenDatabase | null,
   ) {}
@@ -155,9 +149,10 @@ class Leader {
 
   private async makeAnew(because: unknown): Promise<void> {
     console.warn("The database is made anew from the journal.", because);
-    await this.open?.close().catch(() => undefined);
+    // Under another name: what hangs on to the spoilt one may not let go of it before this thread ends.
+    void this.open?.close().catch(() => undefined);
     this.open = null;
-    await deleteDatabase(databaseName(this.head.book));
+    this.head = await journal.leaveDatabase(this.head.generation);
     this.open = await openOnce(this.head, this.engine);
     this.rebuilt = true;
   }
@@ -192,7 +187,7 @@ async function lead(): Promise<void> {
     // Changes that came between the last look and now.
     follow();
     const head = await journal.head();
-    void deleteOthers(databaseName(head.book)).catch(() => undefined);
+    void deleteOthers(databaseName(head)).catch(() => undefined);
   } catch (error) {
     become({ phase: "failed", say: sayWhy(error) });
   }

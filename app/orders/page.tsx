@@ -1,5 +1,8 @@
-import { Screen } from "@/components/ui/screen";
+import { type Metadata } from "next";
+import { OrdersScreen } from "@/components/orders/orders-screen";
+
+export const metadata: Metadata = { title: "Orders" };
 
 export default function Page() {
-  return <Screen title="orders">{null}</Screen>;
+  return <OrdersScreen />;
 }

@@ -44,7 +44,7 @@ function SetButton({
       onClick={onPress}
       className="card grid w-full grid-cols-[4.5rem_minmax(0,1fr)] items-center gap-3 p-4 text-start hover:border-ink"
     >
-      <TapeDrawing measure={drawing} className="h-24" />
+      <TapeDrawing measure={drawing} className="h-28 [--card:var(--well)]" />
       <span>
         <span className="block font-figure text-xl font-bold">{name}</span>
         <span className="block font-semibold">{count} figures, in tape order</span>

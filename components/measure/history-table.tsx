@@ -2,6 +2,7 @@ import { AppLink } from "@/components/ui/app-link";
 import { Length } from "@/components/ui/fraction";
 import { type HistoryPoint } from "@/lib/measuring/history";
 import { formatDay } from "@/lib/people/format-day";
+import { LengthChange } from "./length-change";
 import { type Fineness, type Unit } from "@/lib/records/types";
 
 /** Each taking of one figure, the newest at the head. */
@@ -33,22 +34,20 @@ export function HistoryTable({
         </tr>
       </thead>
       <tbody>
-        {rows.map(({ setId, on, mm, before }) => (
+        {rows.map(({ setId, on, by, mm, before }) => (
           <tr key={setId} className="border-b border-line">
             <th scope="row" className="pe-3 text-start font-normal">
               <AppLink href={`/measure/set?id=${setId}`} className="inline-flex min-h-target items-center">
                 {formatDay(on)}
               </AppLink>
+              {by && <span className="block text-sm text-soft">by {by}</span>}
             </th>
             <td className="pe-3 text-end text-lg font-bold">
               <Length mm={mm} unit={unit} fineness={fineness} />
             </td>
             <td className="text-end">
               {before ? (
-                <>
-                  {mm > before.mm && <span aria-hidden="true">+</span>}
-                  <Length mm={mm - before.mm} unit={unit} fineness={fineness} />
-                </>
+                <LengthChange fromMm={before.mm} toMm={mm} unit={unit} fineness={fineness} />
               ) : (
                 <span className="text-soft">first</span>
               )}

@@ -97,6 +97,10 @@ function Measuring({ view, old, workshop, takenBy, back }: MeasuringProps) {
     if (old && found === null && !taking) start(beginCorrection(old, { setId: newId(), unit, now: now() }));
   }, [old, found, taking, start, unit]);
 
+  // Each of these is a screen of its own, begun at its head.
+  const place = taking === null ? "before" : taking.at === "review" ? "review" : "pad";
+  useEffect(() => window.scrollTo(0, 0), [place]);
+
   const startSet = (keys: readonly MeasureKey[]) =>
     start(
       begin({

@@ -74,7 +74,7 @@ function InchParts({ fineness, onPress }: { fineness: Fineness; onPress: OnPress
             onClick={() => onPress({ do: "part", over, under: fineness })}
           >
             {over === 0 ? (
-              "–"
+              <span className="pad-key-word font-sans">whole</span>
             ) : (
               <span className="stacked-fraction">
                 <span>{numerator}</span>
@@ -133,11 +133,8 @@ export function PadKeys({ unit, fineness, previous, first, onPress }: PadKeysPro
         </Button>
         <Button onClick={() => onPress({ do: "skip" })}>Skip</Button>
         {previous && (
-          <Button
-            className="flex-1 flex-wrap gap-x-1.5 gap-y-0 leading-tight"
-            onClick={() => onPress({ do: "same" })}
-          >
-            <span>
+          <Button className="flex-1 flex-col gap-0 py-0 leading-none" onClick={() => onPress({ do: "same" })}>
+            <span className="text-sm leading-none">
               Same<span className="sr-only"> as last time,</span>
             </span>
             <Length mm={previous.mm} unit={unit} fineness={fineness} />

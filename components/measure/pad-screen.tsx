@@ -4,11 +4,12 @@ import { useEffect, useId, useRef } from "react";
 import { ListChecks, X } from "lucide-react";
 import { AppLink } from "@/components/ui/app-link";
 import { Button } from "@/components/ui/button";
+import { FieldError } from "@/components/ui/field";
 import { Length } from "@/components/ui/fraction";
 import { Notice } from "@/components/ui/notice";
 import { bodyMeasure, type MeasureKey } from "@/lib/figures/body-measures";
 import { type Press } from "@/lib/measuring/press";
-import { allOpenQuestions, meantFigure, openQuestionsAbout } from "@/lib/measuring/questions";
+import { meantFigure, openQuestionsAbout } from "@/lib/measuring/questions";
 import { type Known, takenCount, type Taking } from "@/lib/measuring/taking";
 import { formatDay } from "@/lib/people/format-day";
 import { type Fineness } from "@/lib/records/types";
@@ -38,7 +39,7 @@ export function PadScreen({ wearer, back, desk, taking, at, known, fineness, onP
   const measure = bodyMeasure(at);
   const previous = known.previous[at];
   const questions = taking.held ? openQuestionsAbout(taking, at, known) : [];
-  const asked = new Set(allOpenQuestions(taking, known).map(({ key }) => key));
+  const asked = new Set(taking.keys.filter((key) => openQuestionsAbout(taking, key, known).length > 0));
   useTypeAnywhere(input);
 
   return (
@@ -79,9 +80,15 @@ export function PadScreen({ wearer, back, desk, taking, at, known, fineness, onP
           <h2 id={`${about}-name`} className="font-figure text-lg leading-tight font-bold">
             {measure.name}
           </h2>
-          <p id={`${about}-how`} className="text-sm leading-snug">
-            {measure.how}
-          </p>
+          {taking.problem ? (
+            <div role="alert" className="leading-snug">
+              <FieldError id={`${about}-how`}>{taking.problem}</FieldError>
+            </div>
+          ) : (
+            <p id={`${about}-how`} className="text-sm leading-snug">
+              {measure.how}
+            </p>
+          )}
           {previous && (
             <p id={`${about}-last`} className="text-sm text-soft">
               Last time{" "}
@@ -100,7 +107,7 @@ export function PadScreen({ wearer, back, desk, taking, at, known, fineness, onP
         taken={taking.taken[at]}
         unit={taking.unit}
         fineness={fineness}
-        problem={taking.problem}
+        invalid={taking.problem !== null}
         describedBy={previous ? `${about}-how ${about}-last` : `${about}-how`}
         input={input}
         onType={(text) => onPress({ do: "type", text })}

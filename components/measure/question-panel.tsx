@@ -9,7 +9,7 @@ import { type TakenHere } from "@/lib/measuring/taking";
 import { type Fineness, type Unit } from "@/lib/records/types";
 
 /** What is asked, each with where its bounds come from. */
-export function QuestionWords({
+function QuestionWords({
   questions,
   unit,
   fineness,
@@ -23,7 +23,7 @@ export function QuestionWords({
       <p>
         <Phrase parts={say} unit={unit} fineness={fineness} />
       </p>
-      <p className="text-sm text-soft">After: {source}.</p>
+      <p className="text-sm text-soft">Goes by: {source}.</p>
     </div>
   ));
 }

@@ -1,10 +1,9 @@
 "use client";
 
 import { useRef, useState } from "react";
-import { TriangleAlert } from "lucide-react";
 import { KeepTrouble } from "@/components/clients/form-notices";
 import { Button } from "@/components/ui/button";
-import { Card, CardHead, Row, RowButton, Rows } from "@/components/ui/card";
+import { Card, Row, RowButton, Rows } from "@/components/ui/card";
 import { Field, FieldError, TextArea, TextInput } from "@/components/ui/field";
 import { Sheet } from "@/components/ui/dialog";
 import { Length } from "@/components/ui/fraction";
@@ -18,7 +17,7 @@ import { formatDay } from "@/lib/people/format-day";
 import { type IsoDate } from "@/lib/people/iso-date";
 import { type Fineness, type MeasurementSet, type Unit } from "@/lib/records/types";
 import { type KeepProblem } from "@/lib/store/keep-problem";
-import { QuestionWords } from "./question-panel";
+import { QuestionNote } from "./question-note";
 import { type TakingDesk } from "./use-taking";
 
 export interface ReviewScreenProps {
@@ -164,28 +163,28 @@ function StandingQuestions({
   const questions = allOpenQuestions(taking, known);
   if (questions.length === 0) return null;
   return (
-    <Card aria-labelledby="questions">
-      <CardHead id="questions" title="To look at once more" sub="You may keep the set as it is." />
-      <ul className="grid gap-4">
+    <section aria-labelledby="questions" className="grid gap-3">
+      <h2 id="questions" className="font-figure text-lg font-bold">
+        To look at once more
+      </h2>
+      <ul className="grid gap-3">
         {questions.map((question) => (
-          <li key={question.sign} className="grid gap-2">
-            <p className="flex items-start gap-2 font-semibold text-thread">
-              <TriangleAlert aria-hidden="true" className="mt-[0.2em] size-[1em] shrink-0" />
-              {bodyMeasure(question.key).name}
-            </p>
-            <QuestionWords
-              questions={[question]}
+          <li key={question.sign}>
+            <QuestionNote
+              question={question}
               unit={taking.taken[question.key]?.unit ?? unit}
               fineness={fineness}
+              action={
+                <>
+                  <Button onClick={() => onPress({ do: "settle", sign: question.sign })}>It is right</Button>
+                  <Button onClick={() => onPress({ do: "go", to: question.key })}>Take again</Button>
+                </>
+              }
             />
-            <div className="flex flex-wrap gap-2">
-              <Button onClick={() => onPress({ do: "settle", sign: question.sign })}>It is right</Button>
-              <Button onClick={() => onPress({ do: "go", to: question.key })}>Take again</Button>
-            </div>
           </li>
         ))}
       </ul>
-    </Card>
+    </section>
   );
 }
 

@@ -2,80 +2,86 @@ import { AppLink } from "@/components/ui/app-link";
 import { Card, CardHead } from "@/components/ui/card";
 import { Length } from "@/components/ui/fraction";
 import { Tape } from "@/components/ui/tape";
-import { bodyMeasure } from "@/lib/figures/body-measures";
-import { compareSets } from "@/lib/figures/compare-sets";
+import { bodyMeasure, fullSet } from "@/lib/figures/body-measures";
 import { formatLength } from "@/lib/lengths/format-length";
+import { type PreviousFigure, type PreviousFigures } from "@/lib/measuring/previous";
 import { formatDay } from "@/lib/people/format-day";
-import { type Fineness, type MeasurementSet, type Unit } from "@/lib/records/types";
+import { type Fineness, type MeasurementSet, type TakenFigure, type Unit } from "@/lib/records/types";
+import { LengthChange } from "./length-change";
 
-type Units = { unit: Unit; fineness: Fineness };
+interface Units {
+  unit: Unit;
+  fineness: Fineness;
+}
 
-/** Every figure of a set, each with its difference to the set before and leading to its own history. */
-export function SetFigures({
-  set,
-  before,
-  corrects,
-  unit,
-  fineness,
-}: {
+export interface SetFiguresProps extends Units {
   set: MeasurementSet;
-  before: MeasurementSet | null;
+  /** The figure before each of these. */
+  previous: PreviousFigures;
+  /** The set that this one puts right. */
   corrects: MeasurementSet | null;
-} & Units) {
-  const rows = compareSets(before ?? { takenOn: set.takenOn, figures: [] }, set).rows;
-  const missed = rows.filter(({ afterMm }) => afterMm === undefined).map(({ key }) => bodyMeasure(key).name);
-  const units = { unit, fineness };
+}
+
+/** Every figure of a set, each with its difference to the time before and leading to its own history. */
+export function SetFigures({ set, previous, corrects, unit, fineness }: SetFiguresProps) {
+  const count = set.figures.length;
   return (
     <Card aria-labelledby="figures" className="overflow-clip">
-      <CardHead
-        id="figures"
-        title="Figures"
-        sub={before ? `Beside each: against ${formatDay(before.takenOn)}` : "The first set of this wearer"}
-      />
+      <CardHead id="figures" title={count === 1 ? "1 figure" : `${count} figures`} />
       <ul className="-mx-4 grid grid-cols-[repeat(auto-fill,minmax(min(100%,9.5rem),1fr))]">
-        {rows.flatMap(({ key, afterMm, changeMm }) => {
-          if (afterMm === undefined) return [];
-          const typed = set.figures.find((figure) => figure.key === key)!.typed;
-          const wrong = corrects?.figures.find((figure) => figure.key === key)?.mm;
+        {fullSet.measures.flatMap((key) => {
+          const figure = set.figures.find((one) => one.key === key);
+          if (!figure) return [];
           return [
             <li key={key} className="border-t border-line">
               <AppLink
                 href={`/measure/history?wearer=${set.wearerId}&figure=${key}`}
                 className="row-link grid h-full min-h-target content-start gap-1 px-4 py-3 text-ink no-underline"
               >
-                <Length mm={afterMm} {...units} size="card" />
+                <Length mm={figure.mm} unit={unit} fineness={fineness} size="card" />
                 <span className="font-semibold">{bodyMeasure(key).name}</span>
-                <Difference changeMm={changeMm} {...units} />
-                {typed !== formatLength(afterMm, unit, fineness).figure && (
-                  <span className="text-sm text-soft">Typed: {typed}</span>
-                )}
-                {corrects && wrong !== afterMm && (
-                  <span className="text-sm font-semibold text-thread">
-                    {wrong === undefined ? "Was left out" : <>Was {<Length mm={wrong} {...units} />}</>}
-                  </span>
-                )}
+                <About
+                  figure={figure}
+                  before={previous[key]}
+                  wrong={corrects && (corrects.figures.find((one) => one.key === key) ?? "left out")}
+                  unit={unit}
+                  fineness={fineness}
+                />
               </AppLink>
             </li>,
           ];
         })}
       </ul>
-      {missed.length > 0 && (
-        <p className="mt-2 text-sm text-soft">Not taken this time: {missed.join(", ").toLowerCase()}.</p>
-      )}
-      <div className="-mx-4 mt-2 -mb-4">
-        <Tape unit={unit} />
-      </div>
+      <Tape unit={unit} className="-mx-4 mt-2 -mb-4 w-auto" />
     </Card>
   );
 }
 
-function Difference({ changeMm, unit, fineness }: { changeMm: number | undefined } & Units) {
-  if (changeMm === undefined) return <span className="text-sm text-soft">Nothing to compare</span>;
-  const { negative, whole, numerator } = formatLength(changeMm, unit, fineness);
-  if (whole === 0 && numerator === 0) return <span className="text-sm text-soft">The same</span>;
+interface AboutProps extends Units {
+  figure: TakenFigure;
+  before: PreviousFigure | undefined;
+  /** The figure that was put right; null where nothing is. */
+  wrong: TakenFigure | "left out" | null;
+}
+
+function About({ figure: { typed, mm }, before, wrong, unit, fineness }: AboutProps) {
   return (
-    <span className="text-sm text-soft">
-      <Length mm={Math.abs(changeMm)} unit={unit} fineness={fineness} /> {negative ? "less" : "more"}
-    </span>
+    <>
+      {typed !== formatLength(mm, unit, fineness).figure && (
+        <span className="text-sm text-soft">Typed {typed}</span>
+      )}
+      {wrong === "left out" && <span className="text-sm font-semibold text-thread">Was left out</span>}
+      {wrong && wrong !== "left out" && wrong.mm !== mm && (
+        <span className="text-sm font-semibold text-thread">
+          Was <Length mm={wrong.mm} unit={unit} fineness={fineness} />
+        </span>
+      )}
+      {before && (
+        <span className="text-sm text-soft">
+          <LengthChange fromMm={before.mm} toMm={mm} unit={unit} fineness={fineness} /> since{" "}
+          {formatDay(before.takenOn)}
+        </span>
+      )}
+    </>
   );
 }

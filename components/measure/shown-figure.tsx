@@ -3,7 +3,6 @@
 import { type RefObject, useId } from "react";
 import { ArrowLeftRight } from "lucide-react";
 import { Length } from "@/components/ui/fraction";
-import { FieldError } from "@/components/ui/field";
 import { Tape } from "@/components/ui/tape";
 import { speakLength } from "@/lib/lengths/speak-length";
 import { shownEntry } from "@/lib/measuring/entry";
@@ -34,7 +33,8 @@ export interface ShownFigureProps {
   taken: TakenHere | undefined;
   unit: Unit;
   fineness: Fineness;
-  problem: string | null;
+  invalid: boolean;
+  /** Ids of the words about it. */
   describedBy: string;
   input: RefObject<HTMLInputElement | null>;
   onType: (text: string) => void;
@@ -47,64 +47,57 @@ export interface ShownFigureProps {
  * phone's own keyboard stays down.
  */
 export function ShownFigure(props: ShownFigureProps) {
-  const { name, entry, taken, unit, fineness, problem, describedBy, input, onType, onEnter, onUnit } = props;
+  const { name, entry, taken, unit, fineness, invalid, describedBy, input, onType, onEnter, onUnit } = props;
   const id = useId();
   const unitWord = unit === "in" ? "inches" : "centimetres";
   const other = unit === "in" ? "cm" : "in";
   return (
-    <div className="[grid-area:shown]">
-      <div className="pad-shown">
-        <div className="pad-giant">
-          <label htmlFor={id} className="sr-only">
-            {name}, in {unitWord}
-            {taken && entry === "" && `, taken: ${speakLength(taken.mm, taken.unit, fineness)}`}
-          </label>
-          <input
-            ref={input}
-            id={id}
-            type="text"
-            inputMode="none"
-            autoComplete="off"
-            autoCorrect="off"
-            spellCheck={false}
-            aria-describedby={problem ? `${id}-problem ${describedBy}` : describedBy}
-            aria-invalid={problem ? true : undefined}
-            value={entry}
-            onChange={(event) => onType(event.target.value)}
-            onKeyDown={(event) => {
-              if (event.key !== "Enter") return;
-              event.preventDefault();
-              onEnter();
-            }}
-          />
-          <span aria-hidden="true" className="flex min-w-0 items-center">
-            {entry !== "" || !taken ? (
-              <>
-                <Entry text={entry} unit={unit} />
-                <span className="pad-caret" />
-              </>
-            ) : (
-              <Length mm={taken.mm} unit={taken.unit} fineness={fineness} />
-            )}
-          </span>
-        </div>
-        <button
-          type="button"
-          className="me-2 flex min-h-target min-w-target items-center gap-1.5 rounded border-2 border-edge px-3 font-semibold"
-          aria-label={`Counting in ${unitWord}. Count in ${unit === "in" ? "centimetres" : "inches"}`}
-          onPointerDown={(event) => event.preventDefault()}
-          onClick={() => onUnit(other)}
-        >
-          {unit}
-          <ArrowLeftRight aria-hidden="true" className="size-4" />
-        </button>
-        <Tape unit={unit} className="col-span-2" />
+    <div className="pad-shown">
+      <div className="pad-giant">
+        <label htmlFor={id} className="sr-only">
+          {name}, in {unitWord}
+          {taken && entry === "" && `, taken: ${speakLength(taken.mm, taken.unit, fineness)}`}
+        </label>
+        <input
+          ref={input}
+          id={id}
+          type="text"
+          inputMode="none"
+          autoComplete="off"
+          autoCorrect="off"
+          spellCheck={false}
+          aria-describedby={describedBy}
+          aria-invalid={invalid || undefined}
+          value={entry}
+          onChange={(event) => onType(event.target.value)}
+          onKeyDown={(event) => {
+            if (event.key !== "Enter") return;
+            event.preventDefault();
+            onEnter();
+          }}
+        />
+        <span aria-hidden="true" className="flex min-w-0 items-center">
+          {entry !== "" || !taken ? (
+            <>
+              <Entry text={entry} unit={unit} />
+              <span className="pad-caret" />
+            </>
+          ) : (
+            <Length mm={taken.mm} unit={taken.unit} fineness={fineness} />
+          )}
+        </span>
       </div>
-      {problem && (
-        <div role="alert" className="mt-1">
-          <FieldError id={`${id}-problem`}>{problem}</FieldError>
-        </div>
-      )}
+      <button
+        type="button"
+        className="me-2 flex min-h-target min-w-target items-center gap-1.5 rounded border-2 border-edge px-3 font-semibold"
+        aria-label={`Counting in ${unitWord}. Count in ${unit === "in" ? "centimetres" : "inches"}`}
+        onPointerDown={(event) => event.preventDefault()}
+        onClick={() => onUnit(other)}
+      >
+        {unit}
+        <ArrowLeftRight aria-hidden="true" className="size-4" />
+      </button>
+      <Tape unit={unit} className="col-span-2" />
     </div>
   );
 }

@@ -13,6 +13,10 @@ export interface FigureLines {
   body: string;
   /** Seams, folds and bones: thin. */
   detail: string;
+  /** Cut into the hem of a stand: one is the front, two are the back. */
+  notches?: string;
+  /** The view box, where it is not the common one. */
+  box?: string;
 }
 
 const stand =
@@ -24,13 +28,16 @@ export const figureLines: Record<FigureName, FigureLines> = {
   front: {
     body: stand,
     detail: `${standBelow}M52 13C54 20 66 20 68 13M45 24C47 44 44 52 47 64S46 96 44 119M75 24C73 44 76 52 73 64S74 96 76 119`,
+    notches: "M55 119H65L60 112Z",
   },
   back: {
     body: stand,
     detail: `${standBelow}M60 11V119M46 30C50 48 50 60 48 74S47 104 46 119M74 30C70 48 70 60 72 74S73 104 74 119`,
+    notches: "M49 119H59L54 112ZM61 119H71L66 112Z",
   },
   // The left arm hanging, with the neck and the side of the body it hangs from; cut off by the frame.
   arm: {
+    box: "-6 0 100 132",
     body:
       "M24.8 -5.3C25.7 14.1 37.1 19.4 53 22C67 24.6 75 33.4 76.7 47.5C77.6 59.8 75.8 70.4 75.8 81" +
       "C76.7 95 75 114.4 73.2 137.3H60.9C59.1 119.7 53.8 98.6 55.6 81.8C55.6 72.2 54.7 63.4 53 54.6" +

@@ -35,7 +35,7 @@ export const ChecksList = memo(function ChecksList({ checks, fineness, sub, unit
       )}
       {good.length > 0 && (
         <details className="mt-2">
-          <summary className="flex min-h-target items-center font-semibold">
+          <summary className="min-h-target py-2 font-semibold">
             {good.length === 1 ? "1 check is good" : `${good.length} checks are good`}
           </summary>
           <ul className="grid gap-3">

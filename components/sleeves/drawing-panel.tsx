@@ -1,6 +1,6 @@
 "use client";
 
-import { type PointerEvent, type ReactNode, useState } from "react";
+import { type PointerEvent, type ReactNode, useRef, useState } from "react";
 import { Maximize2 } from "lucide-react";
 import { type MadeSleeve, makeSleeve } from "@/lib/drafting";
 import { type Fineness, type Unit } from "@/lib/records/types";
@@ -36,12 +36,15 @@ interface Drag {
   from: { x: number; y: number };
   made: Good;
   view: View;
+  /** What is said above must not push the paper from under the finger, px. */
+  headHeight: number;
 }
 
 /** The drawing above the figures: it stays in view, and can be taken by its handles. */
 export function DrawingPanel(props: DrawingPanelProps) {
   const { faint, fineness, focus, head, label, made, onFigure, unit } = props;
   const [ref, size] = useSize<HTMLDivElement>();
+  const headRef = useRef<HTMLDivElement>(null);
   const [drag, setDrag] = useState<Drag | null>(null);
   const [closely, setClosely] = useState(false);
   const view =
@@ -49,7 +52,13 @@ export function DrawingPanel(props: DrawingPanelProps) {
 
   return (
     <section aria-label="Drawing" className="drawing-panel">
-      <div className="px-4 py-1.5">{head}</div>
+      <div
+        ref={headRef}
+        className="min-h-[5.75rem] shrink-0 overflow-hidden px-4 py-1.5 lg:min-h-0"
+        style={drag ? { height: drag.headHeight, minHeight: 0 } : undefined}
+      >
+        {head}
+      </div>
       <Tape unit={unit} className="shrink-0" />
       <div ref={ref} className="marking-paper">
         {made && size && view ? (
@@ -60,7 +69,10 @@ export function DrawingPanel(props: DrawingPanelProps) {
               draft={made.draft}
             />
             <Handles
-              {...{ made, size, view, drag, setDrag }}
+              {...{ made, view, drag }}
+              onTake={(taken) =>
+                setDrag(taken && { ...taken, headHeight: headRef.current?.offsetHeight ?? 0 })
+              }
               onMove={(now, at) => {
                 const by = {
                   x: (at.x - now.from.x) / now.view.scale,
@@ -127,54 +139,42 @@ function draggedView({ made: before, name, view }: Drag, now: Good): View {
 
 interface HandlesProps {
   made: Good;
-  size: Size;
   view: View;
   drag: Drag | null;
-  setDrag(drag: Drag | null): void;
+  onTake(drag: Omit<Drag, "headHeight"> | null): void;
   onMove(drag: Drag, at: { x: number; y: number }): void;
 }
 
 /** For a finger; the same figures have keys beside their fields, for everyone. */
-function Handles({ drag, made, onMove, setDrag, size, view }: HandlesProps) {
-  const down = (name: HandleName) => (event: PointerEvent<SVGCircleElement>) => {
+function Handles({ drag, made, onMove, onTake, view }: HandlesProps) {
+  const down = (name: HandleName) => (event: PointerEvent) => {
     if (drag || event.button !== 0) return;
     event.currentTarget.setPointerCapture(event.pointerId);
     const from = { x: event.clientX, y: event.clientY };
-    setDrag({ name, pointer: event.pointerId, from, made, view });
+    onTake({ name, pointer: event.pointerId, from, made, view });
   };
   const move = (event: PointerEvent) => {
     if (drag?.pointer === event.pointerId) onMove(drag, { x: event.clientX, y: event.clientY });
   };
   const end = (event: PointerEvent) => {
-    if (drag?.pointer === event.pointerId) setDrag(null);
+    if (drag?.pointer === event.pointerId) onTake(null);
   };
-  return (
-    <svg
-      aria-hidden="true"
-      width={size.width}
-      height={size.height}
-      className="pointer-events-none absolute inset-0"
-    >
-      {handleNames.map((name) => {
-        const { x, y } = toScreen(view, handlePoint(name, made.draft));
-        return (
-          <g key={name} className="pointer-events-auto">
-            <circle cx={x} cy={y} r={drag?.name === name ? 11 : 7} className="handle-dot" />
-            <circle
-              cx={x}
-              cy={y}
-              r={23}
-              className="handle-hit"
-              data-handle={name}
-              onPointerDown={down(name)}
-              onPointerMove={move}
-              onPointerUp={end}
-              onPointerCancel={end}
-              onLostPointerCapture={end}
-            />
-          </g>
-        );
-      })}
-    </svg>
-  );
+  return handleNames.map((name) => {
+    const { x, y } = toScreen(view, handlePoint(name, made.draft));
+    return (
+      <div
+        key={name}
+        aria-hidden="true"
+        className="handle"
+        data-handle={name}
+        data-held={drag?.name === name || undefined}
+        style={{ left: x, top: y }}
+        onPointerDown={down(name)}
+        onPointerMove={move}
+        onPointerUp={end}
+        onPointerCancel={end}
+        onLostPointerCapture={end}
+      />
+    );
+  });
 }

@@ -70,7 +70,12 @@ export function FiguresForm(props: FiguresFormProps) {
 
   return (
     <>
-      <FromSetNotice {...{ set, wearer, today, isNew }} inUse={setFigures !== undefined} said={said} />
+      <FromSetNotice
+        {...{ set, wearer, today, isNew }}
+        fromOther={isNew && set !== null && form.setId !== null && form.setId !== set.id}
+        inUse={setFigures !== undefined}
+        said={said}
+      />
       <Card aria-labelledby="figures-title">
         <CardHead id="figures-title" title="Figures" />
         <div className="grid gap-5">
@@ -210,7 +215,7 @@ function GuideMarks({ beside, field, form, made, onPatch }: MarksProps) {
   return (
     <Card aria-labelledby="marks-title">
       <details open={troubled || undefined}>
-        <summary className="min-h-target">
+        <summary className="min-h-target py-2">
           <h2 id="marks-title" className="inline font-figure text-lg font-bold">
             Guide marks and notches
           </h2>

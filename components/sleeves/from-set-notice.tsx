@@ -11,13 +11,22 @@ export interface FromSetNoticeProps {
   wearer: Wearer | null;
   today: string;
   isNew: boolean;
+  /** The form was begun from another set than this, the latest. */
+  fromOther: boolean;
   /** The form was filled from the set. */
   inUse: boolean;
   said: SetAsk["said"];
 }
 
 /** Which taking of the tape the figures are from, whether it is too old to cut from, or that there is none. */
-export function FromSetNotice({ inUse, isNew, said, set, today, wearer }: FromSetNoticeProps) {
+export function FromSetNotice({ fromOther, inUse, isNew, said, set, today, wearer }: FromSetNoticeProps) {
+  if (set && fromOther)
+    return (
+      <Notice
+        tone="look"
+        title={`There are newer measurements, taken on ${formatDay(set.takenOn, { style: "long" })}. Start over to draft from them.`}
+      />
+    );
   if (!set || !inUse) {
     if (!wearer || set || !isNew) return null;
     return (

@@ -1,6 +1,6 @@
 "use client";
 
-import { type KeyboardEvent, type PointerEvent, useEffect, useRef, useState } from "react";
+import { type KeyboardEvent, type PointerEvent, type ReactNode, useEffect, useRef, useState } from "react";
 import { Dialog } from "radix-ui";
 import { Minus, Plus, Scan, X } from "lucide-react";
 import { type MadeSleeve, type Point } from "@/lib/drafting";
@@ -29,17 +29,21 @@ export function LookClosely({ open, onOpenChange, ...rest }: LookCloselyProps) {
     <Dialog.Root open={open} onOpenChange={onOpenChange}>
       <Dialog.Portal>
         <Dialog.Content className="closely">
-          <div className="flex items-center justify-between gap-2 px-4 py-2">
-            <Dialog.Title className="font-figure text-lg font-bold">Look closely</Dialog.Title>
-            <Dialog.Description className="sr-only">
-              Drag to move the paper. Pinch, or press plus and minus, to zoom; 0 shows the whole sleeve.
-            </Dialog.Description>
-            <Dialog.Close className="flex size-target shrink-0 items-center justify-center rounded border-2 border-edge bg-well">
-              <X aria-hidden="true" className="size-5" />
-              <span className="sr-only">Close</span>
-            </Dialog.Close>
-          </div>
-          <Paper {...rest} />
+          <Paper
+            {...rest}
+            head={
+              <div className="flex items-center justify-between gap-2 px-4 py-2">
+                <Dialog.Title className="font-figure text-lg font-bold">Look closely</Dialog.Title>
+                <Dialog.Description className="sr-only">
+                  Drag to move the paper. Pinch, or press plus and minus, to zoom; 0 shows the whole sleeve.
+                </Dialog.Description>
+                <Dialog.Close className="flex size-target shrink-0 items-center justify-center rounded border-2 border-edge bg-well">
+                  <X aria-hidden="true" className="size-5" />
+                  <span className="sr-only">Close</span>
+                </Dialog.Close>
+              </div>
+            }
+          />
         </Dialog.Content>
       </Dialog.Portal>
     </Dialog.Root>
@@ -49,14 +53,9 @@ export function LookClosely({ open, onOpenChange, ...rest }: LookCloselyProps) {
 const zoomStep = 1.4;
 const panStep = 60;
 
-function Paper({
-  faint,
-  fineness,
-  focus,
-  label,
-  made,
-  unit,
-}: Omit<LookCloselyProps, "open" | "onOpenChange">) {
+type PaperProps = Omit<LookCloselyProps, "open" | "onOpenChange"> & { head: ReactNode };
+
+function Paper({ faint, fineness, focus, head, label, made, unit }: PaperProps) {
   const [ref, size] = useSize<HTMLDivElement>();
   const [moved, setMoved] = useState<View | null>(null);
   const fingers = useRef(new Map<number, Point>());
@@ -128,6 +127,7 @@ function Paper({
 
   return (
     <div className="flex min-h-0 flex-1 flex-col" onKeyDown={keys}>
+      {head}
       <div ref={ref} className="marking-paper">
         {size && view && (
           <SleeveDrawing

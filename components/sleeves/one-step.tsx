@@ -70,6 +70,7 @@ export function OneStep({ back, fineness, go, pictures, place, stale, unit, wron
     <Screen
       title="Mark out"
       back={back}
+      wide
       action={
         <div className="grid grid-cols-[minmax(0,2fr)_minmax(0,3fr)] gap-2">
           <Button
@@ -100,7 +101,7 @@ export function OneStep({ back, fineness, go, pictures, place, stale, unit, wron
       {place.at === 0 && stale && <Notice tone="look" title={stale} />}
       <section
         aria-label="Step"
-        className="-mt-2 grid touch-pan-y grid-cols-[minmax(0,1fr)] gap-3 select-none lg:grid-cols-2 lg:gap-8"
+        className="-mt-2 grid touch-pan-y grid-cols-[minmax(0,1fr)] gap-3 select-none lg:grid-cols-[minmax(0,24rem)_minmax(0,1fr)] lg:gap-8"
         onPointerDown={down}
         onPointerUp={up}
         onPointerCancel={() => (start.current = null)}

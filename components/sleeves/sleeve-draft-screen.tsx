@@ -130,7 +130,7 @@ function Drafting({ draftKey, justKept = false, onKept, set, sleeve, wearer, wor
   return (
     <SleeveEditor
       begun={handle.draft ? restoredForm(handle.draft, unit, fineness) : null}
-      {...{ initial, sleeve, wearer, set, handle, justKept, today }}
+      {...{ draftKey, initial, sleeve, wearer, set, handle, justKept, today }}
       onKept={onKept}
     />
   );

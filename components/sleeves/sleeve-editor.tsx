@@ -21,6 +21,7 @@ import { fieldProblems } from "@/lib/sleeves/field-problems";
 import { type FigureKey } from "@/lib/sleeves/sleeve-figures";
 import { namesOf, readForm, type SleeveForm, withFigure } from "@/lib/sleeves/sleeve-form";
 import { suggestedName } from "@/lib/sleeves/sleeve-name";
+import { dropDraft } from "@/lib/store/drafts";
 import { wearerCardQuery } from "@/lib/store/queries/wearers";
 import { ChecksList } from "./checks-list";
 import { DrawingPanel } from "./drawing-panel";
@@ -32,6 +33,7 @@ import { useLastGood } from "./use-last-good";
 import { useSavedForm } from "./use-saved-form";
 
 export interface SleeveEditorProps {
+  draftKey: string;
   initial: SleeveForm;
   /** What was being typed when the screen was left, or null. */
   begun: SleeveForm | null;
@@ -46,13 +48,19 @@ export interface SleeveEditorProps {
 }
 
 export function SleeveEditor(props: SleeveEditorProps) {
-  const { begun, handle, initial, justKept, onKept, set, sleeve, today, wearer } = props;
+  const { begun, draftKey, handle, initial, justKept, onKept, set, sleeve, today, wearer } = props;
   const router = useRouter();
   const { busy, keep, problem } = useKeep();
   const [form, setForm] = useState(begun ?? initial);
   const [focus, setFocus] = useState<FigureKey | null>(null);
   const [pressed, setPressed] = useState(false);
-  useSavedForm(form, form !== initial && form !== begun, handle.save);
+  const { save } = handle;
+  const putDown = useCallback(
+    // Nothing is left lying that only says what the book says already.
+    (now: SleeveForm) => (same(now, initial) ? dropDraft(draftKey).catch(() => undefined) : save(now)),
+    [initial, draftKey, save],
+  );
+  useSavedForm(form, form !== initial && form !== begun, putDown);
 
   const { view: chosen } = useView(wearerCardQuery, { id: form.wearerId ?? "" });
   const whose = form.wearerId === wearer?.id ? wearer : (chosen?.wearer ?? null);
@@ -130,7 +138,7 @@ export function SleeveEditor(props: SleeveEditorProps) {
     >
       <BroughtBack
         draft={{
-          broughtBack: begun !== null && JSON.stringify(begun) !== JSON.stringify(initial),
+          broughtBack: begun !== null && !same(begun, initial),
           startOver: () => {
             setForm({ ...initial });
             setPressed(false);
@@ -182,6 +190,8 @@ export function SleeveEditor(props: SleeveEditorProps) {
     </Screen>
   );
 }
+
+const same = (a: SleeveForm, b: SleeveForm): boolean => JSON.stringify(a) === JSON.stringify(b);
 
 function startWords(missing: readonly FigureKey[]): string {
   return missing.length === 0 ? "" : `Type ${namesOf(missing)}, and the sleeve is drawn.`;

@@ -39,6 +39,7 @@ export function SleeveListScreen() {
   return (
     <Screen
       title="Sleeves"
+      wide
       tools={
         items.length > 1 && (
           <Button onClick={() => setChosen((now) => (now ? null : []))}>
@@ -76,7 +77,7 @@ export function SleeveListScreen() {
       )}
       {items.length > 0 && (
         <Card flush notches={1} aria-label="Sleeves, newest first">
-          <Rows>
+          <Rows className="lg:grid lg:grid-cols-2">
             {items.map((item) => (
               <SleeveRow
                 key={item.sleeve.id}

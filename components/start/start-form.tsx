@@ -99,7 +99,7 @@ export function StartForm({
           </p>
         </form>
       </Card>
-      <div className="screen-action">
+      <div className="screen-action lg:w-[calc(100%+1rem)]">
         <KeepTrouble keep={problem} draft={handle.problem} />
         <Button type="submit" form="start" variant="main" full busy={busy && !looking}>
           Begin

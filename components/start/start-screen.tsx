@@ -1,6 +1,6 @@
 "use client";
 
-import { useEffect, useState } from "react";
+import { useState } from "react";
 import { useBookState, useWorkshop } from "@/components/store/use-book";
 import { useDraft } from "@/components/store/use-draft";
 import { ButtonLink } from "@/components/ui/button";
@@ -15,16 +15,20 @@ import { START_DRAFT, StartForm } from "./start-form";
 export function StartScreen() {
   const state = useBookState();
   return (
-    <main id="main" tabIndex={-1} className="screen max-w-page">
+    <main
+      id="main"
+      tabIndex={-1}
+      className="screen mx-auto max-w-page lg:grid lg:max-w-wide lg:grid-cols-2 lg:items-center lg:gap-12"
+    >
       <header className="mb-5 text-center">
         <SleeveDrawing />
         <h1 className="mt-2 font-figure text-2xl font-bold">Notchbook</h1>
-        <p className="mx-auto max-w-[24rem] text-balance">
+        <p className="mx-auto max-w-[24rem] text-balance lg:text-lg">
           A dressmaker’s book on this phone: clients, figures, sleeves that fit, orders and money. It works
           without data.
         </p>
       </header>
-      <div className="grid flex-1 grid-cols-[minmax(0,1fr)] content-start gap-4">
+      <div className="grid w-full max-w-page flex-1 grid-cols-[minmax(0,1fr)] content-start gap-4">
         {state.phase !== "open" ? (
           <Progress label="Opening" />
         ) : state.head.next > 1 ? (
@@ -54,12 +58,11 @@ function HasBegun() {
   );
 }
 
+/** Only once the journal has been read, so never where the page is made. */
 function Begin({ workshopId }: { workshopId: string }) {
   const handle = useDraft<StartValues>(START_DRAFT);
-  const [country, setCountry] = useState<string>();
-  // The phone's languages are not known where the page was made.
-  useEffect(() => setCountry(guessCountry(navigator.languages)), []);
-  if (handle.draft === undefined || country === undefined) return <Progress label="Opening" />;
+  const [country] = useState(() => guessCountry(navigator.languages));
+  if (handle.draft === undefined) return <Progress label="Opening" />;
   const initial: StartValues = { name: "", currency: guessCurrency(country), unit: guessUnit(country) };
   return <StartForm workshopId={workshopId} country={country} initial={initial} handle={handle} />;
 }

@@ -1,6 +1,5 @@
 "use client";
 
-import { Smartphone } from "lucide-react";
 import { useEffect, useState, useSyncExternalStore } from "react";
 import { useServiceWorker } from "@/components/frame/use-service-worker";
 import { Button } from "@/components/ui/button";
@@ -14,7 +13,7 @@ export function PhoneCard() {
   return (
     <Card aria-labelledby="phone-title">
       <CardHead title="This phone" id="phone-title" />
-      <div className="grid gap-5">
+      <div className="grid grid-cols-[minmax(0,1fr)] gap-5">
         <WithoutData />
         <AmongTheApps />
         <Staying />
@@ -33,7 +32,7 @@ const offline = {
 function WithoutData() {
   const { phase } = useServiceWorker();
   return (
-    <section className="grid gap-1">
+    <section className="grid grid-cols-[minmax(0,1fr)] gap-1">
       <h3 className="font-semibold">Without data</h3>
       <p role="status">{offline[phase]}</p>
     </section>
@@ -43,15 +42,11 @@ function WithoutData() {
 function AmongTheApps() {
   const state = useSyncExternalStore(subscribeInstall, installState, () => "by-hand" as const);
   return (
-    <section className="grid gap-2">
+    <section className="grid grid-cols-[minmax(0,1fr)] gap-2">
       <h3 className="font-semibold">Among the phone’s apps</h3>
       {state === "installed" && <p>Notchbook is installed on this phone.</p>}
       {state === "offered" && (
-        <Button
-          className="justify-self-start"
-          icon={<Smartphone className="size-5" />}
-          onClick={() => void install()}
-        >
+        <Button className="justify-self-start" onClick={() => void install()}>
           Install Notchbook
         </Button>
       )}
@@ -85,7 +80,7 @@ function Staying() {
   }, [asked]);
   if (!room) return null;
   return (
-    <section className="grid gap-2">
+    <section className="grid grid-cols-[minmax(0,1fr)] gap-2">
       <h3 className="font-semibold">Room</h3>
       <p role="status">{staying[room.staying]}</p>
       {room.staying === "may-go" && (

@@ -14,6 +14,7 @@ import { readIn } from "@/lib/copy/read-in";
 import { type SavedCopy } from "@/lib/copy/saved-copy";
 import { openBook } from "@/lib/store/book";
 import { keepProblem } from "@/lib/store/keep-problem";
+import { newPage } from "@/lib/workshop/new-page";
 import { CopyPreview } from "./copy-preview";
 
 interface Chosen {
@@ -66,7 +67,7 @@ export function ReadInCopy({ full }: { full?: boolean }) {
         setPhase({ at: "reading", chosen, done, of }),
       );
       book.tellBookChanged();
-      location.assign("/");
+      newPage("/");
     } catch (error) {
       setPhase({ at: "refused", say: keepProblem(error).message });
     }

@@ -17,6 +17,7 @@ import {
 } from "@/lib/copy/read-in";
 import { openBook } from "@/lib/store/book";
 import { keepProblem } from "@/lib/store/keep-problem";
+import { newPage } from "@/lib/workshop/new-page";
 
 type Phase =
   | { at: "none" }
@@ -58,7 +59,7 @@ export function UnfinishedReading() {
         setPhase({ at: "going-on", done, of }),
       );
       book.tellBookChanged();
-      location.assign("/");
+      newPage("/");
     } catch (error) {
       setPhase({ at: "found", reading, say: keepProblem(error).message });
     }

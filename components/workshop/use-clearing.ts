@@ -3,6 +3,7 @@
 import { useState } from "react";
 import { keepProblem } from "@/lib/store/keep-problem";
 import { clearPhone } from "@/lib/workshop/clear-phone";
+import { newPage } from "@/lib/workshop/new-page";
 
 /** Clears everything and begins again at the start; `problem` says why it could not, with nothing cleared. */
 export function useClearing() {
@@ -13,7 +14,7 @@ export function useClearing() {
     setProblem(null);
     try {
       await clearPhone();
-      location.assign("/start");
+      newPage("/start");
     } catch (error) {
       setBusy(false);
       setProblem(keepProblem(error).message.replace("Not kept", "Not cleared"));

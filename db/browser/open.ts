@@ -58,7 +58,7 @@ export async function openDatabase(
 /** IndexedDB names of PGlite's databases of ours. */
 const idbName = (name: string): string => `/pglite/${name}`;
 
-export async function deleteDatabase(name: string): Promise<void> {
+async function deleteDatabase(name: string): Promise<void> {
   await new Promise<void>((resolve, reject) => {
     const request = indexedDB.deleteDatabase(idbName(name));
     request.onsuccess = () => resolve();

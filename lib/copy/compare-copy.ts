@@ -22,7 +22,7 @@ export interface ReadingPlan {
  * A row of a copy as a change to what is held: its fields with a later stamp. (The same stamp is the same writing,
  * even where two stores give its members in another order.) Null where the copy has nothing later.
  */
-export function laterFields(table: TableName, row: AnyRow, held?: AnyRow): RowChange | null {
+function laterFields(table: TableName, row: AnyRow, held?: AnyRow): RowChange | null {
   const fields = Object.entries(row.stamps)
     .filter(([name, stamp]) => stamp > (held?.stamps[name] ?? ""))
     .map(([name, stamp]) => [name, { value: row[name] ?? null, stamp, base: held?.stamps[name] ?? null }]);

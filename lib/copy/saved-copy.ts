@@ -9,8 +9,8 @@ import { rowSchemas } from "@/lib/records/schemas";
 import { type RowOf, type TableName, tableNames } from "@/lib/records/types";
 import { canonicalJson, sha256 } from "./canonical-json";
 
-export const COPY_FORMAT = "notchbook-copy";
-export const COPY_VERSION = 1;
+const COPY_FORMAT = "notchbook-copy";
+const COPY_VERSION = 1;
 
 /** What was being typed and not kept yet. */
 export interface CopiedDraft {

@@ -3,7 +3,7 @@ import { type PaymentKind, type PaymentMethod, type Stage } from "@/lib/records/
 import { type Reach } from "@/lib/sleeves/reach";
 import { type DemoClient } from "./demo-people";
 
-export interface DemoGarment {
+interface DemoGarment {
   kind: string;
   /** Which of the client's wearers, from 0. */
   wearer: number;

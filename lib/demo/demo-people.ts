@@ -12,7 +12,7 @@ export interface DemoSet {
   note?: string;
 }
 
-export interface DemoWearer {
+interface DemoWearer {
   name: string;
   /** Whole months of life; left out for someone grown up. */
   months?: number;
@@ -61,7 +61,7 @@ const sleeveSet = taken(sleeveKeys);
 /** In the order of `fullKeys`. */
 const fullSet = taken(fullKeys);
 
-export const OWNER = "Nadia";
+const OWNER = "Nadia";
 const ASSISTANT = "Bea";
 
 export const demoClients: readonly DemoClient[] = [
@@ -70,7 +70,7 @@ export const demoClients: readonly DemoClient[] = [
     name: "Amara Okonjo-Bell",
     ...mobile(112),
     email: "amara@example.com",
-    address: "14 Lantern Row, Hollowby",
+    address: "14 Lantern Row\nHollowby",
     note: "Rings best after six.",
     wearers: [
       {
@@ -155,7 +155,7 @@ export const demoClients: readonly DemoClient[] = [
     key: "sian",
     name: "Siân Prydwen",
     ...mobile(158),
-    address: "The Schoolhouse, Upper Fold",
+    address: "The Schoolhouse\nUpper Fold",
     wearers: [
       {
         name: "Cadi",

@@ -1,14 +1,15 @@
 /** The invented workshop that a visitor can look round in: one change, made from today's day. */
-import { cautionsFor } from "@/lib/people/cautions";
 import { make, newId, type Write } from "@/lib/journal/change";
 import { type Numbers } from "@/lib/journal/journal";
 import { parseLength } from "@/lib/lengths/parse-length";
-import { orderSums } from "@/lib/money/order-sums";
+import { orderCautions, receiptCautions } from "@/lib/orders/order-cautions";
+import { moneyWrites } from "@/lib/orders/take-money";
 import { ageOn, type BirthFacts } from "@/lib/people/age";
 import { type IsoDate, readDay } from "@/lib/people/iso-date";
 import {
   type MeasurementSetFields,
   type PriceLineFields,
+  type ReceiptFields,
   type ReceiptSnapshot,
   type SleeveFields,
   type TakenFigure,
@@ -196,43 +197,32 @@ function orderWrites(
   });
   writes.push(...lines.map((line) => make("priceLines", line, newIdOf(ask))));
 
+  const birthOfWearer = (at: number) => ({ name: wearers[at]!.name, ...wearers[at]!.birth });
+  const garments = order.garments.map(({ kind, wearer }) => ({
+    kind,
+    note: "",
+    wearer: birthOfWearer(wearer),
+  }));
   const earlier: ReceiptSnapshot["earlier"] = [];
-  order.payments.forEach(({ kind, method, amountMinor, on }, at) => {
-    const paymentId = newIdOf(ask);
+  for (const { on, ...moved } of order.payments) {
     const paidOn = day(on);
-    const number = ask.numbers.receipt();
-    const sums = orderSums(lines, order.payments.slice(0, at + 1));
-    const snapshot: ReceiptSnapshot = {
-      seller: { name: workshop.name, lines: [...workshop.address.split("\n"), workshop.phone] },
-      buyer: { name: client.name, lines: (client.address ?? "").split(", ").filter(Boolean) },
-      occasion,
-      currency: workshop.currency,
-      lines: lines.map(({ text, quantity, unitMinor }) => ({
-        text,
-        quantity,
-        unitMinor,
-        amountMinor: quantity * unitMinor,
-      })),
-      earlier: [...earlier],
-      payment: { kind, method, amountMinor },
-      totalMinor: sums.totalMinor,
-      receivedMinor: sums.receivedMinor - sums.givenBackMinor,
-      balanceMinor: sums.balanceMinor,
-      cautions: cautionsOf(order, wearers, paidOn),
-    };
-    writes.push(
-      make("payments", { orderId, kind, method, amountMinor, paidOn, note: "" }, paymentId),
-      make("receipts", { paymentId, orderId, number, issuedOn: paidOn, snapshot }, newIdOf(ask)),
+    const [payment, receipt] = moneyWrites(
+      {
+        orderId,
+        receiptId: newIdOf(ask),
+        workshop,
+        client: { name: client.name, address: client.address ?? "" },
+        order: head,
+        lines,
+        earlier,
+        payment: { id: newIdOf(ask), ...moved, paidOn, note: "" },
+        cautions: receiptCautions(orderCautions(garments, paidOn)),
+      },
+      ask.numbers,
     );
-    earlier.push({ number, paidOn, kind, amountMinor });
-  });
+    writes.push(payment!, receipt!);
+    const { number } = receipt!.fields as ReceiptFields;
+    earlier.push({ number, paidOn, kind: moved.kind, amountMinor: moved.amountMinor });
+  }
   return writes;
-}
-
-/** What has to be minded about the order's garments, each sentence once. */
-function cautionsOf(order: DemoOrder, wearers: readonly Placed[], on: IsoDate): string[] {
-  const said = order.garments.flatMap(({ kind, wearer }) =>
-    cautionsFor(kind, ageOn(wearers[wearer]!.birth, on)).map(({ say }) => say),
-  );
-  return [...new Set(said)];
 }

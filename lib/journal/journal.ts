@@ -18,6 +18,8 @@ export interface Head {
   device: string;
   /** Names the browser's database; another after everything was cleared. */
   book: string;
+  /** Counts the databases that were made for this book: a spoilt one is left behind, the next has another name. */
+  generation: number;
   workshopId: string;
   /** The number that the next change takes. */
   next: number;
@@ -52,6 +54,8 @@ export interface Journal {
   confirm(number: number): Promise<Head>;
   /** Notes that a copy was saved: the last change in it, and when it was made. */
   noteCopy(copy: { number: number; at: string }): Promise<Head>;
+  /** Gives up the database of a generation; gives the head with the next one. Once, however many tabs ask. */
+  leaveDatabase(generation: number): Promise<Head>;
   /** Empties everything in one transaction and begins a new book for `workshopId`. */
   startAnew(workshopId?: string): Promise<Head>;
 }
@@ -65,6 +69,7 @@ function freshHead(workshopId: string = newId()): Head {
   return {
     device: uuidv4(),
     book: uuidv4(),
+    generation: 1,
     workshopId,
     next: 1,
     nextReceipt: 1,
@@ -151,6 +156,8 @@ export function openJournal(store: UseStore, now: () => number = Date.now): Jour
     confirm: (number) =>
       updateHead((head) => (number > head.confirmed ? { ...head, confirmed: number } : head)),
     noteCopy: (lastCopy) => updateHead((head) => ({ ...head, lastCopy })),
+    leaveDatabase: (generation) =>
+      updateHead((head) => (head.generation === generation ? { ...head, generation: generation + 1 } : head)),
     startAnew: (workshopId) =>
       store("readwrite", async (objects) => {
         const done = promisifyRequest(objects.transaction);

@@ -22,7 +22,11 @@ export type Item =
       readonly kind: "path";
       readonly steps: readonly PathStep[];
       readonly fill?: Colour;
-      readonly stroke?: { readonly width: number; readonly colour: Colour; readonly dash?: readonly number[] };
+      readonly stroke?: {
+        readonly width: number;
+        readonly colour: Colour;
+        readonly dash?: readonly number[];
+      };
     };
 
 export interface Block {

@@ -23,7 +23,11 @@ export function compose(groups: readonly Group[], paper: Paper, { head, foot }: 
   const bodyOf = (paper.height ?? LONGEST_PAGE) - margin.top - margin.bottom;
   const headHeight = head(2, 2).height;
   const footHeight = isRoll ? 0 : foot(2, 2).height;
-  const dealt = paginate(groups, (page) => bodyOf - footHeight - (page > 0 ? headHeight : 0));
+  const alone = paginate(groups, () => bodyOf);
+  const dealt =
+    alone.length === 1
+      ? alone
+      : paginate(groups, (page) => bodyOf - footHeight - (page > 0 ? headHeight : 0));
   return dealt.map(({ blocks, height: used }, index) => {
     const below = index > 0 ? headHeight : 0;
     const height = paper.height ?? margin.top + below + used + margin.bottom;

@@ -7,7 +7,12 @@ export interface Paper {
   readonly width: number;
   /** None on a roll: it is as long as what stands on it. */
   readonly height?: number;
-  readonly margin: { readonly top: number; readonly right: number; readonly bottom: number; readonly left: number };
+  readonly margin: {
+    readonly top: number;
+    readonly right: number;
+    readonly bottom: number;
+    readonly left: number;
+  };
 }
 
 /** No page of a PDF may be longer (ISO 32000-1, Annex C). A roll longer than this is cut in two. */

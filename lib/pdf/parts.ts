@@ -1,13 +1,18 @@
 /** Parts that more than one document is made of. */
-import { type Block, type Line, row, shiftAll, space } from "@/lib/pdf/blocks";
+import { type Block, type Line, moved, overlay, row, stack } from "@/lib/pdf/blocks";
 import { notch } from "@/lib/pdf/signs";
 import { type TextStyle, type Typesetter } from "@/lib/pdf/typesetter";
 
 export const present = (lines: readonly string[]): string[] => lines.filter((line) => line.trim() !== "");
 
 /** All texts in one column, one below the other. */
-export const textLines = (set: Typesetter, texts: readonly string[], style: TextStyle, width: number, x = 0): Line[] =>
-  present(texts).flatMap((text) => set.lines(text, style, { x, width }));
+export const textLines = (
+  set: Typesetter,
+  texts: readonly string[],
+  style: TextStyle,
+  width: number,
+  x = 0,
+): Line[] => present(texts).flatMap((text) => set.lines(text, style, { x, width }));
 
 /** Words on the left, a figure on the right of the same line; each wraps in its own part of the width. */
 export function pair(
@@ -18,7 +23,10 @@ export function pair(
 ): Block[] {
   const gap = leftStyle.size;
   const wanted = set.width(right, rightStyle);
-  const rightWidth = Math.min(wanted, Math.max((width - gap) * 0.55, width - gap - set.width(left, leftStyle)));
+  const rightWidth = Math.min(
+    wanted,
+    Math.max((width - gap) * 0.55, width - gap - set.width(left, leftStyle)),
+  );
   return row([
     set.lines(left, leftStyle, { x: 0, width: width - rightWidth - gap }),
     set.lines(right, rightStyle, { x: width - rightWidth, width: rightWidth, align: "right" }),
@@ -32,16 +40,28 @@ export function notched(set: Typesetter, text: string, style: TextStyle, width: 
   return lines.map((line, i) =>
     i > 0
       ? line
-      : { ...line, items: [notch(style.size * 0.36, line.baseline - style.size * 0.52, style.size / 14), ...line.items] },
+      : {
+          ...line,
+          items: [
+            notch(style.size * 0.36, line.baseline - style.size * 0.52, style.size / 14),
+            ...line.items,
+          ],
+        },
   );
 }
 
 /** The largest of the sizes at which the text stands on one line; the last where none does. */
-export const fittingSize = (set: Typesetter, text: string, bold: boolean, sizes: readonly number[], width: number) =>
-  sizes.find((size) => set.width(text, { size, bold }) <= width) ?? sizes.at(-1)!;
+export const fittingSize = (
+  set: Typesetter,
+  text: string,
+  bold: boolean,
+  sizes: readonly number[],
+  width: number,
+) => sizes.find((size) => set.width(text, { size, bold }) <= width) ?? sizes.at(-1)!;
 
-/** A block on its own behind a space, as parts. */
-export const after = (height: number, parts: readonly Block[]): Block[] => [space(height), ...parts];
-
-export const movedLines = (lines: readonly Line[], dx: number): Line[] =>
-  lines.map((line) => ({ ...line, items: shiftAll(line.items, dx, 0) }));
+/** Two columns whose first lines stand on one baseline; below that each keeps its own pace. */
+export function abreast(left: readonly Line[], right: readonly Line[]): Block {
+  const baseline = Math.max(left[0]?.baseline ?? 0, right[0]?.baseline ?? 0);
+  const hung = (lines: readonly Line[]) => moved(stack(lines), 0, baseline - (lines[0]?.baseline ?? 0));
+  return overlay(hung(left), hung(right));
+}

@@ -19,7 +19,8 @@ export const useFont = (pdf: jsPDF, size: number, bold: boolean): jsPDF =>
 function asByteString(file: ArrayBuffer): string {
   const bytes = new Uint8Array(file);
   let text = "";
-  for (let i = 0; i < bytes.length; i += 0x8000) text += String.fromCharCode(...bytes.subarray(i, i + 0x8000));
+  for (let i = 0; i < bytes.length; i += 0x8000)
+    text += String.fromCharCode(...bytes.subarray(i, i + 0x8000));
   return text;
 }
 

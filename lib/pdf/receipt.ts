@@ -4,7 +4,7 @@ import { compose, type Furniture } from "@/lib/pdf/compose";
 import { longDate } from "@/lib/pdf/long-date";
 import { type Group } from "@/lib/pdf/paginate";
 import { inner, type Paper, type ReceiptPaper, receiptPapers } from "@/lib/pdf/papers";
-import { fittingSize, notched, pair, present, textLines } from "@/lib/pdf/parts";
+import { abreast, fittingSize, notched, pair, present, textLines } from "@/lib/pdf/parts";
 import { type ReceiptDocument, type ReceiptLine } from "@/lib/pdf/receipt-document";
 import { card, CARD, tape } from "@/lib/pdf/signs";
 import { type TextStyle, type Typesetter, typesetter } from "@/lib/pdf/typesetter";
@@ -30,7 +30,11 @@ interface Desk {
 }
 
 /** The file. @throws Error where the painter cannot draw. */
-export function receiptPdf(doc: ReceiptDocument, paper: ReceiptPaper, tools: PrintTools): Promise<ArrayBuffer> {
+export function receiptPdf(
+  doc: ReceiptDocument,
+  paper: ReceiptPaper,
+  tools: PrintTools,
+): Promise<ArrayBuffer> {
   const sheet: Paper = receiptPapers[paper];
   const base = baseSizes[paper];
   const desk: Desk = {
@@ -43,7 +47,14 @@ export function receiptPdf(doc: ReceiptDocument, paper: ReceiptPaper, tools: Pri
     strong: { size: base, bold: true },
     label: { size: base * 0.86, bold: true },
   };
-  const groups = [head(desk), parties(desk), amountCard(desk), ...items(desk), ...sums(desk), ...closing(desk)];
+  const groups = [
+    head(desk),
+    parties(desk),
+    amountCard(desk),
+    ...items(desk),
+    ...sums(desk),
+    ...closing(desk),
+  ];
   const pages = compose(groups, sheet, furniture(desk));
   const facts = {
     title: `${doc.title} ${doc.number}`,
@@ -85,7 +96,7 @@ function head({ doc, set, width, base, isRoll, plain, strong }: Desk): Group {
   return {
     parts: [
       ...edge,
-      ...row([
+      abreast(
         [
           ...name(leftWidth, [base * 2.3, base * 2, base * 1.7, base * 1.5]),
           ...textLines(set, doc.seller.lines, plain, leftWidth),
@@ -95,7 +106,7 @@ function head({ doc, set, width, base, isRoll, plain, strong }: Desk): Group {
           ...set.lines(doc.number, strong, right),
           ...set.lines(date, plain, right),
         ],
-      ]),
+      ),
     ],
   };
 }
@@ -111,8 +122,7 @@ function parties({ doc, set, width, base, isRoll, plain, label }: Desk): Group {
     ...set.lines("For", label, { x, width: room }),
     ...set.lines(doc.orderTitle, isRoll ? { size: base, bold: true } : who, { x, width: room }),
   ];
-  if (isRoll)
-    return { gap: base * 0.8, parts: [...from(width), space(base * 0.6), ...whatFor(0, width)] };
+  if (isRoll) return { gap: base * 0.8, parts: [...from(width), space(base * 0.6), ...whatFor(0, width)] };
   const room = (width - base * 2) / 2;
   return { gap: base * 1.6, parts: row([from(room), whatFor(width - room, room)]) };
 }
@@ -140,7 +150,9 @@ function amountCard({ doc, set, width, base, isRoll, plain, strong }: Desk): Gro
       ]);
     const figureWidth = Math.min(room * 0.62, set.width(amountText, figure));
     const left = stack(said(base * 1.9, room - figureWidth - base * 3));
-    const right = stack(set.lines(amountText, figure, { x: room - figureWidth, width: figureWidth, align: "right" }));
+    const right = stack(
+      set.lines(amountText, figure, { x: room - figureWidth, width: figureWidth, align: "right" }),
+    );
     const height = Math.max(left.height, right.height);
     const centred = (block: Block) => stack([space((height - block.height) / 2), block]);
     return overlay(centred(left), centred(right));
@@ -209,7 +221,10 @@ function sheetTable({ doc, set, width, base, plain, label }: Desk): Table {
   const columns = figures
     .toReversed()
     .map(({ title, of, most }) => {
-      const widest = Math.max(set.width(title, label), ...doc.lines.map((line) => set.width(of(line), plain)));
+      const widest = Math.max(
+        set.width(title, label),
+        ...doc.lines.map((line) => set.width(of(line), plain)),
+      );
       const columnWidth = Math.min(widest, most * width);
       const x = right - columnWidth;
       right = x - gap;
@@ -243,12 +258,15 @@ function sums({ doc, set, width, base, plain, strong, label, isRoll }: Desk): Gr
       ? { parts }
       : { gap: base * 1.1, parts: [...set.lines("Paid before", label, { x: 0, width }), ...parts] };
   });
-  const now = present([words[doc.title].now, payment.label.toLowerCase(), payment.methodLabel.toLowerCase()]);
-  const balance = { size: base * (isRoll ? 1.35 : 1.6), bold: true };
+  const how = present([payment.label, payment.methodLabel]).join(", ");
+  const now = present([words[doc.title].now, how]).join(": ");
+  const balanceSizes = (isRoll ? [1.35, 1.15, 1] : [1.6, 1.3, 1]).map((times) => times * base);
+  const size = fittingSize(set, `${doc.balanceLabel} ${doc.balanceText}`, true, balanceSizes, width - base);
+  const balance = { size, bold: true };
   const end: Group = {
-    gap: before.length > 0 ? 0 : base * 0.5,
+    gap: base * 0.5,
     parts: [
-      ...pair(set, [now.join(", "), plain], [payment.amountText, plain], width),
+      ...pair(set, [now, plain], [payment.amountText, plain], width),
       ...pair(set, ["Received in all", strong], [doc.receivedText, strong], width),
       space(base * 0.4),
       rule(0, width, 0.9),
@@ -264,21 +282,17 @@ function sums({ doc, set, width, base, plain, strong, label, isRoll }: Desk): Gr
 }
 
 function closing({ doc, set, width, base, isRoll, plain, label }: Desk): Group[] {
-  const thanks = present([doc.thanks ?? ""]).map(
-    (text): Group => ({
-      gap: base * 1.3,
-      parts: set.lines(text, { size: base * 1.1, bold: true }, { x: 0, width }),
-    }),
-  );
-  const cautions = present(doc.cautions).map(
-    (text, i): Group => ({
-      gap: base * (i > 0 ? 0.25 : 1.2),
-      parts: [
-        ...(i > 0 ? [] : set.lines("Take care", label, { x: 0, width })),
-        ...notched(set, text, { size: plain.size * 0.92 }, width),
-      ],
-    }),
-  );
+  const thanks = present([doc.thanks ?? ""]).map((text): Group => ({
+    gap: base * 1.3,
+    parts: set.lines(text, { size: base * 1.1, bold: true }, { x: 0, width }),
+  }));
+  const cautions = present(doc.cautions).map((text, i): Group => ({
+    gap: base * (i > 0 ? 0.25 : 1.2),
+    parts: [
+      ...(i > 0 ? [] : set.lines("Take care", label, { x: 0, width })),
+      ...notched(set, text, { size: plain.size * 0.92 }, width),
+    ],
+  }));
   const edge: Group[] = isRoll ? [{ gap: base * 1.2, parts: [tape(width, doc.tape ?? "cm")] }] : [];
   return [...thanks, ...cautions, ...edge];
 }
@@ -287,12 +301,7 @@ function furniture({ doc, set, width, base, plain, strong }: Desk): Furniture {
   return {
     head: () =>
       stack([
-        ...pair(
-          set,
-          [`${doc.title} ${doc.number}, continued`, strong],
-          [doc.seller.name, plain],
-          width,
-        ),
+        ...pair(set, [`${doc.title} ${doc.number}, continued`, strong], [doc.seller.name, plain], width),
         space(base * 0.4),
         rule(0, width, 0.9),
         space(base),

@@ -1,5 +1,14 @@
 /** The signs of the house on paper: the notch and the tape. */
-import { BLACK, type Block, type Colour, type Item, moved, type PathStep, shape, strokeLine } from "@/lib/pdf/blocks";
+import {
+  BLACK,
+  type Block,
+  type Colour,
+  type Item,
+  moved,
+  type PathStep,
+  shape,
+  strokeLine,
+} from "@/lib/pdf/blocks";
 import { MM } from "@/lib/pdf/papers";
 
 export type TapeUnit = "inch" | "cm";

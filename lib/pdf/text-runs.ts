@@ -79,5 +79,7 @@ export function splitRuns(line: string, covers: Covers): Run[] {
     if (gap.kind === "text" && BLANK.test(gap.text) && before.kind === "picture" && after.kind === "picture")
       runs.splice(i - 1, 3, { kind: "picture", text: before.text + gap.text + after.text });
   }
-  return runs.map((run) => (run.kind === "text" ? { ...run, text: run.text.replace(/[\u00a0\u202f]/g, " ") } : run));
+  return runs.map((run) =>
+    run.kind === "text" ? { ...run, text: run.text.replace(/[\u00a0\u202f]/g, " ") } : run,
+  );
 }

@@ -43,7 +43,8 @@ function breakable(text: string): string[] {
       if (!NO_SPACES.test(piece)) return [piece];
       const parts: string[] = [];
       for (const { segment } of words.segment(piece)) {
-        if (parts.length > 0 && (CLOSING.test(segment) || parts.at(-1)!.trim() === "")) parts[parts.length - 1] += segment;
+        if (parts.length > 0 && (CLOSING.test(segment) || parts.at(-1)!.trim() === ""))
+          parts[parts.length - 1] += segment;
         else parts.push(segment);
       }
       return parts;

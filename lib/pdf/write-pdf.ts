@@ -46,7 +46,8 @@ function startPdf(first: ComposedPage, facts: PdfFacts, { fonts, stamp }: PrintT
   pdf.viewerPreferences({ DisplayDocTitle: true, PrintScaling: "None" });
   // jsPDF's own setLanguage drops languages that are not on its list.
   const internal = pdf.internal as unknown as Internals;
-  if (/^[A-Za-z0-9-]+$/.test(lang)) internal.events.subscribe("putCatalog", () => internal.write(`/Lang (${lang})`));
+  if (/^[A-Za-z0-9-]+$/.test(lang))
+    internal.events.subscribe("putCatalog", () => internal.write(`/Lang (${lang})`));
   if (stamp) pdf.setCreationDate(stamp.createdAt).setFileId(stamp.fileId);
   return pdf;
 }

@@ -10,12 +10,14 @@ import { strictStore } from "@/lib/journal/strict-store";
 import { type TableName } from "@/lib/records/types";
 import { CALLS_CHANNEL, type DatabaseState, JOURNAL_NAME, type News, openNews } from "./channels";
 import { type DatabaseApi } from "./database-api";
-import { keepProblem } from "./keep-problem";
+import { keepProblem, storageProblem } from "./keep-problem";
 import { Pending } from "./pending";
 
 /** A leader that closes takes its answers with it: ask again after this. Reads have no effect, so may be. */
 const ANSWER_WITHIN_MS = 8000;
 const TRIES = 4;
+/** PGlite on spoilt files may hang without an error. Doubled each time, for the sake of very slow phones. */
+const OPENED_WITHIN_MS = 30_000;
 
 export type BookState =
   | { phase: "reading-journal" }
@@ -34,7 +36,9 @@ export class Book {
   /** The device's state as it was when the book was opened; rejects where storage is refused. */
   readonly opened: Promise<Head>;
   private worker: Worker | undefined;
-  private readyWaiters: (() => void)[] = [];
+  private openingTimer: ReturnType<typeof setTimeout> | undefined;
+  private openedWithin = OPENED_WITHIN_MS;
+  private waiters: { ready: () => void; failed: (why: Error) => void }[] = [];
 
   constructor(private readonly startWorker: () => Worker) {
     this.journal = openJournal(strictStore(JOURNAL_NAME, "journal"));
@@ -130,14 +134,20 @@ export class Book {
       });
       const answer = await Promise.race([call(), late]).finally(() => clearTimeout(timer));
       if (answer !== "late") return answer;
-      if (tried >= TRIES) throw new Error("The database does not answer.");
+      if (tried >= TRIES) {
+        void this.leaveStuckDatabase();
+        throw new Error("The database does not answer.");
+      }
       this.news.tell({ kind: "state-wanted" });
     }
   }
 
+  /** Rejects where the database failed; the screens then say so instead of waiting for ever. */
   private ready(): Promise<void> {
-    if (this.current.phase === "open" && this.current.database.phase === "ready") return Promise.resolve();
-    return new Promise((resolve) => this.readyWaiters.push(resolve));
+    const database = this.current.phase === "open" ? this.current.database : null;
+    if (database?.phase === "ready") return Promise.resolve();
+    if (database?.phase === "failed") return Promise.reject(new Error(database.say));
+    return new Promise((ready, failed) => this.waiters.push({ ready, failed }));
   }
 
   private async open(): Promise<void> {
@@ -146,16 +156,39 @@ export class Book {
       this.pending.add(await this.journal.since(head.confirmed));
       this.become({ phase: "open", head, database: { phase: "waiting" } });
     } catch (error) {
-      this.become({ phase: "no-storage", say: keepProblem(error).message });
+      this.become({ phase: "no-storage", say: storageProblem(error) });
       return;
     }
     this.news.tell({ kind: "state-wanted" });
+    this.beginWorker();
+  }
+
+  private beginWorker(): void {
+    this.worker?.terminate();
     this.worker = this.startWorker();
     this.worker.onerror = (event) =>
       this.setDatabase({
         phase: "failed",
         say: event.message || "The database's program could not be loaded.",
       });
+  }
+
+  /** Ends the thread that hangs, in whichever tab it is; the next one makes the database anew from the journal. */
+  private async leaveStuckDatabase(): Promise<void> {
+    if (this.current.phase !== "open") return;
+    const head = await this.journal.leaveDatabase(this.current.head.generation);
+    this.become({ ...this.current, head, database: { phase: "waiting" } });
+    this.news.tell({ kind: "database-stuck" });
+    this.beginWorker();
+  }
+
+  private watchOpening(database: DatabaseState): void {
+    clearTimeout(this.openingTimer);
+    if (database.phase !== "opening") return;
+    this.openingTimer = setTimeout(() => {
+      this.openedWithin *= 2;
+      void this.leaveStuckDatabase().catch(() => undefined);
+    }, this.openedWithin);
   }
 
   private show(change: Change): Change {
@@ -179,6 +212,10 @@ export class Book {
     if (item.kind === "journal-grew") void this.catchUpWithOthers().catch(() => undefined);
     if (item.kind === "state") this.setDatabase(item.state);
     if (item.kind === "rows-changed") this.tellRowsChanged(item.applied);
+    if (item.kind === "database-stuck") {
+      void this.refreshHead();
+      this.beginWorker();
+    }
     // A whole new page: nothing of the book that was cleared may stay in memory.
     if (item.kind === "book-changed") location.reload();
   }
@@ -186,8 +223,11 @@ export class Book {
   private setDatabase(database: DatabaseState): void {
     if (this.current.phase !== "open") return;
     this.become({ ...this.current, database });
+    this.watchOpening(database);
+    if (database.phase === "failed")
+      for (const { failed } of this.waiters.splice(0)) failed(new Error(database.say));
     if (database.phase !== "ready") return;
-    for (const resolve of this.readyWaiters.splice(0)) resolve();
+    for (const { ready } of this.waiters.splice(0)) ready();
     this.tellRowsChanged(database.applied);
   }
 

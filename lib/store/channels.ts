@@ -5,7 +5,8 @@ export const CALLS_CHANNEL = "notchbook-calls";
 export const NEWS_CHANNEL = "notchbook-news";
 export const JOURNAL_NAME = "notchbook-journal";
 export const DRAFTS_NAME = "notchbook-drafts";
-export const databaseName = (book: string): string => `notchbook-${book}`;
+export const databaseName = ({ book, generation }: { book: string; generation: number }): string =>
+  `notchbook-${book}-${generation}`;
 
 /** Where the browser's database stands, as told to every tab. */
 export type DatabaseState =
@@ -23,6 +24,8 @@ export type News =
   | { kind: "state-wanted" }
   /** Rows of the database changed; it has now followed the journal to `applied`. */
   | { kind: "rows-changed"; applied: number }
+  /** The leading worker does not answer any more: every tab ends its own and starts another. */
+  | { kind: "database-stuck" }
   /** Everything was cleared, or another book was read in: every tab begins again. */
   | { kind: "book-changed" };
 

@@ -33,3 +33,13 @@ export function keepProblem(error: unknown): KeepProblem {
     error,
   );
 }
+
+/** Why the browser gives no storage at all, in words. */
+export function storageProblem(error: unknown): string {
+  const name = error instanceof DOMException || error instanceof Error ? error.name : "";
+  if (name === "QuotaExceededError")
+    return "The phone has no room left. Delete photos or apps that you do not need, then try again.";
+  if (name === "InvalidStateError" || name === "SecurityError" || name === "NotAllowedError")
+    return "A private window keeps nothing: open Notchbook in an ordinary one. If this is one, allow this site in the browser’s settings to keep data, then try again.";
+  return "The phone’s storage does not answer. Close other windows of the browser or restart the phone, then try again.";
+}

@@ -1,6 +1,7 @@
 /** What the bin shows of a thing, and what comes back with it. */
 import { setRemoved, type Write } from "@/lib/journal/change";
 import { wentWithClient } from "@/lib/clients/bin-question";
+import { orderName } from "@/lib/orders/order-name";
 import { type BinItem } from "@/lib/store/queries/bin";
 
 const kinds = { clients: "Client", wearers: "Wearer", orders: "Order", sleeves: "Sleeve" } as const;
@@ -13,7 +14,7 @@ export interface BinWords {
 export function binWords(item: BinItem): BinWords {
   const kind = kinds[item.table];
   if (item.table !== "orders") return { kind, name: item.row.name || `${kind} without a name` };
-  return { kind, name: item.row.occasion || "No occasion" };
+  return { kind, name: orderName(item.row) };
 }
 
 const parentOf = (item: BinItem): string | null =>

@@ -16,7 +16,7 @@ export function roomWords(usage: number | undefined, quota: number | undefined):
 }
 
 /** Less than this is worth saying: a few photos of another app fill it. */
-export const LITTLE_ROOM = 50_000_000;
+const LITTLE_ROOM = 50_000_000;
 
 export function isRoomShort(usage: number | undefined, quota: number | undefined): boolean {
   return usage !== undefined && quota !== undefined && quota > 0 && quota - usage < LITTLE_ROOM;

@@ -24,12 +24,12 @@ async function namesInList(page: Page, url: string): Promise<string[]> {
   await untilDatabaseOpen(page);
   const more = page.getByRole("button", { name: "Show more" });
   await page
-    .getByRole("link", { name: /^Kept / })
+    .getByRole("link", { name: /^Kept \d/ })
     .first()
     .waitFor({ timeout: 20_000 })
     .catch(() => undefined);
   while (await more.isVisible()) await more.click();
-  const names = await page.getByRole("link", { name: /^Kept / }).allInnerTexts();
+  const names = await page.getByRole("link", { name: /^Kept \d/ }).allInnerTexts();
   return names.map((text) => text.split("\n")[0]!.trim());
 }
 

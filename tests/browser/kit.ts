@@ -92,9 +92,12 @@ export async function untilReadyWithoutALine(page: Page): Promise<void> {
   );
 }
 
-/** Waits until the phone's database has opened and followed the journal. */
+/** Waits until the phone's database has opened and followed the journal: the line at the head of the screen says so. */
 export async function untilDatabaseOpen(page: Page): Promise<void> {
-  await page.locator('[data-database="ready"]').first().waitFor({ state: "attached", timeout: 60_000 });
+  const line = page.locator(".kept-line");
+  await expect(line).toHaveText(/^Kept on this phone · (?!opening|reading|the book does not)/, {
+    timeout: 60_000,
+  });
 }
 
 /** A browser with a profile on the disk, to be killed and started again. */

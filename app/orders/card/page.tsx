@@ -1,5 +1,14 @@
-import { Screen } from "@/components/ui/screen";
+import { type Metadata } from "next";
+import { Suspense } from "react";
+import { ScreenOpening } from "@/components/clients/not-shown";
+import { OrderCardScreen } from "@/components/orders/order-card-screen";
+
+export const metadata: Metadata = { title: "Order" };
 
 export default function Page() {
-  return <Screen title="orders card">{null}</Screen>;
+  return (
+    <Suspense fallback={<ScreenOpening title="Order" />}>
+      <OrderCardScreen />
+    </Suspense>
+  );
 }

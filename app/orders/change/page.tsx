@@ -1,5 +1,14 @@
-import { Screen } from "@/components/ui/screen";
+import { type Metadata } from "next";
+import { Suspense } from "react";
+import { ScreenOpening } from "@/components/clients/not-shown";
+import { ChangeOrderScreen } from "@/components/orders/change-order-screen";
+
+export const metadata: Metadata = { title: "Change the order" };
 
 export default function Page() {
-  return <Screen title="orders change">{null}</Screen>;
+  return (
+    <Suspense fallback={<ScreenOpening title="Change the order" />}>
+      <ChangeOrderScreen />
+    </Suspense>
+  );
 }

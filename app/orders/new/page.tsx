@@ -1,5 +1,14 @@
-import { Screen } from "@/components/ui/screen";
+import { type Metadata } from "next";
+import { Suspense } from "react";
+import { ScreenOpening } from "@/components/clients/not-shown";
+import { NewOrderScreen } from "@/components/orders/new-order-screen";
+
+export const metadata: Metadata = { title: "New order" };
 
 export default function Page() {
-  return <Screen title="orders new">{null}</Screen>;
+  return (
+    <Suspense fallback={<ScreenOpening title="New order" />}>
+      <NewOrderScreen />
+    </Suspense>
+  );
 }

@@ -1,5 +1,14 @@
-import { Screen } from "@/components/ui/screen";
+import { type Metadata } from "next";
+import { Suspense } from "react";
+import { ScreenOpening } from "@/components/clients/not-shown";
+import { ReceiptScreen } from "@/components/money/receipt-screen";
+
+export const metadata: Metadata = { title: "Receipt" };
 
 export default function Page() {
-  return <Screen title="orders receipt">{null}</Screen>;
+  return (
+    <Suspense fallback={<ScreenOpening title="Receipt" />}>
+      <ReceiptScreen />
+    </Suspense>
+  );
 }

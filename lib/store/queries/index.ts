@@ -2,7 +2,7 @@
 import { type Query } from "../query";
 import { binQuery } from "./bin";
 import { clientCardQuery, clientListQuery } from "./clients";
-import { orderCardQuery, orderListQuery, receiptQuery } from "./orders";
+import { orderCardQuery, orderListQuery, orderPeopleQuery, receiptQuery } from "./orders";
 import { sleeveListQuery, sleevesQuery } from "./sleeves";
 import { todayQuery } from "./today";
 import { setCardQuery, wearerCardQuery } from "./wearers";
@@ -20,6 +20,7 @@ const queries: Query<any, any>[] = [
   sleevesQuery,
   orderListQuery,
   orderCardQuery,
+  orderPeopleQuery,
   receiptQuery,
   binQuery,
 ];

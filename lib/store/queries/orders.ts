@@ -10,6 +10,7 @@ import {
   type Wearer,
 } from "@/lib/records/types";
 import { byKey, findRow, idsIn, liveRowsOf, newestFirst, type Query, type RowSource, rowsOf } from "../query";
+import { standingSets, type WearerSummary } from "./clients";
 import { moneyOf, type OrderWithMoney } from "./order-money";
 
 export interface OrderListItem extends OrderWithMoney {
@@ -170,5 +171,60 @@ export const receiptQuery: Query<{ id: string }, ReceiptView | null> = {
     if (!receipt) return null;
     const order = findRow(rows, "orders", receipt.orderId);
     return { receipt, order, client: findRow(rows, "clients", order?.clientId ?? null) };
+  },
+};
+
+export interface WearerChoice extends WearerSummary {
+  /** Sets to work by, newest first. */
+  sets: MeasurementSet[];
+}
+
+export interface OrderPeopleView {
+  client: Client;
+  wearers: WearerChoice[];
+  /** Sleeves of nobody yet, among the last drafted. */
+  bareSleeves: Sleeve[];
+}
+
+const LAST_SLEEVES = 50;
+
+/** Whom and what an order of a client can be made of; null where there is no such client. */
+export const orderPeopleQuery: Query<{ clientId: string }, OrderPeopleView | null> = {
+  name: "orderPeople",
+  need: async (source, { clientId }) => {
+    const [clients, wearers, newest] = await Promise.all([
+      source.byIds("clients", [clientId]),
+      source.byParents("wearers", "clientId", [clientId]),
+      source.newest("sleeves", LAST_SLEEVES),
+    ]);
+    const ids = wearers.map((row) => row.id);
+    const [measurementSets, own] = await Promise.all([
+      source.byParents("measurementSets", "wearerId", ids),
+      source.byParents("sleeves", "wearerId", ids),
+    ]);
+    const sleeves = new Map([...newest, ...own].map((row) => [row.id, row]));
+    return { clients, wearers, measurementSets, sleeves: [...sleeves.values()] };
+  },
+  view: (rows, { clientId }) => {
+    const client = findRow(rows, "clients", clientId);
+    if (!client) return null;
+    const setsOf = groupBy(rowsOf(rows, "measurementSets"), (set) => set.wearerId);
+    const sleeves = liveRowsOf(rows, "sleeves").sort(newestFirst);
+    return {
+      client,
+      wearers: liveRowsOf(rows, "wearers")
+        .filter((wearer) => wearer.clientId === clientId)
+        .sort(byKey((wearer) => wearer.id))
+        .map((wearer) => {
+          const sets = standingSets(setsOf.get(wearer.id) ?? []);
+          return {
+            wearer,
+            sets,
+            latestSet: sets[0] ?? null,
+            sleeves: sleeves.filter((sleeve) => sleeve.wearerId === wearer.id),
+          };
+        }),
+      bareSleeves: sleeves.slice(0, LAST_SLEEVES).filter((sleeve) => sleeve.wearerId === null),
+    };
   },
 };

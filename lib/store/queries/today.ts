@@ -1,5 +1,14 @@
-import { type Garment, type Order } from "@/lib/records/types";
-import { byKey, compareText, liveRowsOf, type Query } from "../query";
+import {
+  type Client,
+  type Garment,
+  type MeasurementSet,
+  type Order,
+  type Sleeve,
+  type TableName,
+  type RowOf,
+} from "@/lib/records/types";
+import { type Rows } from "@/lib/journal/merge";
+import { byKey, compareText, liveRowsOf, newestFirst, type Query } from "../query";
 import { dueKey, orderItems, type OrderListItem, withOrderParts } from "./orders";
 
 export interface FittingItem extends OrderListItem {
@@ -19,6 +28,8 @@ export interface TodayView {
   laterCount: number;
   /** False where there is not one order in the book. */
   anyOrder: boolean;
+  /** The last made of each, or null: how far a new book has come. */
+  newest: { client: Client | null; set: MeasurementSet | null; sleeve: Sleeve | null };
 }
 
 /** How many orders Today looks at; a home workshop has a few dozen open. */
@@ -34,13 +45,23 @@ export function addDays(on: string, days: number): string {
 export const todayQuery: Query<{ on: string }, TodayView> = {
   name: "today",
   need: async (source) => {
-    const [open, owing, newest] = await Promise.all([
+    const [open, owing, newest, clients, measurementSets, sleeves] = await Promise.all([
       source.ordersOpen(LIMIT),
       source.ordersOwing(LIMIT),
       source.newest("orders", 1),
+      source.newest("clients", 1),
+      source.newest("measurementSets", 1),
+      source.newest("sleeves", 1),
     ]);
     const orders = new Map([...open, ...owing, ...newest].map((row) => [row.id, row]));
-    return withOrderParts(source, [...orders.values()]);
+    const parts = await withOrderParts(source, [...orders.values()]);
+    const known = new Set((parts.clients ?? []).map((row) => row.id));
+    return {
+      ...parts,
+      clients: [...(parts.clients ?? []), ...clients.filter((row) => !known.has(row.id))],
+      measurementSets,
+      sleeves,
+    };
   },
   view: (rows, { on }) => {
     const live = liveRowsOf(rows, "orders");
@@ -74,6 +95,24 @@ export const todayQuery: Query<{ on: string }, TodayView> = {
       owed,
       laterCount: items.length - late.length - due.length,
       anyOrder: live.length > 0,
+      newest: {
+        client: newestOf(rows, "clients"),
+        set: newestOf(rows, "measurementSets"),
+        sleeve: newestOf(rows, "sleeves"),
+      },
     };
   },
 };
+
+/** Today as a query that does not name the day: what was fetched on another day shows at once on this one. */
+export function todayOn(on: string): Query<Record<string, never>, TodayView> {
+  return {
+    name: todayQuery.name,
+    need: (source) => todayQuery.need(source, { on }),
+    view: (rows) => todayQuery.view(rows, { on }),
+  };
+}
+
+function newestOf<T extends TableName>(rows: Rows, table: T): RowOf<T> | null {
+  return liveRowsOf(rows, table).sort(newestFirst)[0] ?? null;
+}

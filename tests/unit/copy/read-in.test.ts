@@ -106,7 +106,6 @@ describe("reading in", () => {
     const rest = planReading(again, { workshopId: WORKSHOP, rows: await there.rows() });
     expect(rest.kind).toBe("same");
     expect(rest.counts.same).toBe(500);
-    const after = freshBook();
     const book: BookToFill = {
       ...there.book,
       keepRows: async (piece) => void (await there.journal.appendRows(piece, WORKSHOP)),
@@ -115,7 +114,6 @@ describe("reading in", () => {
     expect(tables(await there.rows())).toEqual(tables(rows));
     expect((await there.journal.head()).lastCopy?.at).toBe(madeAt);
     expect(await unfinishedReading()).toBeNull();
-    expect((await after.journal.head()).next).toBe(1);
   });
 
   it("merged in, leaves the book's own last copy as it is, and what is being typed now", async () => {

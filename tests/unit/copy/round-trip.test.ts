@@ -29,7 +29,7 @@ let db: BookDatabase;
 let client: PGlite;
 beforeAll(async () => {
   ({ db, client } = await freshDatabase());
-});
+}, 60_000);
 afterAll(() => client.close());
 
 /** The book's two sides as the worker and the journal give them. */

@@ -88,6 +88,13 @@ describe("the journal", () => {
     expect(after.book).not.toBe(before.book);
   });
 
+  it("leaves a spoilt database behind once, however many tabs say that it hangs", async () => {
+    const { journal } = fresh();
+    const { generation } = await journal.head();
+    const heads = await Promise.all([journal.leaveDatabase(generation), journal.leaveDatabase(generation)]);
+    expect(heads.map((head) => head.generation)).toEqual([generation + 1, generation + 1]);
+  });
+
   it("gives the last confirmed change only forwards", async () => {
     const { journal } = fresh();
     await journal.append(() => [client("Ada")]);

@@ -94,6 +94,7 @@ describe("the line of what is kept", () => {
     nextReceipt: 1,
     clock: { ms: 0, counter: 0 },
     confirmed: 0,
+    generation: 1,
     lastCopy,
   });
   const tuesday = new Date(2026, 2, 10, 9, 0).toISOString();
@@ -172,7 +173,12 @@ describe("the bin", () => {
   };
   const earlier: BinItem = {
     table: "orders",
-    row: { ...rowHead("p", "2026-01-01T10:00:00.000Z"), clientId: "c", occasion: "" } as unknown as Order,
+    row: {
+      ...rowHead("p", "2026-01-01T10:00:00.000Z"),
+      clientId: "c",
+      occasion: "",
+      agreedOn: "2025-12-24",
+    } as unknown as Order,
   };
 
   it("brings a thing back alone where what it stands in is there", () => {
@@ -185,7 +191,7 @@ describe("the bin", () => {
     expect(comesBack(client, [client, along, earlier])).toEqual([client, along]);
     expect(alongWords(comesBack(along, [along, client]), along)).toBe("With it comes client Ana.");
     expect(alongWords([sleeve], sleeve)).toBe("");
-    expect(binWords(earlier)).toEqual({ kind: "Order", name: "No occasion" });
+    expect(binWords(earlier)).toEqual({ kind: "Order", name: "Order of 24 Dec 2025" });
     expect(bringBack([client, along])).toMatchObject([
       { table: "clients", id: "c", makes: false, fields: { removedAt: null } },
       { table: "orders", id: "o", makes: false, fields: { removedAt: null } },

@@ -1,0 +1,24 @@
+import { formatDay } from "@/lib/people/format-day";
+import { daysBetween, type IsoDate } from "@/lib/people/iso-date";
+import { type Order } from "@/lib/records/types";
+
+export interface DayWords {
+  say: string;
+  late: boolean;
+}
+
+/** When an order is due: "2 days late", "due Friday", "due 14 Mar", "No day yet"; null once it is handed over. */
+export function dueWords({ dueOn, stage }: Pick<Order, "dueOn" | "stage">, today: IsoDate): DayWords | null {
+  if (stage === "handed-over") return null;
+  if (dueOn === null) return { say: "No day yet", late: false };
+  const days = daysBetween(dueOn, today);
+  if (days > 0) return { say: `${days} ${days === 1 ? "day" : "days"} late`, late: true };
+  return { say: `due ${formatDay(dueOn, { style: "relative", today })}`, late: false };
+}
+
+/** When a fitting is: "fitting tomorrow", "fitting was 3 days ago". */
+export function fittingWords(fittingOn: IsoDate, today: IsoDate): DayWords {
+  const days = daysBetween(fittingOn, today);
+  if (days <= 0) return { say: `fitting ${formatDay(fittingOn, { style: "relative", today })}`, late: false };
+  return { say: days === 1 ? "fitting was yesterday" : `fitting was ${days} days ago`, late: true };
+}
