@@ -2,6 +2,7 @@ import "./globals.css";
 import { type Metadata, type Viewport } from "next";
 import { type ReactNode } from "react";
 import { AppFrame } from "@/components/frame/app-frame";
+import { earlyScript } from "@/lib/workshop/theme";
 
 export const metadata: Metadata = {
   title: { default: "Notchbook", template: "%s · Notchbook" },
@@ -25,6 +26,10 @@ export const viewport: Viewport = {
 export default function RootLayout({ children }: { children: ReactNode }) {
   return (
     <html lang="en" suppressHydrationWarning>
+      <head>
+        {/* Before the first paint: the chosen theme, and the browser's offer to install, which comes once and early. */}
+        <script dangerouslySetInnerHTML={{ __html: earlyScript }} />
+      </head>
       <body>
         <AppFrame>{children}</AppFrame>
       </body>

@@ -19,7 +19,7 @@ import { newId } from "@/lib/journal/change";
 import { type Currency, currency as currencyOf } from "@/lib/money/currencies";
 import { decideTaking } from "@/lib/money/decide-payment";
 import { orderSums } from "@/lib/money/order-sums";
-import { withWearer } from "@/lib/orders/garment-choices";
+import { withTodaysSets, withWearer } from "@/lib/orders/garment-choices";
 import { receiptCautions } from "@/lib/orders/order-cautions";
 import { emptyOrder, type OrderValues, orderSchema, readAmount, readOrderDraft } from "@/lib/orders/order-form";
 import { newOrderWrites } from "@/lib/orders/order-writes";
@@ -106,7 +106,9 @@ function NewOrderForm(props: NewOrderFormProps) {
   const { view: already } = useView(orderCardQuery, { id: initial.orderId });
   const form = useForm<OrderValues>({
     resolver: useMemo(() => zodResolver(orderSchema(currency)), [currency]),
-    defaultValues: found ?? initial,
+    defaultValues: found
+      ? { ...found, garments: withTodaysSets(found.garments, people, today) }
+      : initial,
     mode: "onTouched",
   });
   const draft = useFormDraft(form, draftKey, initial, handle as DraftHandle<OrderValues>);

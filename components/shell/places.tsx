@@ -78,9 +78,10 @@ export const places: readonly Place[] = [
   },
 ];
 
-/** The place a path belongs to: the one it is, or lies below; wearers and measuring belong to the clients. */
+/** The place a path belongs to: the one it is, or lies below; wearers and measuring belong to the clients, the bin to the workshop. */
 export const placeOf = (path: string): string => {
   if (/^\/(measure|wearers)(\/|$)/.test(path)) return "/clients";
+  if (path === "/bin") return "/settings";
   const below = places.find(({ href }) => href !== "/" && (path === href || path.startsWith(`${href}/`)));
   return below?.href ?? (path === "/" ? "/" : "");
 };

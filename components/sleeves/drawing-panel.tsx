@@ -6,7 +6,13 @@ import { type MadeSleeve, makeSleeve } from "@/lib/drafting";
 import { type Fineness, type Unit } from "@/lib/records/types";
 import { steadyBox } from "@/lib/sleeves/drawing-paths";
 import { fitView, type Size, toScreen, type View } from "@/lib/sleeves/drawing-view";
-import { draggedFigure, type HandleName, handleNames, handlePoint } from "@/lib/sleeves/handles";
+import {
+  draggedFigure,
+  type HandleName,
+  handleNames,
+  handlePoint,
+  nearestHandle,
+} from "@/lib/sleeves/handles";
 import { type FigureKey } from "@/lib/sleeves/sleeve-figures";
 import { Tape } from "@/components/ui/tape";
 import { LookClosely } from "./look-closely";
@@ -147,11 +153,13 @@ interface HandlesProps {
 
 /** For a finger; the same figures have keys beside their fields, for everyone. */
 function Handles({ drag, made, onMove, onTake, view }: HandlesProps) {
-  const down = (name: HandleName) => (event: PointerEvent) => {
-    if (drag || event.button !== 0) return;
+  const down = (event: PointerEvent<HTMLDivElement>) => {
+    const paper = event.currentTarget.parentElement?.getBoundingClientRect();
+    if (drag || event.button !== 0 || !paper) return;
     event.currentTarget.setPointerCapture(event.pointerId);
     const from = { x: event.clientX, y: event.clientY };
-    onTake({ name, pointer: event.pointerId, from, made, view });
+    const at = { x: from.x - paper.left, y: from.y - paper.top };
+    onTake({ name: nearestHandle(at, made.draft, view), pointer: event.pointerId, from, made, view });
   };
   const move = (event: PointerEvent) => {
     if (drag?.pointer === event.pointerId) onMove(drag, { x: event.clientX, y: event.clientY });
@@ -169,7 +177,7 @@ function Handles({ drag, made, onMove, onTake, view }: HandlesProps) {
         data-handle={name}
         data-held={drag?.name === name || undefined}
         style={{ left: x, top: y }}
-        onPointerDown={down(name)}
+        onPointerDown={down}
         onPointerMove={move}
         onPointerUp={end}
         onPointerCancel={end}

@@ -1,9 +1,8 @@
 "use client";
 
-import { zodResolver } from "@hookform/resolvers/zod";
 import { useRouter } from "next/navigation";
 import { useMemo, useState } from "react";
-import { useForm } from "react-hook-form";
+import { type Resolver, useForm } from "react-hook-form";
 import { KeepTrouble } from "@/components/clients/form-notices";
 import { useFormDraft } from "@/components/clients/use-form-draft";
 import { useKeep } from "@/components/store/use-book";
@@ -17,7 +16,8 @@ import { currencies } from "@/lib/money/currencies";
 import { todayIso } from "@/lib/people/today";
 import { countryName } from "@/lib/workshop/home-country";
 import { askToStay } from "@/lib/workshop/storage";
-import { beginFields, startSchema, type StartValues } from "@/lib/workshop/workshop-form";
+import { beginFields } from "@/lib/workshop/begin-fields";
+import { type StartValues } from "@/lib/workshop/workshop-form";
 import { GettingReady } from "./getting-ready";
 
 export const START_DRAFT = "workshop:start";
@@ -26,6 +26,15 @@ const units = [
   { value: "in", label: "Inches" },
   { value: "cm", label: "Centimetres" },
 ] as const;
+
+/** Fetched at the first check, so that the first screen of all stays light on the line. */
+const checkStart: Resolver<StartValues> = async (...form) => {
+  const [{ zodResolver }, { startSchema }] = await Promise.all([
+    import("@hookform/resolvers/zod"),
+    import("@/lib/workshop/workshop-form"),
+  ]);
+  return zodResolver(startSchema)(...form);
+};
 
 export function StartForm({
   workshopId,
@@ -44,7 +53,7 @@ export function StartForm({
   const [first] = useState(initial);
   const money = useMemo(() => currencies(), []);
   const form = useForm<StartValues>({
-    resolver: zodResolver(startSchema),
+    resolver: checkStart,
     defaultValues: { ...first, ...handle.draft },
     mode: "onTouched",
   });

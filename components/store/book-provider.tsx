@@ -3,10 +3,11 @@
 import { QueryClient } from "@tanstack/react-query";
 import { PersistQueryClientProvider } from "@tanstack/react-query-persist-client";
 import { createAsyncStoragePersister } from "@tanstack/query-async-storage-persister";
-import { createStore, del, get, set } from "idb-keyval";
+import { del, get, set } from "idb-keyval";
 import { type ReactNode, useEffect, useState } from "react";
 import { SCHEMA_NUMBER } from "@/lib/journal/change";
 import { openBook } from "@/lib/store/book";
+import { screensStore } from "@/lib/store/screens-store";
 
 /** How many of the last looked-at screens are at hand before the database has opened. */
 const SCREENS_KEPT = 80;
@@ -28,13 +29,12 @@ function makeClient(): QueryClient {
 
 /** Keeps the screens' rows under the name of the book that they are of: another book never sees them. */
 function makePersister() {
-  const store = createStore("notchbook-screens", "screens");
   const keyOf = async (key: string) => `${key}/${(await openBook().opened).book}`;
   return createAsyncStoragePersister({
     storage: {
-      getItem: async (key) => (await get<string>(await keyOf(key), store)) ?? null,
-      setItem: async (key, value) => set(await keyOf(key), value, store),
-      removeItem: async (key) => del(await keyOf(key), store),
+      getItem: async (key) => (await get<string>(await keyOf(key), screensStore)) ?? null,
+      setItem: async (key, value) => set(await keyOf(key), value, screensStore),
+      removeItem: async (key) => del(await keyOf(key), screensStore),
     },
     throttleTime: 500,
   });

@@ -16,5 +16,9 @@ function subscribe(changed: () => void): () => void {
 
 /** Today's day where she is. While the page is made on the server: the day of the build, until the phone says. */
 export function useToday(): IsoDate {
-  return useSyncExternalStore(subscribe, () => todayIso(), () => todayIso());
+  return useSyncExternalStore(
+    subscribe,
+    () => todayIso(),
+    () => todayIso(),
+  );
 }

@@ -1,4 +1,5 @@
 import { formatDay } from "@/lib/people/format-day";
+import { type IsoDate } from "@/lib/people/iso-date";
 import { type MeasurementSet, type Sleeve } from "@/lib/records/types";
 import { type OrderPeopleView, type WearerChoice } from "@/lib/store/queries/orders";
 import { type GarmentValues } from "./order-form";
@@ -44,4 +45,19 @@ export function sameForNext(
 /** What a price for a garment is called: "Dress, Ifẹ". */
 export function lineText({ kind }: Pick<GarmentValues, "kind">, wearerName: string | undefined): string {
   return [kind.trim(), wearerName ?? ""].filter((part) => part !== "").join(", ");
+}
+
+/**
+ * Garments as they come back after a wearer was measured meanwhile: where the last set was taken today, it is the one to
+ * work by.
+ */
+export function withTodaysSets(
+  garments: readonly GarmentValues[],
+  people: Pick<OrderPeopleView, "wearers">,
+  today: IsoDate,
+): GarmentValues[] {
+  return garments.map((garment) => {
+    const latest = people.wearers.find(({ wearer }) => wearer.id === garment.wearerId)?.latestSet;
+    return latest?.takenOn === today ? { ...garment, setId: latest.id } : garment;
+  });
 }

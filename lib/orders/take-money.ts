@@ -56,38 +56,40 @@ export function decideMoney(
     : decideTaking(sums, amountMinor, currency, locale);
 }
 
-/** The sheet's rules; each problem is a sentence that says what to type instead. */
-export function moneySchema({
-  sums,
-  currency,
-  today,
-  locale,
-}: {
+const shape = z.object({
+  paymentId: z.string(),
+  kind: z.enum(["deposit", "payment", "giving-back"]),
+  amount: z.string(),
+  method: z.enum(["cash", "transfer", "card"]),
+  paidOn: z.string(),
+  note: z.string(),
+});
+
+/** A sheet as it comes back off the phone; null where it cannot be read. */
+export function readMoneyDraft(value: unknown): MoneyValues | null {
+  const read = shape.safeParse(value);
+  return read.success ? (read.data satisfies MoneyValues) : null;
+}
+
+export interface MoneyRules {
   sums: OrderSums;
   currency: Currency;
   today: IsoDate;
   locale?: string;
-}) {
-  return z
-    .object({
-      paymentId: z.string(),
-      kind: z.enum(["deposit", "payment", "giving-back"]),
-      amount: z.string(),
-      method: z.enum(["cash", "transfer", "card"]),
-      paidOn: z.string(),
-      note: z.string(),
-    })
-    .superRefine(({ kind, amount, paidOn }, context) => {
-      const problem = (field: string, message: string) =>
-        context.addIssue({ code: "custom", path: [field], message });
-      const read = readAmount(amount, currency);
-      const decision = read.ok ? decideMoney(kind, sums, read.minor, currency, locale) : read;
-      if (!decision.ok) problem("amount", decision.say);
-      if (!z.iso.date().safeParse(paidOn).success)
-        problem("paidOn", "Choose the day on which the money changed hands.");
-      else if (paidOn > today)
-        problem("paidOn", "That day is still to come. Choose today or an earlier one.");
-    });
+}
+
+/** The sheet's rules; each problem is a sentence that says what to type instead. */
+export function moneySchema({ sums, currency, today, locale }: MoneyRules) {
+  return shape.superRefine(({ kind, amount, paidOn }, context) => {
+    const problem = (field: keyof MoneyValues, message: string) =>
+      context.addIssue({ code: "custom", path: [field], message });
+    const read = readAmount(amount, currency);
+    const decision = read.ok ? decideMoney(kind, sums, read.minor, currency, locale) : read;
+    if (!decision.ok) problem("amount", decision.say);
+    if (!z.iso.date().safeParse(paidOn).success)
+      problem("paidOn", "Choose the day on which the money changed hands.");
+    else if (paidOn > today) problem("paidOn", "That day is still to come. Choose today or an earlier one.");
+  });
 }
 
 export interface MoneyAsk extends Omit<SnapshotAsk, "payment"> {

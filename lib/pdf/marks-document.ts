@@ -1,4 +1,5 @@
 /** What a sheet of marks says: a pattern drawn by hand, step by step. Figures come as text in the workshop's unit. */
+import { type TapeUnit } from "@/lib/pdf/signs";
 import { type CubicBezier, type Point } from "@/lib/drafting/types";
 
 /** `new` is the line of the step at hand; the others were there before, or are cut, sewn or guided along. */
@@ -43,4 +44,6 @@ export interface MarksDocument {
   readonly lang?: string;
   /** Whose file it is, for the file's properties. */
   readonly author?: string;
+  /** The unit of the ticks on the head's tape. Default "cm". */
+  readonly tape?: TapeUnit;
 }

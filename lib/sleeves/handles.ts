@@ -4,6 +4,7 @@ import { formatLength } from "@/lib/lengths/format-length";
 import { parseLength } from "@/lib/lengths/parse-length";
 import { stepOf } from "@/lib/lengths/units";
 import { type Fineness, type Unit } from "@/lib/records/types";
+import { toScreen, type View } from "@/lib/sleeves/drawing-view";
 
 export type HandleName = "capDepth" | "biceps" | "hem" | "length";
 
@@ -21,6 +22,15 @@ export function handlePoint(name: HandleName, { points }: SleeveDraft): Point {
     case "length":
       return points.hemCentre!;
   }
+}
+
+/** The handle meant by a finger at a place of the screen: on a short sleeve their rooms overlap. */
+export function nearestHandle(at: Point, draft: SleeveDraft, view: View): HandleName {
+  const away = (name: HandleName) => {
+    const { x, y } = toScreen(view, handlePoint(name, draft));
+    return Math.hypot(x - at.x, y - at.y);
+  };
+  return handleNames.reduce((best, name) => (away(name) < away(best) ? name : best));
 }
 
 /**

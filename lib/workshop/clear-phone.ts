@@ -1,17 +1,15 @@
 /** Takes everything of a book off this phone; the app itself stays. */
-import { createStore, delMany, keys } from "idb-keyval";
+import { delMany, keys } from "idb-keyval";
 import { openBook } from "@/lib/store/book";
 import { dropAllDrafts } from "@/lib/store/drafts";
-
-/** Where `BookProvider` keeps the screens last looked at, each under its book's name. */
-const screens = createStore("notchbook-screens", "screens");
+import { screensStore } from "@/lib/store/screens-store";
 
 /** Drops the screens of every other book; they may have been written once more while that one was being cleared. */
 export async function forgetOtherScreens(book: string): Promise<void> {
-  const held = await keys<string>(screens);
+  const held = await keys<string>(screensStore);
   await delMany(
     held.filter((key) => !String(key).endsWith(`/${book}`)),
-    screens,
+    screensStore,
   );
 }
 

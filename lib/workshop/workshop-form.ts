@@ -2,6 +2,7 @@
 import { z } from "zod";
 import { currency } from "@/lib/money/currencies";
 import { type Workshop, type WorkshopFields } from "@/lib/records/types";
+import { oneLine } from "./begin-fields";
 
 const NAME_AT_MOST = 80;
 
@@ -30,22 +31,6 @@ export const workshopSchema = z.object({
   fineness: z.enum(["8", "16"], "Choose eighths or sixteenths."),
 });
 export type WorkshopValues = z.infer<typeof workshopSchema>;
-
-const oneLine = (text: string): string => text.trim().replace(/\s+/gu, " ");
-
-/** A workshop as it begins. */
-export function beginFields(values: StartValues, country: string): WorkshopFields {
-  return {
-    name: oneLine(values.name),
-    unit: values.unit,
-    fineness: 8,
-    currency: values.currency,
-    country,
-    address: "",
-    phone: "",
-    demo: false,
-  };
-}
 
 export function workshopValues(workshop: Workshop): WorkshopValues {
   const { name, address, phone, country, currency: code, unit, fineness } = workshop;

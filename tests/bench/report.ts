@@ -28,5 +28,11 @@ export function machine(browser: string): string {
 
 /** The table as it stands in DEVELOPERS.md. */
 export function table(title: string, rows: readonly Measured[]): string {
-  return [title, "", "| what | measured |", "| --- | --- |", ...rows.map(({ what, value }) => `| ${what} | ${value} |`)].join("\n");
+  return [
+    title,
+    "",
+    "| what | measured |",
+    "| --- | --- |",
+    ...rows.map(({ what, value }) => `| ${what} | ${value} |`),
+  ].join("\n");
 }

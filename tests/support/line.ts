@@ -14,10 +14,12 @@ export class Line {
   readonly counted: Counted[] = [];
   /** Answers to paths that match are held back until `release`. */
   holdBack: RegExp | null = null;
+  /** Paths that match are answered by 502. */
+  refuse: RegExp | null = null;
   /** Text put behind the server's answer, by path. */
   readonly appended = new Map<string, string>();
   private server: Server | undefined;
-  private held: (() => void)[] = [];
+  private held: { pass(): void; outgoing: ServerResponse }[] = [];
 
   constructor(
     readonly port: number,
@@ -53,7 +55,8 @@ export class Line {
         passed.on("error", () => refuse(outgoing));
         incoming.pipe(passed);
       };
-      if (this.holdBack?.test(path)) this.held.push(pass);
+      if (this.refuse?.test(path)) refuse(outgoing);
+      else if (this.holdBack?.test(path)) this.held.push({ pass, outgoing });
       else pass();
     });
     await new Promise<void>((resolve) => this.server!.listen(this.port, resolve));
@@ -61,7 +64,14 @@ export class Line {
 
   release(): void {
     this.holdBack = null;
-    for (const pass of this.held.splice(0)) pass();
+    for (const { pass } of this.held.splice(0)) pass();
+  }
+
+  /** Answers what is held back, and what is asked like it from now on, by 502. */
+  refuseHeld(): void {
+    this.refuse = this.holdBack;
+    this.holdBack = null;
+    for (const { outgoing } of this.held.splice(0)) refuse(outgoing);
   }
 
   stop(): void {

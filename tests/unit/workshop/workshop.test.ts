@@ -1,3 +1,4 @@
+import { beginFields } from "@/lib/workshop/begin-fields";
 import { describe, expect, it } from "vitest";
 import { currency } from "@/lib/money/currencies";
 import { countries } from "@/lib/people/countries";
@@ -10,13 +11,7 @@ import { guessCountry, guessCurrency, guessUnit } from "@/lib/workshop/home-coun
 import { changesSinceCopy, copyWords, keptWords } from "@/lib/workshop/kept-words";
 import { bytesWords, isRoomShort, roomWords } from "@/lib/workshop/room-words";
 import { sinceWords } from "@/lib/workshop/since-words";
-import {
-  beginFields,
-  startSchema,
-  workshopFields,
-  workshopSchema,
-  workshopValues,
-} from "@/lib/workshop/workshop-form";
+import { startSchema, workshopFields, workshopSchema, workshopValues } from "@/lib/workshop/workshop-form";
 
 describe("what a first visit is not asked", () => {
   it("takes the country of the first language that names one", () => {
