@@ -57,7 +57,7 @@ export function HistoryChart({
           </g>
         ))}
         {chart.xTicks.map(({ x, text }, i) => (
-          <g key={text}>
+          <g key={x}>
             <path d={`M${x} ${height}v5`} className="stroke-edge" strokeWidth="1.5" />
             <text
               x={x}

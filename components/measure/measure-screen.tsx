@@ -1,7 +1,7 @@
 "use client";
 
 import { useRouter } from "next/navigation";
-import { useEffect } from "react";
+import { useEffect, useState } from "react";
 import { NotShown, ScreenOpening } from "@/components/clients/not-shown";
 import { useIdParam } from "@/components/clients/use-id-param";
 import { useKeep, useView, useWorkshop } from "@/components/store/use-book";
@@ -83,7 +83,8 @@ function Measuring({ view, old, workshop, takenBy, back }: MeasuringProps) {
   const today = useToday();
   const { keep, busy, problem } = useKeep();
   const desk = useTaking(takingKey(wearer.id, old?.id ?? null));
-  const { found, taking, start, drop } = desk;
+  const { found, taking, start, startOver } = desk;
+  const [kept, setKept] = useState(false);
   const known = knownOf({ wearer, standing: sets, before: old ?? undefined, today, bookUnit: unit });
   const onPress = (key: Press) => desk.press(key, known, fineness);
   const now = () => new Date().toISOString();
@@ -91,15 +92,18 @@ function Measuring({ view, old, workshop, takenBy, back }: MeasuringProps) {
   // Kept, and the phone went dark before the half-taken set was put away.
   const keptAlready = found && !taking ? allSets.some(({ id }) => id === found.setId) : false;
   useEffect(() => {
-    if (keptAlready) void drop();
-  }, [keptAlready, drop]);
+    if (keptAlready) void startOver();
+  }, [keptAlready, startOver]);
   useEffect(() => {
     if (old && found === null && !taking) start(beginCorrection(old, { setId: newId(), unit, now: now() }));
   }, [old, found, taking, start, unit]);
 
   // Each of these is a screen of its own, begun at its head.
-  const place = taking === null ? "before" : taking.at === "review" ? "review" : "pad";
-  useEffect(() => window.scrollTo(0, 0), [place]);
+  const place = taking ? (taking.at === "review" ? "review" : "pad") : found ? "half-taken" : "choose";
+  useEffect(() => {
+    // Newer browsers answer with a promise, which an effect must not return.
+    void window.scrollTo(0, 0);
+  }, [place]);
 
   const startSet = (keys: readonly MeasureKey[]) =>
     start(
@@ -118,7 +122,8 @@ function Measuring({ view, old, workshop, takenBy, back }: MeasuringProps) {
     if (!taking) return;
     const fields = setFields(taking);
     if (!(await keep([make("measurementSets", fields, taking.setId)]))) return;
-    await Promise.all([rememberTakenBy(fields.takenBy), drop()]);
+    setKept(true);
+    await Promise.all([rememberTakenBy(fields.takenBy), desk.putAway()]);
     router.replace(`/measure/set?id=${taking.setId}`);
   };
 
@@ -133,7 +138,7 @@ function Measuring({ view, old, workshop, takenBy, back }: MeasuringProps) {
           today={today}
           fineness={fineness}
           onGoOn={() => start(found)}
-          onStartOver={() => void drop()}
+          onStartOver={() => void startOver()}
         />
       );
     if (old) return <ScreenOpening title="Put the set right" />;
@@ -161,7 +166,7 @@ function Measuring({ view, old, workshop, takenBy, back }: MeasuringProps) {
         fineness={fineness}
         today={today}
         old={old}
-        busy={busy}
+        busy={busy || kept}
         problem={problem}
         onPress={onPress}
         onKeep={() => void keepSet()}

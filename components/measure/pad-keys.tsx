@@ -74,7 +74,7 @@ function InchParts({ fineness, onPress }: { fineness: Fineness; onPress: OnPress
             onClick={() => onPress({ do: "part", over, under: fineness })}
           >
             {over === 0 ? (
-              <span className="pad-key-word font-sans">whole</span>
+              <span className="pad-key-word font-sans">{fineness === 8 ? "whole" : "–"}</span>
             ) : (
               <span className="stacked-fraction">
                 <span>{numerator}</span>
@@ -128,19 +128,29 @@ export function PadKeys({ unit, fineness, previous, first, onPress }: PadKeysPro
         )}
       </div>
       <div className="pad-acts">
-        <Button aria-label="Back one figure" disabled={first} onClick={() => onPress({ do: "back" })}>
+        <Button
+          className="px-3!"
+          aria-label="Back one figure"
+          disabled={first}
+          onClick={() => onPress({ do: "back" })}
+        >
           <ChevronLeft aria-hidden="true" className="size-6" />
         </Button>
-        <Button onClick={() => onPress({ do: "skip" })}>Skip</Button>
+        <Button className="px-3!" onClick={() => onPress({ do: "skip" })}>
+          Skip
+        </Button>
         {previous && (
-          <Button className="flex-1 flex-col gap-0 py-0 leading-none" onClick={() => onPress({ do: "same" })}>
-            <span className="text-sm leading-none">
+          <Button
+            className="flex-1 gap-1.5 px-1.5! py-0 [&_.length-unit]:hidden"
+            onClick={() => onPress({ do: "same" })}
+          >
+            <span className="text-sm">
               Same<span className="sr-only"> as last time,</span>
             </span>
             <Length mm={previous.mm} unit={unit} fineness={fineness} />
           </Button>
         )}
-        <Button variant="main" className="min-w-24 flex-1" onClick={() => onPress({ do: "next" })}>
+        <Button variant="main" className="min-w-20 flex-1 px-2!" onClick={() => onPress({ do: "next" })}>
           Next
         </Button>
       </div>

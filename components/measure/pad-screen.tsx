@@ -57,7 +57,7 @@ export function PadScreen({ wearer, back, desk, taking, at, known, fineness, onP
           {wearer}
         </h1>
         <Button
-          className="px-3"
+          className="px-3!"
           icon={<ListChecks className="size-5" />}
           onClick={() => onPress({ do: "go", to: "review" })}
         >
@@ -77,20 +77,20 @@ export function PadScreen({ wearer, back, desk, taking, at, known, fineness, onP
       <section className="pad-about" aria-labelledby={`${about}-name`}>
         <TapeDrawing measure={at} className="pad-drawing" />
         <div className="grid content-start gap-1">
-          <h2 id={`${about}-name`} className="font-figure text-lg leading-tight font-bold">
+          <h2 id={`${about}-name`} className="font-figure text-lg leading-tight font-bold lg:text-2xl">
             {measure.name}
           </h2>
           {taking.problem ? (
-            <div role="alert" className="leading-snug">
+            <div role="alert" className="text-sm leading-snug">
               <FieldError id={`${about}-how`}>{taking.problem}</FieldError>
             </div>
           ) : (
-            <p id={`${about}-how`} className="text-sm leading-snug">
+            <p id={`${about}-how`} className="text-sm leading-snug lg:text-lg">
               {measure.how}
             </p>
           )}
           {previous && (
-            <p id={`${about}-last`} className="text-sm text-soft">
+            <p id={`${about}-last`} className="text-sm text-soft lg:text-lg">
               Last time{" "}
               <strong className="text-base text-ink">
                 <Length mm={previous.mm} unit={taking.unit} fineness={fineness} />

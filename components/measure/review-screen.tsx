@@ -4,9 +4,10 @@ import { useRef, useState } from "react";
 import { KeepTrouble } from "@/components/clients/form-notices";
 import { Button } from "@/components/ui/button";
 import { Card, Row, RowButton, Rows } from "@/components/ui/card";
-import { Field, FieldError, TextArea, TextInput } from "@/components/ui/field";
+import { Field, TextArea, TextInput } from "@/components/ui/field";
 import { Sheet } from "@/components/ui/dialog";
 import { Length } from "@/components/ui/fraction";
+import { Notice } from "@/components/ui/notice";
 import { Screen } from "@/components/ui/screen";
 import { bodyMeasure, fullSet, type MeasureKey } from "@/lib/figures/body-measures";
 import { reviewProblems, type ReviewProblems } from "@/lib/measuring/keep-set";
@@ -45,14 +46,12 @@ export function ReviewScreen(props: ReviewScreenProps) {
   const [tried, setTried] = useState(false);
   const problems: ReviewProblems = tried ? reviewProblems(taking, today, old) : {};
   const day = useRef<HTMLInputElement>(null);
-  const figures = useRef<HTMLDivElement>(null);
 
   const tryToKeep = () => {
     setTried(true);
     const found = reviewProblems(taking, today, old);
-    if (found.figures) figures.current?.focus();
-    else if (found.takenOn) day.current?.focus();
-    else onKeep();
+    if (found.takenOn) day.current?.focus();
+    else if (!found.figures) onKeep();
   };
 
   return (
@@ -62,6 +61,7 @@ export function ReviewScreen(props: ReviewScreenProps) {
       back={back}
       action={
         <>
+          {problems.figures && <Notice live tone="wrong" title={problems.figures} />}
           <KeepTrouble keep={problem} draft={desk.problem} />
           <Button variant="main" full busy={busy} onClick={tryToKeep}>
             {old ? "Keep it as a new set" : "Keep this set"}
@@ -79,8 +79,7 @@ export function ReviewScreen(props: ReviewScreenProps) {
         </p>
       )}
       <StandingQuestions taking={taking} known={known} unit={unit} fineness={fineness} onPress={onPress} />
-      <div ref={figures} tabIndex={-1} className="grid gap-2 outline-none">
-        {problems.figures && <FieldError>{problems.figures}</FieldError>}
+      <div className="grid gap-2">
         <Card flush aria-label="Figures">
           <Rows>
             {taking.keys.map((key) => (

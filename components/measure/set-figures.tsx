@@ -52,7 +52,9 @@ export function SetFigures({ set, previous, corrects, unit, fineness }: SetFigur
           ];
         })}
       </ul>
-      <Tape unit={unit} className="-mx-4 mt-2 -mb-4 w-auto" />
+      <div className="-mx-4 mt-2 -mb-4">
+        <Tape unit={unit} />
+      </div>
     </Card>
   );
 }

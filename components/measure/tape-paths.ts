@@ -16,7 +16,7 @@ export interface FigureLines {
   /** Cut into the hem of a stand: one is the front, two are the back. */
   notches?: string;
   /** The view box, where it is not the common one. */
-  box?: string;
+  box?: [number, number, number, number];
 }
 
 const stand =
@@ -37,7 +37,7 @@ export const figureLines: Record<FigureName, FigureLines> = {
   },
   // The left arm hanging, with the neck and the side of the body it hangs from; cut off by the frame.
   arm: {
-    box: "-6 0 100 132",
+    box: [-4.5, 0, 98, 132],
     body:
       "M24.8 -5.3C25.7 14.1 37.1 19.4 53 22C67 24.6 75 33.4 76.7 47.5C77.6 59.8 75.8 70.4 75.8 81" +
       "C76.7 95 75 114.4 73.2 137.3H60.9C59.1 119.7 53.8 98.6 55.6 81.8C55.6 72.2 54.7 63.4 53 54.6" +

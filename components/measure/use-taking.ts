@@ -23,8 +23,10 @@ export interface TakingDesk {
   said: string;
   start(taking: Taking): void;
   press(key: Press, known: Known, fineness: Fineness): void;
-  /** Takes it off the phone: kept as a set, or not wanted. */
-  drop(): Promise<void>;
+  /** Takes it off the phone's disk, once it is kept as a set. */
+  putAway(): Promise<void>;
+  /** Forgets it: not wanted. */
+  startOver(): Promise<void>;
 }
 
 /** A set as it is being taken, put down on the phone at each key under `draftKey`. */
@@ -93,20 +95,24 @@ export function useTaking(draftKey: string): TakingDesk {
     [write],
   );
 
-  const drop = useCallback(async () => {
+  const putAway = useCallback(async () => {
     dropped.current = true;
     await writing.current;
-    now.current = null;
     await dropDraft(draftKey).catch(() => undefined);
+  }, [draftKey]);
+
+  const startOver = useCallback(async () => {
+    await putAway();
+    now.current = null;
     setTaking(null);
     setFound(null);
     setDisk({});
-  }, [draftKey]);
+  }, [putAway]);
 
   const onDisk = (key: MeasureKey): boolean => {
     const here = taking?.taken[key];
     return here !== undefined && disk[key]?.mm === here.mm && disk[key].typed === here.typed;
   };
 
-  return { found, taking, onDisk, problem, said, start, press, drop };
+  return { found, taking, onDisk, problem, said, start, press, putAway, startOver };
 }

@@ -70,15 +70,22 @@ export function TakeMoneySheet({ view, kind, open, onOpenChange }: TakeMoneyShee
 type DeskProps = Pick<TakeMoneySheetProps, "view" | "kind"> & { currency: Currency };
 
 function MoneyDesk(props: DeskProps) {
-  const draftKey = `order:money:${props.view.order.id}`;
+  const draftKey = `order:${props.kind === "giving-back" ? "giving-back" : "money"}:${props.view.order.id}`;
   const handle = useDraft<unknown>(draftKey);
   const workshop = useWorkshop();
   if (handle.draft === undefined || !workshop) return <Progress label="Opening the book" />;
   const typed = readMoneyDraft(handle.draft);
   // Kept before, but the phone went out before the draft was dropped.
   const isKept = typed !== null && props.view.payments.some(({ id }) => id === typed.paymentId);
-  const found = isKept || (props.kind !== undefined && typed?.kind !== props.kind) ? null : typed;
-  return <MoneyForm {...props} workshop={workshop} draftKey={draftKey} handle={handle} found={found} />;
+  return (
+    <MoneyForm
+      {...props}
+      workshop={workshop}
+      draftKey={draftKey}
+      handle={handle}
+      found={isKept ? null : typed}
+    />
+  );
 }
 
 const kinds = [
@@ -169,7 +176,8 @@ function MoneyForm({ view, kind, currency, workshop, draftKey, handle, found }: 
         {...form.register("kind", {
           onChange: (event: { target: { value: string } }) => {
             // An amount that nobody typed goes along with what it was meant for.
-            if (event.target.value === "giving-back" && amount === initial.amount) form.setValue("amount", "");
+            if (event.target.value === "giving-back" && amount === initial.amount)
+              form.setValue("amount", "");
           },
         })}
       />

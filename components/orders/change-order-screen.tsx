@@ -62,7 +62,9 @@ function ChangeOrderOf({ view }: { view: OrderCardView }) {
   if (handle.draft === undefined) return <ScreenOpening title={TITLE} />;
   const currency = currencyOf(order.currency);
   if (!currency) return <NoCurrency title={TITLE} code={order.currency} />;
-  return <ChangeOrderForm view={view} people={people} currency={currency} draftKey={draftKey} handle={handle} />;
+  return (
+    <ChangeOrderForm view={view} people={people} currency={currency} draftKey={draftKey} handle={handle} />
+  );
 }
 
 interface ChangeOrderFormProps {

@@ -97,11 +97,7 @@ export function GarmentCard({ form, at, people, today, otherNames, onLeaveOut }:
           <TextInput type="date" {...form.register(`garments.${at}.fittingOn`)} />
         </Field>
         <Field label="Note" optional>
-          <TextArea
-            rows={1}
-            {...form.register(`garments.${at}.note`)}
-            placeholder="Cloth, length, opening"
-          />
+          <TextArea rows={1} {...form.register(`garments.${at}.note`)} placeholder="Cloth, length, opening" />
         </Field>
       </div>
     </Card>

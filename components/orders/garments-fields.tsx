@@ -28,7 +28,8 @@ export function GarmentsFields({ form, people, today, otherNames }: GarmentsFiel
   const garments = useWatch({ control: form.control, name: "garments" });
   const [left, setLeft] = useState<{ at: number; garment: GarmentValues } | null>(null);
   const last = garments.at(-1);
-  const again = last && last.kind.trim() !== "" && sameForNext(last, garments, people, freshName("garment", garments));
+  const again =
+    last && last.kind.trim() !== "" && sameForNext(last, garments, people, freshName("garment", garments));
   const nameOfNext = again && people.wearers.find(({ wearer }) => wearer.id === again.wearerId)?.wearer.name;
 
   return (
@@ -81,7 +82,9 @@ export function GarmentsFields({ form, people, today, otherNames }: GarmentsFiel
         <Button
           icon={<Plus className="size-5" />}
           onClick={() =>
-            append(emptyGarment(freshName("garment", garments)), { focusName: `garments.${fields.length}.kind` })
+            append(emptyGarment(freshName("garment", garments)), {
+              focusName: `garments.${fields.length}.kind`,
+            })
           }
         >
           Another garment

@@ -21,7 +21,13 @@ import { decideTaking } from "@/lib/money/decide-payment";
 import { orderSums } from "@/lib/money/order-sums";
 import { withTodaysSets, withWearer } from "@/lib/orders/garment-choices";
 import { receiptCautions } from "@/lib/orders/order-cautions";
-import { emptyOrder, type OrderValues, orderSchema, readAmount, readOrderDraft } from "@/lib/orders/order-form";
+import {
+  emptyOrder,
+  type OrderValues,
+  orderSchema,
+  readAmount,
+  readOrderDraft,
+} from "@/lib/orders/order-form";
 import { newOrderWrites } from "@/lib/orders/order-writes";
 import { liveTotal } from "@/lib/orders/price-lines";
 import { type Workshop } from "@/lib/records/types";
@@ -106,9 +112,7 @@ function NewOrderForm(props: NewOrderFormProps) {
   const { view: already } = useView(orderCardQuery, { id: initial.orderId });
   const form = useForm<OrderValues>({
     resolver: useMemo(() => zodResolver(orderSchema(currency)), [currency]),
-    defaultValues: found
-      ? { ...found, garments: withTodaysSets(found.garments, people, today) }
-      : initial,
+    defaultValues: found ? { ...found, garments: withTodaysSets(found.garments, people, today) } : initial,
     mode: "onTouched",
   });
   const draft = useFormDraft(form, draftKey, initial, handle as DraftHandle<OrderValues>);
@@ -162,7 +166,13 @@ function NewOrderForm(props: NewOrderFormProps) {
       action={
         <>
           <KeepTrouble keep={problem} draft={handle.problem} />
-          <Button type="submit" form="order" variant="main" full busy={busy || form.formState.isSubmitting || isKept}>
+          <Button
+            type="submit"
+            form="order"
+            variant="main"
+            full
+            busy={busy || form.formState.isSubmitting || isKept}
+          >
             Keep the order
           </Button>
         </>

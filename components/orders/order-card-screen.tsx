@@ -1,5 +1,6 @@
 "use client";
 
+import { useRouter, useSearchParams } from "next/navigation";
 import { useState } from "react";
 import { BinAsk } from "@/components/clients/bin-ask";
 import { KeepTrouble } from "@/components/clients/form-notices";
@@ -18,7 +19,7 @@ import { orderCautions } from "@/lib/orders/order-cautions";
 import { orderName } from "@/lib/orders/order-name";
 import { sayMoney } from "@/lib/orders/say-money";
 import { moveWords, nextAct } from "@/lib/orders/stages";
-import { type PaymentKind, type Stage } from "@/lib/records/types";
+import { type Stage } from "@/lib/records/types";
 import { orderCardQuery, type OrderCardView } from "@/lib/store/queries/orders";
 import { CautionsNotice } from "./cautions-notice";
 import { HandOverSheet } from "./hand-over-sheet";
@@ -46,7 +47,12 @@ function LiveOrder({ view }: { view: OrderCardView }) {
   const { keep, busy, problem } = useKeep();
   const [before, setBefore] = useState<Stage | null>(null);
   const [handingOver, setHandingOver] = useState(false);
-  const [money, setMoney] = useState<PaymentKind | "likeliest" | null>(null);
+  const router = useRouter();
+  // Today leads back to a sheet that was left half filled in.
+  const asked = useSearchParams().get("money");
+  const [money, setMoney] = useState<"take" | "give-back" | null>(
+    asked === "take" || asked === "give-back" ? asked : null,
+  );
   const say = (minor: number) => sayMoney(minor, order.currency);
 
   const become = async (to: Stage) => {
@@ -95,12 +101,12 @@ function LiveOrder({ view }: { view: OrderCardView }) {
               </Button>
             )}
             {act.do === "take" && (
-              <Button variant="main" full onClick={() => setMoney("likeliest")}>
+              <Button variant="main" full onClick={() => setMoney("take")}>
                 Take {say(sums.balanceMinor)}
               </Button>
             )}
             {act.do === "give-back" && (
-              <Button variant="main" full onClick={() => setMoney("giving-back")}>
+              <Button variant="main" full onClick={() => setMoney("give-back")}>
                 Give {say(-sums.balanceMinor)} back
               </Button>
             )}
@@ -108,19 +114,9 @@ function LiveOrder({ view }: { view: OrderCardView }) {
         )
       }
     >
-      <StageCard
-        order={order}
-        due={dueWords(order, today)}
-        before={before}
-        busy={busy}
-        onMove={moveTo}
-      />
+      <StageCard order={order} due={dueWords(order, today)} before={before} busy={busy} onMove={moveTo} />
       {!act && <KeepTrouble keep={problem} draft={null} />}
-      <BalanceCard
-        view={view}
-        onTake={() => setMoney("likeliest")}
-        onGiveBack={() => setMoney("giving-back")}
-      />
+      <BalanceCard view={view} onTake={() => setMoney("take")} onGiveBack={() => setMoney("give-back")} />
       <OrderGarments view={view} today={today} />
       <CautionsNotice cautions={cautions} />
       <PriceLines view={view} />
@@ -146,13 +142,17 @@ function LiveOrder({ view }: { view: OrderCardView }) {
         balanceMinor={sums.balanceMinor}
         currency={order.currency}
         onHandOver={() => void become("handed-over")}
-        onTakeMoney={() => setMoney("likeliest")}
+        onTakeMoney={() => setMoney("take")}
       />
       <TakeMoneySheet
         view={view}
-        kind={money === "likeliest" ? undefined : (money ?? undefined)}
+        kind={money === "give-back" ? "giving-back" : undefined}
         open={money !== null}
-        onOpenChange={(open) => !open && setMoney(null)}
+        onOpenChange={(open) => {
+          if (open) return;
+          setMoney(null);
+          if (asked) router.replace(`/orders/card?id=${order.id}`);
+        }}
       />
     </Screen>
   );

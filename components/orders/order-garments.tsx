@@ -20,9 +20,7 @@ export function OrderGarments({ view, today }: { view: OrderCardView; today: Iso
         What is sewn
       </h2>
       {garments.length === 0 && (
-        <p className="text-soft">
-          No garment is set down. “Change” adds what is to be sewn.
-        </p>
+        <p className="text-soft">No garment is set down. “Change” adds what is to be sewn.</p>
       )}
       {garments.length > 0 && (
         <ul className="grid grid-cols-[minmax(0,1fr)] gap-4">
@@ -51,8 +49,7 @@ function GarmentView({
   const wearer = wearers.find(({ id }) => id === garment.wearerId);
   const set = sets.find(({ id }) => id === garment.setId);
   const sleeve = sleeves.find(({ id }) => id === garment.sleeveId);
-  const stale =
-    open && set && wearer && staleness(set.takenOn, ageOn(wearer, today)?.years, today).say;
+  const stale = open && set && wearer && staleness(set.takenOn, ageOn(wearer, today)?.years, today).say;
   const draft =
     wearer &&
     (set ? `/sleeves/draft?wearer=${wearer.id}&set=${set.id}` : `/sleeves/draft?wearer=${wearer.id}`);
@@ -110,7 +107,7 @@ function GarmentView({
             <dt className="text-soft">Fitting</dt>
             <dd>
               {formatDay(garment.fittingOn, { style: "long" })}
-              {open && <>, {fittingWords(garment.fittingOn, today).say.replace(/^fitting (?:was )?/u, "")}</>}
+              {open && <>, {fittingWords(garment.fittingOn, today).say}</>}
             </dd>
           </>
         )}

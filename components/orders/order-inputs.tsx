@@ -55,7 +55,14 @@ function dueHint(dueOn: string, today: IsoDate): string | undefined {
 }
 
 /** Everything that an order holds, for a new one and for one that is changed. */
-export function OrderInputs({ form, people, currency, today, otherNames = noOthers, children }: OrderInputsProps) {
+export function OrderInputs({
+  form,
+  people,
+  currency,
+  today,
+  otherNames = noOthers,
+  children,
+}: OrderInputsProps) {
   const { errors } = form.formState;
   const [dueOn, garments] = useWatch({ control: form.control, name: ["dueOn", "garments"] });
   const nameOf = (wearerId: string) =>

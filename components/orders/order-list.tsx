@@ -99,7 +99,9 @@ function NoOrders({ show }: { show: OrderListShow }) {
         )
       }
       action={
-        <ButtonLink href="/orders/new">{show === "open" ? "Take an order" : "Take the first order"}</ButtonLink>
+        <ButtonLink href="/orders/new">
+          {show === "open" ? "Take an order" : "Take the first order"}
+        </ButtonLink>
       }
     />
   );

@@ -7,7 +7,15 @@ import { balanceSaid, kindWords, methodWords } from "@/lib/receipts/document";
 import { type OrderCardView } from "@/lib/store/queries/orders";
 
 /** The balance, largest of all; below it what it comes from. */
-export function BalanceCard({ view, onTake, onGiveBack }: { view: OrderCardView; onTake: () => void; onGiveBack: () => void }) {
+export function BalanceCard({
+  view,
+  onTake,
+  onGiveBack,
+}: {
+  view: OrderCardView;
+  onTake: () => void;
+  onGiveBack: () => void;
+}) {
   const { order, sums, lines, payments } = view;
   const { label, minor } = balanceSaid(sums.balanceMinor);
   const unpriced = lines.length === 0 && payments.length === 0;

@@ -1,4 +1,3 @@
-import { type ReactNode } from "react";
 import { RowLink } from "@/components/ui/card";
 import { cx } from "@/components/ui/cx";
 import { Money } from "@/components/ui/money";
@@ -21,20 +20,14 @@ export function DayMark({ words }: { words: DayWords | null }) {
 export function OrderRow({
   item: { order, client, garments, wearers, sums },
   day,
-  name,
-  note,
   chosen,
-  quietMoney,
+  money = "said",
 }: {
   item: OrderListItem;
   day: DayWords | null;
-  /** In place of the client's name. */
-  name?: ReactNode;
-  /** In place of the stage. */
-  note?: ReactNode;
   chosen?: boolean;
-  /** No word where nothing is owed. */
-  quietMoney?: boolean;
+  /** Default "said": a word, too, where nothing is owed. */
+  money?: "said" | "owed";
 }) {
   const who = forWhom(client?.name ?? "", wearers, garments);
   const owed = sums.balanceMinor !== 0;
@@ -42,20 +35,20 @@ export function OrderRow({
     <RowLink
       href={`/orders/card?id=${order.id}`}
       chosen={chosen}
-      title={name ?? client?.name ?? "A client who is not in the book"}
+      title={client?.name ?? "A client who is not in the book"}
       sub={
         <>
           <span className="block wrap-anywhere">
             {[orderName(order), who].filter((part) => part !== "").join(", ")}
           </span>
-          <span className="block">{note ?? stageWords(order.stage)}</span>
+          <span className="block">{stageWords(order.stage)}</span>
         </>
       }
       figure={
         <span className="block text-end">
           <DayMark words={day} />
           {owed && <Money minor={Math.abs(sums.balanceMinor)} currency={order.currency} className="block" />}
-          {(owed || !quietMoney) && (
+          {(owed || money === "said") && (
             <span className="block font-sans text-sm font-normal">{balanceWords(sums)}</span>
           )}
         </span>

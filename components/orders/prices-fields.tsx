@@ -84,7 +84,10 @@ export function PricesFields({ form, currency, nameOf }: PricesFieldsProps) {
           {fields.length === 0 && unpriced.length === 0 ? "Add a price" : "Another price"}
         </Button>
       </div>
-      <p role="status" className="flex flex-wrap items-baseline justify-between gap-x-4 border-y-2 border-ink py-2">
+      <p
+        role="status"
+        className="flex flex-wrap items-baseline justify-between gap-x-4 border-y-2 border-ink py-2"
+      >
         <span className="font-semibold">{whole ? "Total" : "Total of what can be read"}</span>
         <Money minor={totalMinor} currency={currency.code} className="text-2xl font-bold" />
       </p>

@@ -39,7 +39,10 @@ export function StageCard({ order, due, before, busy, onMove }: StageCardProps) 
           )
         }
       />
-      <ol className="grid grid-cols-[repeat(auto-fit,minmax(min(100%,5.5rem),1fr))] gap-2" aria-label="Stages">
+      <ol
+        className="grid grid-cols-[repeat(auto-fit,minmax(min(100%,5.5rem),1fr))] gap-2"
+        aria-label="Stages"
+      >
         {stages.map((stage, i) => (
           <li key={stage}>
             <button

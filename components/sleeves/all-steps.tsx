@@ -11,6 +11,7 @@ import { Notice } from "@/components/ui/notice";
 import { Screen } from "@/components/ui/screen";
 import { ChecksList } from "./checks-list";
 import { type Place } from "./marks-screen";
+import { PrintMarks } from "./print-marks";
 import { StepDrawing } from "./step-drawing";
 
 type Good = MadeSleeve & { ok: true };
@@ -24,6 +25,7 @@ export interface AllStepsProps {
   back: { href: string; label: string };
   sleeve: Sleeve;
   wearer: Wearer | null;
+  workshopName: string;
   today: string;
   stale?: string;
   exact: Good;
@@ -34,7 +36,7 @@ export interface AllStepsProps {
 
 /** Every step on one page, with the checks of the sleeve that the marks make. */
 export function AllSteps(props: AllStepsProps) {
-  const { back, exact, fineness, go, pictures, place, rounded, sleeve, stale, step, unit } = props;
+  const { back, exact, fineness, go, pictures, place, rounded, sleeve, stale, step, today, unit } = props;
   const units = { unit, fineness };
   return (
     <Screen
@@ -53,6 +55,11 @@ export function AllSteps(props: AllStepsProps) {
         <Phrase parts={roundingPhrase(exact, rounded, step)} {...units} />
       </p>
       <ChecksList checks={rounded.checks} {...units} sub={countLine(rounded.checks)} />
+      <PrintMarks
+        {...{ sleeve, exact, rounded, step, unit, today, stale }}
+        wearerName={props.wearer?.name ?? ""}
+        author={props.workshopName}
+      />
       <Card aria-labelledby="steps-title">
         <CardHead id="steps-title" title="Steps" />
         <ol className="grid gap-4">

@@ -1,12 +1,12 @@
 "use client";
 
-import { useMemo } from "react";
+import { useMemo, useState } from "react";
 import { defaultBeside, defaultMarks, type MadeSleeve, usualHeadEase } from "@/lib/drafting";
 import { ageOn } from "@/lib/people/age";
 import { phraseText } from "@/lib/lengths/phrase";
 import { parseLength } from "@/lib/lengths/parse-length";
 import { type MeasurementSet, type Wearer } from "@/lib/records/types";
-import { askFromSet, fillFromSet, saidOf } from "@/lib/sleeves/ask-from-set";
+import { askFromSet, fillFromSet, saidOf, triedAsks } from "@/lib/sleeves/ask-from-set";
 import { type FieldProblems } from "@/lib/sleeves/field-problems";
 import { type MarkText } from "@/lib/sleeves/guide-marks";
 import { usualBicepsEase } from "@/lib/sleeves/make-from-record";
@@ -40,11 +40,12 @@ export function FiguresForm(props: FiguresFormProps) {
   const { armholeBy, bicepsBy, capBy, fineness, typed, unit } = form;
   const ageYears = wearer ? ageOn(wearer, today)?.years : undefined;
   const setFigures = form.setId === set?.id ? set?.figures : undefined;
-  const said = useMemo(
-    () =>
-      setFigures ? saidOf(form, { figures: setFigures, ...(ageYears !== undefined && { ageYears }) }) : {},
-    [form, setFigures, ageYears],
-  );
+  const asks = useMemo(() => {
+    if (!setFigures) return [];
+    const age = ageYears === undefined ? {} : { ageYears };
+    return triedAsks({ figures: setFigures, ...age, reach: form.reach, unit, fineness });
+  }, [setFigures, ageYears, form.reach, unit, fineness]);
+  const said = saidOf(typed, asks);
   const needed = new Set(figuresNeeded(form));
   const usual = usualFigures(form, made);
 
@@ -210,40 +211,46 @@ function GuideMarks({ beside, field, form, made, onPatch }: MarksProps) {
   const figures = made?.ok ? made.figures : null;
   const rule = figures && defaultMarks(figures.biceps, figures.capDepth);
   const troubled = beside.markErrors.length > 0 || beside.marks.front.size > 0 || beside.marks.back.size > 0;
+  const [unfolded, setUnfolded] = useState(false);
+  const open = unfolded || troubled;
   const onChange = (side: "front" | "back", texts: MarkText[] | null) =>
     onPatch((now) => ({ ...now, marks: { ...now.marks, [side]: texts } }));
   return (
     <Card aria-labelledby="marks-title">
-      <details open={troubled || undefined}>
+      <details open={open} onToggle={(event) => setUnfolded(event.currentTarget.open)}>
         <summary className="min-h-target py-2">
           <h2 id="marks-title" className="inline font-figure text-lg font-bold">
             Guide marks and notches
           </h2>
         </summary>
-        <div className="mt-3 grid gap-5">
-          <p className="text-soft">
-            The cap seam runs through marks set out from a straight line, underarm to crown. The rule (common
-            practice, no source) grows with the biceps line until a mark is changed by hand.
-          </p>
-          {(["front", "back"] as const).map(
-            (side) =>
-              (rule || marks[side]) && (
-                <MarksTable
-                  key={side}
-                  {...{ side, unit, fineness, onChange }}
-                  texts={marks[side]}
-                  rule={rule?.[side] ?? []}
-                  problems={beside.markErrors.filter((problem) => problem.side === side)}
-                  faults={
-                    new Map([...beside.marks[side]].map(([i, text]) => [i, phraseText(text, unit, fineness)]))
-                  }
-                />
-              ),
-          )}
-          {field("beside")}
-          {field("notchFront")}
-          {field("notchBack")}
-        </div>
+        {open && (
+          <div className="mt-3 grid gap-5">
+            <p className="text-soft">
+              The cap seam runs through marks set out from a straight line, underarm to crown. The rule
+              (common practice, no source) grows with the biceps line until a mark is changed by hand.
+            </p>
+            {(["front", "back"] as const).map(
+              (side) =>
+                (rule || marks[side]) && (
+                  <MarksTable
+                    key={side}
+                    {...{ side, unit, fineness, onChange }}
+                    texts={marks[side]}
+                    rule={rule?.[side] ?? []}
+                    problems={beside.markErrors.filter((problem) => problem.side === side)}
+                    faults={
+                      new Map(
+                        [...beside.marks[side]].map(([i, text]) => [i, phraseText(text, unit, fineness)]),
+                      )
+                    }
+                  />
+                ),
+            )}
+            {field("beside")}
+            {field("notchFront")}
+            {field("notchBack")}
+          </div>
+        )}
       </details>
     </Card>
   );

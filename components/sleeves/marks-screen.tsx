@@ -29,15 +29,20 @@ export function MarksScreen() {
   const id = useIdParam("id");
   const workshop = useWorkshop();
   if (!id) return <NotHere title="Mark out" state="known" say={NOT_HERE} />;
-  return <Marks key={id} id={id} unit={workshop?.unit ?? "in"} />;
+  return <Marks key={id} id={id} unit={workshop?.unit ?? "in"} workshopName={workshop?.name ?? ""} />;
 }
 
-function Marks({ id, unit }: { id: string; unit: Unit }) {
+interface Workplace {
+  unit: Unit;
+  workshopName: string;
+}
+
+function Marks({ id, ...workplace }: Workplace & { id: string }) {
   const { state, view } = useView(sleevesQuery, { ids: [id] });
   const found = view[0];
   if (!found) return <NotHere title="Mark out" state={state} say={NOT_HERE} />;
   if (found.sleeve.removedAt !== null) return <BinnedSleeve sleeve={found.sleeve} />;
-  return <MarkOut found={found} unit={unit} />;
+  return <MarkOut found={found} {...workplace} />;
 }
 
 /** Where she is: which step, one at a time or all on one page. */
@@ -46,7 +51,7 @@ export interface Place {
   all: boolean;
 }
 
-function MarkOut({ found, unit }: { found: SleeveView; unit: Unit }) {
+function MarkOut({ found, unit, workshopName }: Workplace & { found: SleeveView }) {
   const { set, sleeve, wearer } = found;
   const { fineness } = sleeve;
   const today = useToday();
@@ -100,7 +105,7 @@ function MarkOut({ found, unit }: { found: SleeveView; unit: Unit }) {
   return place.all ? (
     <AllSteps
       {...common}
-      {...{ wearer, today, stale }}
+      {...{ wearer, today, stale, workshopName }}
       exact={marked.exact}
       rounded={rounded}
       step={marked.step}

@@ -1,20 +1,26 @@
 "use client";
 
-import { type Wearer } from "@/lib/records/types";
+import { memo } from "react";
+import { type Fineness, type Unit, type Wearer } from "@/lib/records/types";
 import { type SleeveForm } from "@/lib/sleeves/sleeve-form";
 import { Card, CardHead } from "@/components/ui/card";
 import { Choice, Field, TextArea, TextInput } from "@/components/ui/field";
 import { WhoseSleeve } from "./whose-sleeve";
 
 export interface SleeveDetailsProps {
-  form: SleeveForm;
+  name: string;
+  note: string;
+  wearerId: string | null;
+  unit: Unit;
+  fineness: Fineness;
   whose: Wearer | null;
   suggested: string;
   onPatch(patch: (now: SleeveForm) => SleeveForm): void;
 }
 
 /** The name it is found by, whose it is, and how finely its marks are set out. */
-export function SleeveDetails({ form, onPatch, suggested, whose }: SleeveDetailsProps) {
+export const SleeveDetails = memo(function SleeveDetails(props: SleeveDetailsProps) {
+  const { fineness, name, note, onPatch, suggested, unit, wearerId, whose } = props;
   return (
     <Card aria-labelledby="details-title">
       <CardHead id="details-title" title="Name and wearer" />
@@ -22,25 +28,25 @@ export function SleeveDetails({ form, onPatch, suggested, whose }: SleeveDetails
         <Field
           label="Name"
           optional
-          hint={form.name.trim() ? undefined : `Left empty, it is called “${suggested}”.`}
+          hint={name.trim() ? undefined : `Left empty, it is called “${suggested}”.`}
         >
           <TextInput
-            value={form.name}
+            value={name}
             maxLength={120}
             onChange={(event) => {
-              const name = event.target.value;
-              onPatch((now) => ({ ...now, name }));
+              const typed = event.target.value;
+              onPatch((now) => ({ ...now, name: typed }));
             }}
           />
         </Field>
         <WhoseSleeve
-          wearerId={form.wearerId}
+          wearerId={wearerId}
           whose={whose}
           onChoose={(wearerId) =>
             onPatch((now) => ({ ...now, wearerId, setId: wearerId === now.wearerId ? now.setId : null }))
           }
         />
-        {form.unit === "in" && (
+        {unit === "in" && (
           <Choice
             label="Marks set out to"
             name="fineness"
@@ -48,24 +54,24 @@ export function SleeveDetails({ form, onPatch, suggested, whose }: SleeveDetails
               { value: "8", label: "Eighths" },
               { value: "16", label: "Sixteenths" },
             ]}
-            value={String(form.fineness)}
+            value={String(fineness)}
             onChange={(event) => {
-              const fineness = event.target.value === "16" ? 16 : 8;
-              onPatch((now) => ({ ...now, fineness }));
+              const chosen = event.target.value === "16" ? 16 : 8;
+              onPatch((now) => ({ ...now, fineness: chosen }));
             }}
           />
         )}
         <Field label="Note" optional>
           <TextArea
-            value={form.note}
+            value={note}
             maxLength={2000}
             onChange={(event) => {
-              const note = event.target.value;
-              onPatch((now) => ({ ...now, note }));
+              const typed = event.target.value;
+              onPatch((now) => ({ ...now, note: typed }));
             }}
           />
         </Field>
       </div>
     </Card>
   );
-}
+});

@@ -54,6 +54,7 @@ export function SleeveEditor(props: SleeveEditorProps) {
   const [form, setForm] = useState(begun ?? initial);
   const [focus, setFocus] = useState<FigureKey | null>(null);
   const [pressed, setPressed] = useState(false);
+  const [broughtBack] = useState(begun !== null && !same(begun, initial));
   const { save } = handle;
   const putDown = useCallback(
     // Nothing is left lying that only says what the book says already.
@@ -80,6 +81,8 @@ export function SleeveEditor(props: SleeveEditorProps) {
   const beside = useMemo(() => fieldProblems(form, made, read, pressed), [form, made, read, pressed]);
   // The drawing comes first; the list of checks may follow in the frame after.
   const checks = useDeferredValue(made?.ok ? made.checks : null);
+  const laterMade = useDeferredValue(made);
+  const laterBeside = useDeferredValue(beside);
 
   const onType = useCallback((key: FigureKey, text: string) => {
     setForm((now) => ({ ...now, typed: { ...now.typed, [key]: text } }));
@@ -138,7 +141,7 @@ export function SleeveEditor(props: SleeveEditorProps) {
     >
       <BroughtBack
         draft={{
-          broughtBack: begun !== null && !same(begun, initial),
+          broughtBack,
           startOver: () => {
             setForm({ ...initial });
             setPressed(false);
@@ -164,17 +167,24 @@ export function SleeveEditor(props: SleeveEditorProps) {
         />
         <div className="sleeve-form grid min-w-0 content-start gap-5">
           <FiguresForm
-            {...{ form, beside, made, set, wearer, today }}
+            {...{ form, set, wearer, today }}
+            beside={laterBeside}
+            made={laterMade}
             isNew={!sleeve}
             onType={onType}
             onFocusFigure={setFocus}
             onPatch={onPatch}
           />
           {checks && <ChecksList checks={checks} unit={unit} fineness={fineness} sub={countLine(checks)} />}
-          {beside.general.map((text, i) => (
+          {laterBeside.general.map((text, i) => (
             <Notice key={i} tone="wrong" title={<Phrase parts={text} unit={unit} fineness={fineness} />} />
           ))}
-          <SleeveDetails {...{ form, suggested }} whose={whose} onPatch={onPatch} />
+          <SleeveDetails
+            {...{ suggested, unit, fineness, whose, onPatch }}
+            name={form.name}
+            note={form.note}
+            wearerId={form.wearerId}
+          />
           {sleeve && (
             <BinAsk
               question={{

@@ -16,9 +16,9 @@ export function dueWords({ dueOn, stage }: Pick<Order, "dueOn" | "stage">, today
   return { say: `due ${formatDay(dueOn, { style: "relative", today })}`, late: false };
 }
 
-/** When a fitting is: "fitting tomorrow", "fitting was 3 days ago". */
+/** When a fitting is: "tomorrow", "Friday"; one that is past stands out: "3 days ago". */
 export function fittingWords(fittingOn: IsoDate, today: IsoDate): DayWords {
   const days = daysBetween(fittingOn, today);
-  if (days <= 0) return { say: `fitting ${formatDay(fittingOn, { style: "relative", today })}`, late: false };
-  return { say: days === 1 ? "fitting was yesterday" : `fitting was ${days} days ago`, late: true };
+  if (days > 1) return { say: `${days} days ago`, late: true };
+  return { say: formatDay(fittingOn, { style: "relative", today }), late: days > 0 };
 }

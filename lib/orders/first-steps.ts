@@ -9,7 +9,10 @@ export interface FirstStep {
 }
 
 /** How a new book is begun: a client, her figures, a sleeve, an order; each leads to where it is done. */
-export function firstSteps({ anyOrder, newest: { client, set, sleeve } }: Pick<TodayView, "anyOrder" | "newest">): FirstStep[] {
+export function firstSteps({
+  anyOrder,
+  newest: { client, set, sleeve },
+}: Pick<TodayView, "anyOrder" | "newest">): FirstStep[] {
   const steps = [
     {
       done: client !== null,

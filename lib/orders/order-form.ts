@@ -121,7 +121,10 @@ export function orderSchema(currency: Currency) {
       if (garment.kind.trim() === "" && (!isBlankGarment(garment) || (i === 0 && noneFilled)))
         problem(["garments", i, "kind"], "Type what is to be sewn, such as Dress or Blouse.");
       if (i === GARMENTS_AT_MOST)
-        problem(["garments", i, "kind"], `Leave this one out: ${GARMENTS_AT_MOST} garments are the most of one order.`);
+        problem(
+          ["garments", i, "kind"],
+          `Leave this one out: ${GARMENTS_AT_MOST} garments are the most of one order.`,
+        );
     });
     lines.forEach((line, i) => {
       if (isBlankLine(line)) return;
@@ -129,7 +132,10 @@ export function orderSchema(currency: Currency) {
       const read = readLine(line, currency);
       if (!read.ok) for (const { field, say } of read.problems) problem(["lines", i, field], say);
       if (i === LINES_AT_MOST)
-        problem(["lines", i, "text"], `Leave this one out: ${LINES_AT_MOST} prices are the most of one order.`);
+        problem(
+          ["lines", i, "text"],
+          `Leave this one out: ${LINES_AT_MOST} prices are the most of one order.`,
+        );
     });
     if (deposit.taken === "now") {
       const read = readAmount(deposit.amount, currency);
@@ -139,7 +145,10 @@ export function orderSchema(currency: Currency) {
 }
 
 /** An amount of money that changes hands: above 0. */
-export function readAmount(typed: string, currency: Currency): { ok: true; minor: number } | { ok: false; say: string } {
+export function readAmount(
+  typed: string,
+  currency: Currency,
+): { ok: true; minor: number } | { ok: false; say: string } {
   const read = parseMoney(typed, currency);
   if (!read.ok) return read;
   if (read.minor === 0) return { ok: false, say: "Type the amount, more than 0." };

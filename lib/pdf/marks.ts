@@ -1,6 +1,7 @@
 /** Marks on sheets: the figures, what to look out for, then each step with its drawing. */
 import { type Block, moved, overlay, row, rule, space, stack } from "@/lib/pdf/blocks";
 import { compose } from "@/lib/pdf/compose";
+import { setFractions } from "@/lib/pdf/fractions";
 import { longDate } from "@/lib/pdf/long-date";
 import { type MarksDocument, type MarksStep } from "@/lib/pdf/marks-document";
 import { type Group } from "@/lib/pdf/paginate";
@@ -33,7 +34,8 @@ const layouts: Record<MarksPaper, Pick<Desk, "base" | "columns" | "drawingHeight
 const verdicts = { good: "Good", look: "Look", wrong: "Wrong" } as const;
 
 /** The file. @throws Error where the painter cannot draw. */
-export function marksPdf(doc: MarksDocument, paper: MarksPaper, tools: PrintTools): Promise<ArrayBuffer> {
+export function marksPdf(said: MarksDocument, paper: MarksPaper, tools: PrintTools): Promise<ArrayBuffer> {
+  const doc = withFractions(said);
   const sheet = marksPapers[paper];
   const layout = layouts[paper];
   const { base } = layout;
@@ -68,6 +70,15 @@ export function marksPdf(doc: MarksDocument, paper: MarksPaper, tools: PrintTool
   };
   return writePdf(pages, facts, tools);
 }
+
+const withFractions = (doc: MarksDocument): MarksDocument => ({
+  ...doc,
+  subtitle: setFractions(doc.subtitle),
+  figures: doc.figures.map((figure) => ({ ...figure, text: setFractions(figure.text) })),
+  warnings: doc.warnings.map(setFractions),
+  steps: doc.steps.map((step) => ({ ...step, text: setFractions(step.text) })),
+  checks: doc.checks.map((check) => ({ ...check, text: setFractions(check.text) })),
+});
 
 const lang = (doc: MarksDocument): string => doc.lang ?? "en-GB";
 
@@ -115,7 +126,7 @@ function steps(desk: Desk): Group[] {
   const gap = base * 1.8;
   const room = (width - gap * (columns - 1)) / columns;
   const note = set.lines(
-    "The heavy line is the one to draw now; thin lines are there already. The drawings are not to size.",
+    "The heavy line is the one to draw now. Thin lines are there already; blue ones only guide. The drawings are not to size.",
     { size: plain.size * 0.92 },
     { x: 0, width },
   );

@@ -12,7 +12,7 @@ export interface PrintFonts {
   install(pdf: jsPDF): void;
 }
 
-export const useFont = (pdf: jsPDF, size: number, bold: boolean): jsPDF =>
+export const setFont = (pdf: jsPDF, size: number, bold: boolean): jsPDF =>
   pdf.setFont(FAMILY, bold ? "bold" : "normal").setFontSize(size);
 
 /** jsPDF keeps files as strings of bytes. */
@@ -46,7 +46,7 @@ export function readPrintFonts(regular: ArrayBuffer, bold: ArrayBuffer): PrintFo
     install,
     covers: (codePoint) => glyphs.every((map) => Boolean(map[codePoint])),
     width: (text, size, isBold) => {
-      useFont(scratch, size, isBold);
+      setFont(scratch, size, isBold);
       return scratch.getStringUnitWidth(text) * size;
     },
   };

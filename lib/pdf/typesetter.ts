@@ -35,8 +35,11 @@ const words = new Intl.Segmenter("en", { granularity: "word" });
 const CLOSING = /^[\p{Pe}\p{Pf}\p{Po}\p{Mn}]/u;
 
 // A figure keeps its fraction and its unit: no "5" at the end of one line and "¼ in" on the next.
-const INSIDE_A_FIGURE =
-  /(?<=\d) (?=[½¼¾⅛⅜⅝⅞⅓⅔])|(?<=[\d½¼¾⅛⅜⅝⅞⅓⅔]) (?=(?:in|cm|mm|m|yd|ft)(?![\p{L}\p{N}]))/gu;
+const FRACTION = "[½¼¾⅛⅜⅝⅞⅓⅔⁰¹²³⁴⁵⁶⁷⁸⁹]";
+const INSIDE_A_FIGURE = new RegExp(
+  `(?<=\\d) (?=${FRACTION})|(?<=[\\d½¼¾⅛⅜⅝⅞⅓⅔₂₄₆₈]) (?=(?:in|cm|mm|m|yd|ft)(?![\\p{L}\\p{N}]))`,
+  "gu",
+);
 
 /** Pieces that a line may end after; the spaces stay at their ends. */
 function breakable(text: string): string[] {

@@ -1,8 +1,8 @@
 /** Writes composed pages as a PDF. */
 import { jsPDF } from "jspdf";
-import { type Colour, type Item } from "@/lib/pdf/blocks";
+import { type Item } from "@/lib/pdf/blocks";
 import { type ComposedPage } from "@/lib/pdf/compose";
-import { type PrintFonts, useFont } from "@/lib/pdf/print-fonts";
+import { type PrintFonts, setFont } from "@/lib/pdf/print-fonts";
 import { type PaintedText, type TextPainter } from "@/lib/pdf/text-painter";
 
 /** What a document needs besides what it says. */
@@ -56,10 +56,9 @@ function startPdf(first: ComposedPage, facts: PdfFacts, { fonts, stamp }: PrintT
 const orientationOf = ({ width, height }: ComposedPage) => (width > height ? "landscape" : "portrait");
 
 function drawPath(pdf: jsPDF, { steps, fill, stroke }: Extract<Item, { kind: "path" }>): void {
-  const use = (set: (red: number, green: number, blue: number) => jsPDF, colour: Colour) => set(...colour);
-  if (fill) use(pdf.setFillColor.bind(pdf), fill);
+  if (fill) pdf.setFillColor(...fill);
   if (stroke) {
-    use(pdf.setDrawColor.bind(pdf), stroke.colour);
+    pdf.setDrawColor(...stroke.colour);
     pdf.setLineWidth(stroke.width);
     pdf.setLineDashPattern([...(stroke.dash ?? [])], 0);
   }
@@ -103,7 +102,7 @@ export async function writePdf(
     pdf.setLineCap("butt").setLineJoin("round").setTextColor(0);
     for (const item of page.items) if (item.kind === "path") drawPath(pdf, item);
     for (const item of page.items) {
-      if (item.kind === "text") useFont(pdf, item.size, item.bold).text(item.text, item.x, item.y);
+      if (item.kind === "text") setFont(pdf, item.size, item.bold).text(item.text, item.x, item.y);
       else if (item.kind === "picture") {
         await drawPicture(item);
         tools.onProgress?.(done, of);

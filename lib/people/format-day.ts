@@ -1,8 +1,11 @@
 import { daysBetween, type IsoDate, readDay } from "./iso-date";
 
 export interface DayStyle {
-  /** "short": 14 Mar 2026; "long": Saturday 14 March 2026; "relative": today, tomorrow, Friday, 14 Mar. */
-  style?: "short" | "long" | "relative";
+  /**
+   * "short": 14 Mar 2026; "long": Saturday 14 March 2026; "weekday": Saturday 14 March; "relative": today, tomorrow,
+   * Friday, 14 Mar.
+   */
+  style?: "short" | "long" | "weekday" | "relative";
   /** Needed for "relative". */
   today?: IsoDate;
   locale?: string;
@@ -15,6 +18,7 @@ export function formatDay(day: IsoDate, { style = "short", today, locale = "en-G
   const words = (options: Intl.DateTimeFormatOptions) =>
     new Intl.DateTimeFormat(locale, { timeZone: "UTC", ...options }).format(at);
   if (style === "long") return words({ weekday: "long", day: "numeric", month: "long", year: "numeric" });
+  if (style === "weekday") return words({ weekday: "long", day: "numeric", month: "long" });
   if (style === "relative" && today !== undefined) {
     const days = daysBetween(today, day);
     if (days === 0) return "today";

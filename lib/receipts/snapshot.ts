@@ -47,7 +47,12 @@ export function receiptSnapshot(ask: SnapshotAsk): ReceiptSnapshot {
       unitMinor,
       amountMinor: quantity * unitMinor,
     })),
-    earlier: ask.earlier.map(({ number, paidOn, kind, amountMinor }) => ({ number, paidOn, kind, amountMinor })),
+    earlier: ask.earlier.map(({ number, paidOn, kind, amountMinor }) => ({
+      number,
+      paidOn,
+      kind,
+      amountMinor,
+    })),
     payment: { kind: payment.kind, method: payment.method, amountMinor: payment.amountMinor },
     totalMinor: sums.totalMinor,
     receivedMinor: sums.receivedMinor - sums.givenBackMinor,

@@ -169,17 +169,21 @@ export function fillFromSet(form: SleeveForm, now: SetAsk, before: SetAsk | null
   return { ...form, typed, armholeBy, bicepsBy, capBy, hemOpens };
 }
 
+/** What the set gives as far down the arm as the form was filled; every reach for a form that was not. */
+export function triedAsks({
+  reach,
+  ...options
+}: Omit<AskFromSetOptions, "reach"> & { reach: Reach | null }): SetAsk[] {
+  const tried = reach ? [reach] : reaches.map(({ value }) => value);
+  return tried.map((one) => askFromSet({ ...options, reach: one }));
+}
+
 /** Where each figure on the form was taken from, as far as it still stands as the set has it. */
-export function saidOf(
-  form: SleeveForm,
-  options: Omit<AskFromSetOptions, "reach" | "unit" | "fineness">,
-): SetAsk["said"] {
-  const tried = form.reach ? [form.reach] : reaches.map(({ value }) => value);
+export function saidOf(typed: SleeveForm["typed"], asks: readonly SetAsk[]): SetAsk["said"] {
   const said: SetAsk["said"] = {};
-  for (const reach of tried) {
-    const ask = askFromSet({ ...options, reach, unit: form.unit, fineness: form.fineness });
+  for (const ask of asks) {
     for (const key of Object.keys(ask.said) as FigureKey[]) {
-      if (!said[key] && form.typed[key] === ask.typed[key]) said[key] = ask.said[key]!;
+      if (!said[key] && typed[key] === ask.typed[key]) said[key] = ask.said[key]!;
     }
   }
   return said;

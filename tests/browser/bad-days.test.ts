@@ -1,6 +1,7 @@
 /** Failures that are ordinary days: each has a state on the screen, and nothing typed is lost. */
+import { freePort } from "@/tests/support/app-server";
 import { Line } from "@/tests/support/line";
-import { beginWorkshop, expect, freePort, test, untilDatabaseOpen, untilReadyWithoutALine } from "./kit";
+import { beginWorkshop, expect, test, untilDatabaseOpen, untilReadyWithoutALine } from "./kit";
 
 test("before the database has arrived, starting and adding a client work, and are there after a reload", async ({
   server,

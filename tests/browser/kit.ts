@@ -1,65 +1,9 @@
 /** A server of our own for each test, which the test may stop and start, on one port: one origin. */
 import { test as base, type BrowserContext, chromium, expect, type Page } from "@playwright/test";
-import { type ChildProcess, spawn } from "node:child_process";
-import { createServer } from "node:net";
 import { mkdtempSync, rmSync } from "node:fs";
 import { tmpdir } from "node:os";
 import { join } from "node:path";
-
-export class AppServer {
-  private child: ChildProcess | undefined;
-
-  constructor(
-    readonly port: number,
-    private readonly dataDir: string,
-  ) {}
-
-  get url(): string {
-    return `http://localhost:${this.port}`;
-  }
-
-  async start(): Promise<void> {
-    this.child = spawn(
-      process.execPath,
-      ["node_modules/next/dist/bin/next", "start", "-p", String(this.port)],
-      {
-        stdio: "ignore",
-        env: { ...process.env, NOTCHBOOK_DATA: this.dataDir },
-      },
-    );
-    for (let tried = 0; tried < 100; tried++) {
-      const answered = await fetch(`${this.url}/manifest.webmanifest`).then(
-        (response) => response.ok,
-        () => false,
-      );
-      if (answered) return;
-      await new Promise((resolve) => setTimeout(resolve, 100));
-    }
-    throw new Error("The server did not start.");
-  }
-
-  async stop(): Promise<void> {
-    const { child } = this;
-    if (!child || child.exitCode !== null) return;
-    const gone = new Promise((resolve) => child.once("exit", resolve));
-    child.kill("SIGKILL");
-    await gone;
-    this.child = undefined;
-  }
-}
-
-export async function freePort(): Promise<number> {
-  return new Promise((resolve, reject) => {
-    const probe = createServer();
-    probe.once("error", reject);
-    probe.listen(0, () => {
-      const address = probe.address();
-      probe.close(() =>
-        typeof address === "object" && address ? resolve(address.port) : reject(new Error("no port")),
-      );
-    });
-  });
-}
+import { AppServer, freePort } from "@/tests/support/app-server";
 
 export const test = base.extend<{ server: AppServer; page: Page }>({
   server: async ({}, provide) => {

@@ -1,5 +1,6 @@
+import { freePort } from "@/tests/support/app-server";
 import { Line } from "@/tests/support/line";
-import { beginWorkshop, expect, freePort, test, untilReadyWithoutALine } from "./kit";
+import { beginWorkshop, expect, test, untilReadyWithoutALine } from "./kit";
 
 test("a newer build waits for the user's word, and what is being typed stays", async ({ server, page }) => {
   const line = new Line(await freePort(), server.port);

@@ -11,7 +11,8 @@ import {
   readIn,
   unfinishedReading,
 } from "@/lib/copy/read-in";
-import { makeCopy, readCopy, type SavedCopy, writeCopy } from "@/lib/copy/saved-copy";
+import { readCopy } from "@/lib/copy/read-copy";
+import { makeCopy, type SavedCopy, writeCopy } from "@/lib/copy/saved-copy";
 import { openJournal } from "@/lib/journal/journal";
 import { overlay } from "@/lib/journal/merge";
 import { strictStore } from "@/lib/journal/strict-store";

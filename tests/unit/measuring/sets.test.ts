@@ -1,4 +1,9 @@
 import { describe, expect, it } from "vitest";
+import { tapeRuns } from "@/components/measure/tape-paths";
+import { bodyMeasures } from "@/lib/figures/body-measures";
+import { begunWords } from "@/lib/measuring/begun-words";
+import { figureHistory, measuresTaken } from "@/lib/measuring/history";
+import { knownOf } from "@/lib/measuring/known";
 import { reviewProblems, setFields } from "@/lib/measuring/keep-set";
 import { previousFigures } from "@/lib/measuring/previous";
 import { announce } from "@/lib/measuring/say";
@@ -113,5 +118,54 @@ describe("a set to send", () => {
     expect(shareText(set, "Ama", "in", 8)).toBe(
       "Figures of Ama\nTaken 14 Mar 2026, by Efua\n\nWrist girth: 6 1/4 in\nArm length: 21 1/4 in\n\nLeft arm",
     );
+  });
+});
+
+describe("what the book says on the day", () => {
+  const born = { birthYear: 2020, birthMonth: 1, ageYears: null, ageOn: null };
+  const spring = setOf({ id: id(4), takenOn: "2026-03-01", figures: [figure("wristGirth", "6", 152.4)] });
+  it("is of today for a new set, and of the old day for one that is put right", () => {
+    const ask = { wearer: born, standing: [spring], today: "2027-03-14", bookUnit: "in" as const };
+    expect(knownOf(ask)).toMatchObject({
+      on: "2027-03-14",
+      ageYears: 7,
+      previous: { wristGirth: { typed: "6" } },
+    });
+    expect(knownOf({ ...ask, before: spring })).toMatchObject({
+      on: "2026-03-01",
+      ageYears: 6,
+      previous: {},
+    });
+  });
+  it("has a history of each figure, oldest first, and the measures that were ever taken", () => {
+    const autumn = setOf({
+      id: id(5),
+      takenOn: "2026-09-01",
+      figures: [figure("wristGirth", "6 1/8", 155.575)],
+    });
+    const arm = setOf({ id: id(6), takenOn: "2026-10-01", figures: [figure("armLength", "20", 508)] });
+    const standing = [arm, autumn, spring];
+    expect(figureHistory(standing, "wristGirth").map(({ on, mm }) => [on, mm])).toEqual([
+      ["2026-03-01", 152.4],
+      ["2026-09-01", 155.575],
+    ]);
+    expect(measuresTaken(standing)).toEqual(["wristGirth", "armLength"]);
+  });
+  it("says when a half-taken set was begun, by the phone's own clock", () => {
+    const at = new Date(2026, 2, 14, 14, 5);
+    expect(begunWords(at.toISOString(), "2026-03-14")).toBe("14:05");
+    expect(begunWords(at.toISOString(), "2026-03-15")).toBe("yesterday, 14:05");
+  });
+});
+
+describe("the drawings", () => {
+  it("has one for each measure, its tape held at both ends of a length and closed behind a girth", () => {
+    for (const { key, kind } of bodyMeasures) {
+      const { tape, ends, behind } = tapeRuns[key];
+      expect(tape).toMatch(/^M[\d.]+ [\d.]+/);
+      expect(kind === "length" ? ends?.length : behind !== undefined && ends === undefined).toBe(
+        kind === "length" ? 2 : true,
+      );
+    }
   });
 });

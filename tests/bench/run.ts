@@ -1,0 +1,269 @@
+/**
+ * `npm run bench`: what a phone pays and waits for. Everything in one run on one machine; compare only within it.
+ * Wants a build (`npm run build`) and Chromium. Prints the table that DEVELOPERS.md keeps.
+ */
+import { execFileSync } from "node:child_process";
+import { mkdtempSync, rmSync, writeFileSync } from "node:fs";
+import { tmpdir } from "node:os";
+import { join } from "node:path";
+import { type CDPSession, chromium, type Page } from "@playwright/test";
+import { makeCopy, writeCopy } from "@/lib/copy/saved-copy";
+import { type Change, newId, SCHEMA_NUMBER } from "@/lib/journal/change";
+import { overlay } from "@/lib/journal/merge";
+import { todayIso } from "@/lib/people/today";
+import { AppServer, freePort } from "@/tests/support/app-server";
+import { Line } from "@/tests/support/line";
+import { bigBook } from "./big-book";
+import { measureEngine } from "./engine";
+import { kb, machine, type Measured, ms, spread, table } from "./report";
+
+const SLOW = 4;
+const CLIENTS = 5000;
+const ORDERS = 20_000;
+const rows: Measured[] = [];
+const note = (what: string, value: string) => {
+  rows.push({ what, value });
+  console.log(`${what}: ${value}`);
+};
+
+const server = new AppServer(await freePort(), mkdtempSync(join(tmpdir(), "notchbook-bench-")));
+await server.start();
+const profile = mkdtempSync(join(tmpdir(), "notchbook-profile-"));
+const executablePath = process.env.CHROMIUM ?? "/usr/bin/chromium";
+const open = (dir: string) =>
+  chromium.launchPersistentContext(dir, {
+    executablePath,
+    args: ["--no-sandbox", "--disable-background-networking", "--disable-component-update", "--disable-sync"],
+    viewport: { width: 360, height: 740 },
+    acceptDownloads: true,
+  });
+
+async function slowly(page: Page, times: number): Promise<CDPSession> {
+  const session = await page.context().newCDPSession(page);
+  await session.send("Emulation.setCPUThrottlingRate", { rate: times });
+  return session;
+}
+
+async function begin(page: Page, url: string): Promise<void> {
+  await page.goto(url);
+  await page.getByLabel("Name of your workshop").fill("Bench Street");
+  await page.getByLabel("Clients pay in").selectOption("EUR");
+  await page.getByRole("button", { name: "Begin", exact: true }).click();
+  await page.waitForURL((address) => address.pathname === "/");
+}
+
+const untilOpen = (page: Page) =>
+  page.waitForFunction(
+    () =>
+      /^Kept on this phone · (?!opening|reading)/.test(
+        document.querySelector(".kept-line")?.textContent ?? "",
+      ),
+    null,
+    { timeout: 600_000 },
+  );
+
+async function firstVisit(): Promise<void> {
+  const line = new Line(await freePort(), server.port);
+  await line.start();
+  const dir = mkdtempSync(join(tmpdir(), "notchbook-profile-"));
+  const context = await open(dir);
+  const page = context.pages()[0]!;
+  let programs = 0;
+  const session = await page.context().newCDPSession(page);
+  await session.send("Network.enable");
+  const scripts = new Set<string>();
+  session.on("Network.responseReceived", (event) => {
+    if (event.type === "Script") scripts.add(event.requestId);
+  });
+  session.on("Network.loadingFinished", (event) => {
+    if (scripts.has(event.requestId)) programs += event.encodedDataLength;
+  });
+  await page.goto(line.url);
+  await page.getByRole("button", { name: "Begin", exact: true }).waitFor();
+  await page.waitForLoadState("networkidle");
+  note("programs before the first tap, the start screen (brotli, with headers)", kb(programs));
+  await page.waitForFunction(() => navigator.serviceWorker.controller !== null, null, { timeout: 120_000 });
+  await page.waitForTimeout(1500);
+  let all = 0;
+  for (const [part, bytes] of [...line.byPart()].sort((a, b) => b[1] - a[1])) {
+    note(`first visit, ${part}`, kb(bytes));
+    all += bytes;
+  }
+  note("first visit, all (aim: 4.5 MB at most)", kb(all));
+  const kept = await page.evaluate(async () => (await navigator.storage.estimate()).usage ?? 0);
+  note("kept by the browser after it, with an empty book", kb(kept));
+  await context.close();
+  line.stop();
+  rmSync(dir, { recursive: true, force: true });
+}
+
+/** The book as a saved copy, read in as its owner would read it in. */
+async function bigCopy(): Promise<string> {
+  const workshopId = newId();
+  const today = todayIso();
+  const made: Change = {
+    number: 1,
+    device: "",
+    workshopId,
+    schema: SCHEMA_NUMBER,
+    writtenAt: "",
+    rows: bigBook({ clients: CLIENTS, orders: ORDERS, today, seed: 7 }),
+  };
+  const stamp = Object.values(made.rows[0]!.fields)[0]!.stamp;
+  const fields = {
+    name: "Bench Street",
+    unit: "in",
+    fineness: 8,
+    currency: "EUR",
+    country: "MT",
+    address: "",
+    phone: "",
+    demo: false,
+    removedAt: null,
+  };
+  made.rows.push({
+    table: "workshops",
+    id: workshopId,
+    makes: true,
+    fields: Object.fromEntries(
+      Object.entries(fields).map(([name, value]) => [name, { value, stamp, base: null }]),
+    ),
+  });
+  const copy = makeCopy(overlay({}, [made]), [], { workshopId, madeAt: new Date().toISOString() });
+  const file = join(profile, "big-copy.json");
+  writeFileSync(file, await writeCopy(copy));
+  return file;
+}
+
+async function bigBookOnAPhone(): Promise<void> {
+  let context = await open(profile);
+  let page = context.pages()[0]!;
+  await page.goto(server.url);
+  await page.getByTestId("copy-file").setInputFiles(await bigCopy());
+  const started = Date.now();
+  await page.getByRole("button", { name: "Read it in" }).click({ timeout: 120_000 });
+  await page.waitForURL((url) => url.pathname === "/", { timeout: 600_000 });
+  await untilOpen(page);
+  note(
+    `reading in a copy of ${CLIENTS} clients and ${ORDERS} orders, until the database has it (full speed)`,
+    ms(Date.now() - started),
+  );
+  await page.locator("main .row").first().waitFor();
+  await page.waitForFunction(() => navigator.serviceWorker.controller !== null);
+  await page.waitForTimeout(4000);
+  await context.close();
+
+  const usable: number[] = [];
+  const opened: number[] = [];
+  for (let i = 0; i < 5; i++) {
+    context = await open(profile);
+    page = context.pages()[0]!;
+    await slowly(page, SLOW);
+    const from = Date.now();
+    await page.goto(server.url, { waitUntil: "commit" });
+    await page.locator("main .row").first().waitFor();
+    usable.push(Date.now() - from);
+    await untilOpen(page);
+    opened.push(Date.now() - from);
+    await page.waitForTimeout(500);
+    await context.close();
+  }
+  note(
+    `cold start to usable Today, ${CLIENTS} clients, ${ORDERS} orders, ${SLOW}x slower CPU`,
+    spread(usable),
+  );
+  note("the same, until the database has answered", spread(opened));
+
+  context = await open(profile);
+  page = context.pages()[0]!;
+  await slowly(page, SLOW);
+  await page.goto(server.url);
+  await untilOpen(page);
+  const drawn: number[] = [];
+  const found: number[] = [];
+  const orders: number[] = [];
+  for (let i = 0; i < 9; i++) {
+    const timeTo = (act: () => Promise<unknown>, until: () => Promise<unknown>) =>
+      (async () => {
+        const from = Date.now();
+        await act();
+        await until();
+        return Date.now() - from;
+      })();
+    const row = page.locator("main .row").first();
+    drawn.push(
+      await timeTo(
+        () => page.getByRole("link", { name: "Clients", exact: true }).click(),
+        async () => {
+          await page.waitForURL(/\/clients$/);
+          await row.waitFor();
+        },
+      ),
+    );
+    const field = page.getByRole("searchbox").or(page.getByLabel(/^Find/)).first();
+    const wanted = String(1000 + i * 37);
+    found.push(
+      await timeTo(
+        () => field.fill(wanted),
+        () => page.locator("main .row", { hasText: wanted }).first().waitFor(),
+      ),
+    );
+    await field.fill("");
+    orders.push(
+      await timeTo(
+        () => page.getByRole("link", { name: "Orders", exact: true }).click(),
+        async () => {
+          await page.waitForURL(/\/orders$/);
+          await row.waitFor();
+        },
+      ),
+    );
+    await page.getByRole("link", { name: "Today", exact: true }).click();
+    await row.waitFor();
+  }
+  note(`tap to drawn list of clients, ${SLOW}x slower CPU`, spread(drawn));
+  note(`typing to the client found, ${SLOW}x slower CPU`, spread(found));
+  note(`tap to drawn list of orders, ${SLOW}x slower CPU`, spread(orders));
+  await context.close();
+}
+
+async function keeping(): Promise<void> {
+  const dir = mkdtempSync(join(tmpdir(), "notchbook-profile-"));
+  const context = await open(dir);
+  const page = context.pages()[0]!;
+  await begin(page, server.url);
+  await untilOpen(page);
+  await slowly(page, SLOW);
+  const kept: number[] = [];
+  for (let i = 0; i < 25; i++) {
+    await page.goto(`${server.url}/clients/new`);
+    await page.getByLabel("Name", { exact: true }).first().fill(`Bench ${i}`);
+    await page.getByRole("button", { name: "Keep the client" }).click();
+    await page.waitForURL(/\/clients\/card/);
+    kept.push(...(await measures(page, "notchbook:kept")));
+  }
+  note(`a write until it is kept, ${SLOW}x slower CPU (aim: 50 ms)`, spread(kept));
+  await page.goto(`${server.url}/sleeves/draft`);
+  await context.close();
+  rmSync(dir, { recursive: true, force: true });
+}
+
+const measures = (page: Page, name: string): Promise<number[]> =>
+  page.evaluate((wanted) => {
+    const found = performance.getEntriesByName(wanted).map((entry) => entry.duration);
+    performance.clearMeasures(wanted);
+    return found;
+  }, name);
+
+try {
+  rows.push(...measureEngine());
+  for (const { what, value } of rows) console.log(`${what}: ${value}`);
+  await firstVisit();
+  await keeping();
+  await bigBookOnAPhone();
+} finally {
+  await server.stop();
+  rmSync(profile, { recursive: true, force: true });
+}
+const browser = execFileSync(executablePath, ["--version"], { encoding: "utf8" }).trim();
+console.log(`\n${table(`${todayIso()}, ${machine(browser)}:`, rows)}`);
