@@ -7,8 +7,8 @@ import { type AnyRow, type Rows } from "@/lib/journal/merge";
 import { type RowOf, type TableName, tableNames } from "@/lib/records/types";
 import { canonicalJson, sha256 } from "./canonical-json";
 
-const COPY_FORMAT = "notchbook-copy";
-const COPY_VERSION = 1;
+export const COPY_FORMAT = "notchbook-copy";
+export const COPY_VERSION = 1;
 
 /** What was being typed and not kept yet. */
 export interface CopiedDraft {

@@ -2,6 +2,7 @@ import { describe, expect, it } from "vitest";
 import { firstSteps } from "@/lib/orders/first-steps";
 import { readUnfinished } from "@/lib/orders/unfinished";
 import { newId } from "@/lib/journal/change";
+import { fullSet } from "@/lib/figures/body-measures";
 import { begin } from "@/lib/measuring/taking";
 import { type Client, type MeasurementSet, type Sleeve } from "@/lib/records/types";
 import { todayOn, todayQuery } from "@/lib/store/queries/today";
@@ -51,14 +52,14 @@ describe("what was begun and not kept", () => {
     const taking = begin({
       setId: newId(),
       wearerId: id,
-      keys: ["upper-arm-girth", "wrist-girth"] as Parameters<typeof begin>[0]["keys"],
+      keys: fullSet.measures.slice(0, 2),
       unit: "in",
       now: "2026-03-01T09:00:00.000Z",
       today: "2026-03-01",
       takenBy: "",
     });
     const read = readUnfinished(`measure:${id}`, taking);
-    expect(read).toMatchObject({ kind: "set", wearerId: id, taken: 0, href: `/measure?wearer=${id}` });
+    expect(read).toMatchObject({ kind: "set", wearerId: id, taken: 0, of: 2, href: `/measure?wearer=${id}` });
     const corrects = newId();
     expect(
       readUnfinished(`measure:${id}:corrects:${corrects}`, { ...taking, correctsId: corrects })?.href,
