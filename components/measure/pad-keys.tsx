@@ -136,7 +136,7 @@ export function PadKeys({ unit, fineness, previous, first, onPress }: PadKeysPro
         >
           <ChevronLeft aria-hidden="true" className="size-6" />
         </Button>
-        <Button className="px-3!" onClick={() => onPress({ do: "skip" })}>
+        <Button className="px-2.5!" onClick={() => onPress({ do: "skip" })}>
           Skip
         </Button>
         {previous && (
@@ -150,7 +150,7 @@ export function PadKeys({ unit, fineness, previous, first, onPress }: PadKeysPro
             <Length mm={previous.mm} unit={unit} fineness={fineness} />
           </Button>
         )}
-        <Button variant="main" className="min-w-20 flex-1 px-2!" onClick={() => onPress({ do: "next" })}>
+        <Button variant="main" className="min-w-16 flex-1 px-2!" onClick={() => onPress({ do: "next" })}>
           Next
         </Button>
       </div>

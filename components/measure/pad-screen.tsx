@@ -44,7 +44,7 @@ export function PadScreen({ wearer, back, desk, taking, at, known, fineness, onP
 
   return (
     <main id="main" tabIndex={-1} className="pad">
-      <header className="pad-head flex min-h-11 items-center gap-2">
+      <header className="pad-head flex min-h-11 flex-wrap items-center gap-x-2">
         <AppLink
           href={back.href}
           className="-ms-1 flex size-target shrink-0 items-center justify-center text-ink"
@@ -52,7 +52,7 @@ export function PadScreen({ wearer, back, desk, taking, at, known, fineness, onP
         >
           <X aria-hidden="true" className="size-6" />
         </AppLink>
-        <h1 className="min-w-0 flex-1 truncate font-figure text-lg font-bold">
+        <h1 className="min-w-0 flex-1 basis-24 truncate font-figure text-lg font-bold">
           <span className="sr-only">Measuring </span>
           {wearer}
         </h1>

@@ -1,3 +1,5 @@
+import { type CSSProperties, type ReactNode } from "react";
+import { cx } from "@/components/ui/cx";
 import { Tape } from "@/components/ui/tape";
 import { Notch } from "@/components/ui/notch";
 import { longDate } from "@/lib/pdf/long-date";
@@ -42,7 +44,7 @@ export function ReceiptCard({ doc, unit }: { doc: ReceiptDocument; unit: Unit })
             <p className="text-lg font-bold wrap-anywhere">{doc.orderTitle}</p>
           </div>
         </div>
-        <div className="card p-4 pt-5" style={{ "--behind": "var(--well)" } as React.CSSProperties}>
+        <div className="card p-4 pt-5" style={{ "--behind": "var(--well)" } as CSSProperties}>
           <Notch label="" className="absolute start-5 top-0 h-3" />
           <div className="flex flex-wrap items-center justify-between gap-x-4 gap-y-1">
             <div>
@@ -54,7 +56,7 @@ export function ReceiptCard({ doc, unit }: { doc: ReceiptDocument; unit: Unit })
         </div>
         <dl className="grid">
           {doc.lines.map((line, i) => (
-            <Pair key={i} value={line.amountText} ruled={i > 0}>
+            <Pair key={i} value={line.amountText} className={i > 0 ? "border-t border-line" : undefined}>
               <span className="block wrap-anywhere">{line.text}</span>
               {!single && (
                 <span className="block text-soft">
@@ -63,24 +65,27 @@ export function ReceiptCard({ doc, unit }: { doc: ReceiptDocument; unit: Unit })
               )}
             </Pair>
           ))}
-          <div className="border-t-2 border-ink font-bold">
-            <Pair value={doc.totalText}>Total</Pair>
-          </div>
+          <Pair value={doc.totalText} className="border-t-2 border-ink font-bold">
+            Total
+          </Pair>
         </dl>
         <dl className="grid">
-          {doc.earlier.length > 0 && <p className="text-sm font-semibold text-soft">Paid before</p>}
           {doc.earlier.map(({ date, label, number, amountText }, i) => (
             <Pair key={i} value={amountText}>
+              {i === 0 && <span className="block text-sm font-semibold text-soft">Paid before</span>}
               {[longDate(date, doc.lang), label, number].filter(Boolean).join(", ")}
             </Pair>
           ))}
           <Pair value={doc.payment.amountText}>{pays.join(", ")}</Pair>
-          <div className="font-bold">
-            <Pair value={doc.receivedText}>Received in all</Pair>
-          </div>
-          <div className="mt-2 border-y-4 border-double border-ink py-1 text-xl font-bold">
-            <Pair value={doc.balanceText}>{doc.balanceLabel}</Pair>
-          </div>
+          <Pair value={doc.receivedText} className="font-bold">
+            Received in all
+          </Pair>
+          <Pair
+            value={doc.balanceText}
+            className="mt-2 border-y-4 border-double border-ink text-xl font-bold"
+          >
+            {doc.balanceLabel}
+          </Pair>
         </dl>
         {doc.thanks && <p className="font-bold">{doc.thanks}</p>}
         {doc.cautions.length > 0 && (
@@ -109,11 +114,9 @@ function Lines({ lines }: { lines: readonly string[] }) {
   ));
 }
 
-function Pair({ value, ruled, children }: { value: string; ruled?: boolean; children: React.ReactNode }) {
+function Pair({ value, className, children }: { value: string; className?: string; children: ReactNode }) {
   return (
-    <div
-      className={`flex flex-wrap items-baseline justify-between gap-x-4 py-1 ${ruled ? "border-t border-line" : ""}`}
-    >
+    <div className={cx("flex flex-wrap items-end justify-between gap-x-4 py-1", className)}>
       <dt className="min-w-0 flex-1 basis-32">{children}</dt>
       <dd className="figures ms-auto whitespace-nowrap">{value}</dd>
     </div>

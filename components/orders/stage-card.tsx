@@ -20,7 +20,7 @@ export interface StageCardProps {
 }
 
 const key =
-  "relative flex min-h-key w-full items-center justify-center gap-1 rounded border-2 px-1 py-2 text-center text-sm touch-manipulation";
+  "relative flex h-full min-h-key w-full items-center justify-center gap-1 rounded border-2 px-1 py-2 text-center text-sm touch-manipulation";
 
 /** How far an order is: any stage by one tap, and the last tap taken back. */
 export function StageCard({ order, due, before, busy, onMove }: StageCardProps) {
@@ -40,7 +40,7 @@ export function StageCard({ order, due, before, busy, onMove }: StageCardProps) 
         }
       />
       <ol
-        className="grid grid-cols-[repeat(auto-fit,minmax(min(100%,5.5rem),1fr))] gap-2"
+        className="grid auto-rows-fr grid-cols-[repeat(auto-fit,minmax(min(100%,5.5rem),1fr))] gap-2"
         aria-label="Stages"
       >
         {stages.map((stage, i) => (
@@ -72,7 +72,7 @@ export function StageCard({ order, due, before, busy, onMove }: StageCardProps) 
         {before && before !== order.stage && (
           <div className="mt-3 flex flex-wrap items-center justify-between gap-x-4">
             <p>
-              Now {stageWords(order.stage).toLowerCase()}, before {stageWords(before).toLowerCase()}.
+              From {stageWords(before).toLowerCase()} to {stageWords(order.stage).toLowerCase()}.
             </p>
             <Button icon={<Undo2 className="size-5" />} busy={busy} onClick={() => onMove(before)}>
               Undo

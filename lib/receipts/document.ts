@@ -26,6 +26,13 @@ export function balanceSaid(balanceMinor: number): BalanceSaid {
   return { label: "Paid in full, balance", minor: 0 };
 }
 
+/** What a payment is called on its own receipt; the title of one for money given back says it already. */
+function paymentLabel(kind: PaymentKind, balanceMinor: number): string {
+  if (kind === "giving-back") return "";
+  if (kind === "payment" && balanceMinor === 0) return "Balance";
+  return kind === "payment" && balanceMinor > 0 ? "Part payment" : kindWords(kind);
+}
+
 export interface DocumentStyle {
   /** BCP 47, for money and days. */
   lang: string;
@@ -42,7 +49,6 @@ export function receiptDocument(
   const { payment } = snapshot;
   const givenBack = payment.kind === "giving-back";
   const balance = balanceSaid(snapshot.balanceMinor);
-  const isLast = payment.kind === "payment" && snapshot.balanceMinor === 0;
   return {
     number,
     issuedOn,
@@ -58,8 +64,7 @@ export function receiptDocument(
     })),
     totalText: money(snapshot.totalMinor),
     payment: {
-      // The title says already that it was given back.
-      label: givenBack ? "" : isLast ? "Balance" : kindWords(payment.kind),
+      label: paymentLabel(payment.kind, snapshot.balanceMinor),
       methodLabel: methodWords(payment.method),
       amountText: money(payment.amountMinor),
     },

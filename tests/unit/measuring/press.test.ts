@@ -1,6 +1,7 @@
 import fc from "fast-check";
 import { describe, expect, it } from "vitest";
 import { fullSet, sleeveSet } from "@/lib/figures/body-measures";
+import { phraseText } from "@/lib/lengths/phrase";
 import { parseLength } from "@/lib/lengths/parse-length";
 import { shownEntry } from "@/lib/measuring/entry";
 import { type Press, press } from "@/lib/measuring/press";
@@ -170,6 +171,17 @@ describe("questions", () => {
     expect(taking).toMatchObject({ at: "handGirth", held: true });
     expect(allOpenQuestions(taking, nothingKnown)).toHaveLength(1);
     expect(allOpenQuestions(press(taking, { do: "right" }, nothingKnown), nothingKnown)).toEqual([]);
+  });
+
+  it("name last time's day in words", () => {
+    const known: Known = {
+      ...grown,
+      previous: { wristGirth: { typed: "5", mm: 127, takenOn: "2026-03-01" } },
+    };
+    const asked = pressAll(fresh(), [{ do: "go", to: "wristGirth" }, ...tap(6, 4)], known);
+    expect(phraseText(allOpenQuestions(asked, known)[0]!.say, "in")).toContain(
+      "Last time, 1 Mar 2026, the wrist girth",
+    );
   });
 
   it("do not ask again about what is usual for her", () => {

@@ -13,7 +13,7 @@ describe("cutting a line into runs", () => {
     ["Latin with marks", "Đường Hoa Sữa, ľahké, żółta, Nguyễn, Ħ, ő"],
     ["Greek", "Ελένη Καλογεράκη, ἀγάπη"],
     ["Cyrillic", "Швейная комната, Їжак, Љубав"],
-    ["signs of currencies", "₦ ₹ ₵ ₫ ₱ ₺ ₽ ₴ ₸ € £ ¥ ¢ ₡ ₲ ₭ ₮".replace(" ₭", "").replace(" ₲", "")],
+    ["signs of currencies", "₦ ₹ ₵ ₫ ₱ ₺ ₽ ₴ ₸ ₡ ₮ € £ ¥ ¢"],
     ["fractions and arrows", "½ ¼ ¾ ⅛ ⅜ ⅝ ⅞ ³⁄₁₆ × ← ↑ → ↓ − ✓"],
   ])("sets %s as text", (_, text) => {
     expect(runs(text)).toEqual([`text:${text}`]);

@@ -196,6 +196,12 @@ describe("a receipt in words", () => {
     });
   });
 
+  it("says that it is a part, while more is to come", () => {
+    const doc = say({ payment: { kind: "payment", method: "card", amountMinor: 1 } });
+    expect(doc.payment).toEqual({ label: "Part payment", methodLabel: "Card", amountText: "£0.01" });
+    expect(doc.balanceText).toBe("£40.49");
+  });
+
   it("says what was given back, and takes it off in later ones", () => {
     const back = { kind: "giving-back" as const, method: "cash" as const, amountMinor: 1000 };
     expect(say({ payment: back })).toMatchObject({
