@@ -10,7 +10,7 @@ import { Length, Phrase } from "@/components/ui/fraction";
 import { Notice } from "@/components/ui/notice";
 import { Screen } from "@/components/ui/screen";
 import { ChecksList } from "./checks-list";
-import { type Place } from "./marks-screen";
+import { type Place } from "./place";
 import { PrintMarks } from "./print-marks";
 import { StepDrawing } from "./step-drawing";
 

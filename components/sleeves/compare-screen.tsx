@@ -202,7 +202,7 @@ interface FiguresTableProps {
 function FiguresTable({ fineness, letters, rows, unit }: FiguresTableProps) {
   const units = { unit, fineness };
   return (
-    <div role="region" aria-labelledby="figures-title" tabIndex={0} className="relative overflow-x-auto">
+    <div role="region" aria-label="Table of figures" tabIndex={0} className="relative overflow-x-auto">
       <table className="w-full border-collapse">
         <thead>
           <tr>

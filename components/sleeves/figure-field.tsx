@@ -65,9 +65,9 @@ export const FigureField = memo(function FigureField(props: FigureFieldProps) {
         error={shown}
         hint={said?.length ? <Phrase parts={said} unit={unit} fineness={fineness} /> : how}
       >
-        <span className="flex items-stretch gap-2">
+        <span className="step-row">
           <StepKey way={-1} words={`${name}, less`} onStep={step} />
-          <span className="min-w-0 flex-1">
+          <span className="step-field">
             <TextInput
               figure
               after={unit}
@@ -103,7 +103,7 @@ function StepKey({ onStep, way, words }: StepKeyProps) {
     <button
       type="button"
       {...hold}
-      className="flex min-h-key w-13 shrink-0 touch-manipulation items-center justify-center rounded border-2 border-edge bg-well select-none active:bg-ink active:text-onink"
+      className="flex min-h-key min-w-13 touch-manipulation items-center justify-center rounded border-2 border-edge bg-well select-none active:bg-ink active:text-onink"
     >
       <Sign aria-hidden="true" className="size-6" />
       <span className="sr-only">{words}</span>
@@ -116,7 +116,7 @@ const words = ["0", "⅛", "¼", "⅜", "½", "⅝", "¾", "⅞"] as const;
 
 function Eighths({ name, onEighth }: { name: string; onEighth(eighth: number): void }) {
   return (
-    <span role="group" aria-label={`${name}, the odd eighths`} className="grid grid-cols-8 gap-1">
+    <span role="group" aria-label={`${name}, the odd eighths`} className="grid grid-cols-4 gap-1.5">
       {eighths.map((n) => (
         <button
           key={n}

@@ -79,7 +79,7 @@ export function FiguresForm(props: FiguresFormProps) {
       />
       <Card aria-labelledby="figures-title">
         <CardHead id="figures-title" title="Figures" />
-        <div className="grid gap-5">
+        <div className="grid grid-cols-[minmax(0,1fr)] gap-5">
           {form.reach && (
             <Choice
               label="How long"
@@ -156,7 +156,7 @@ export function FiguresForm(props: FiguresFormProps) {
           title="To check it by"
           sub="None is needed. Each brings a check against the arm or the bodice."
         />
-        <div className="grid gap-5">
+        <div className="grid grid-cols-[minmax(0,1fr)] gap-5">
           {capBy === "given" && <ArmholeFields {...{ armholeBy, field, onPatch }} />}
           {bicepsBy === "given" && field("upperArm")}
           {field("hand")}
@@ -224,7 +224,7 @@ function GuideMarks({ beside, field, form, made, onPatch }: MarksProps) {
           </h2>
         </summary>
         {open && (
-          <div className="mt-3 grid gap-5">
+          <div className="mt-3 grid grid-cols-[minmax(0,1fr)] gap-5">
             <p className="text-soft">
               The cap seam runs through marks set out from a straight line, underarm to crown. The rule
               (common practice, no source) grows with the biceps line until a mark is changed by hand.

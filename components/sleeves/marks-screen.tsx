@@ -21,6 +21,7 @@ import { AllSteps } from "./all-steps";
 import { BinnedSleeve } from "./binned-sleeve";
 import { NotHere } from "./not-here";
 import { OneStep } from "./one-step";
+import { type Place } from "./place";
 
 const NOT_HERE = "This sleeve is not in the book.";
 
@@ -43,12 +44,6 @@ function Marks({ id, ...workplace }: Workplace & { id: string }) {
   if (!found) return <NotHere title="Mark out" state={state} say={NOT_HERE} />;
   if (found.sleeve.removedAt !== null) return <BinnedSleeve sleeve={found.sleeve} />;
   return <MarkOut found={found} {...workplace} />;
-}
-
-/** Where she is: which step, one at a time or all on one page. */
-export interface Place {
-  at: number;
-  all: boolean;
 }
 
 function MarkOut({ found, unit, workshopName }: Workplace & { found: SleeveView }) {

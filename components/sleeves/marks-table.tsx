@@ -43,70 +43,74 @@ export function MarksTable({
       shown.map((mark, i) => (i === index ? { ...mark, ...patch } : mark)),
     );
   return (
-    <div className="grid gap-2">
-      <table className="w-full border-collapse text-start">
-        <caption className="mb-1 text-start font-semibold">
-          <Notch count={side === "front" ? 1 : 2} label="" className="me-2 inline" />
-          {name} marks{texts ? ", changed by hand" : ", as the rule has them"}
-        </caption>
-        <thead>
-          <tr className="text-sm text-soft">
-            <th scope="col" className="pe-2 text-start font-normal">
-              Mark
-            </th>
-            <th scope="col" className="text-start font-normal">
-              Up the line
-            </th>
-            <th scope="col" className="text-start font-normal" colSpan={2}>
-              Out or in
-            </th>
-          </tr>
-        </thead>
-        <tbody>
-          {shown.map((mark, index) => {
-            const words = `${name}, ${ordinals[index] ?? index + 1} mark`;
-            return (
-              <tr key={index}>
-                <th scope="row" className="figures pe-2 text-start">
-                  {index + 1}
-                </th>
-                <td className="w-24 py-1 pe-1">
-                  <TextInput
-                    figure
-                    after="%"
-                    aria-label={`${words}: hundredths up the guide line`}
-                    aria-invalid={problems.some((p) => p.index === index && p.cell === "share") || undefined}
-                    value={mark.shareTyped ?? shareText(mark.share)}
-                    onChange={(event) => set(index, { shareTyped: event.target.value })}
-                    className="px-2 pe-7"
-                  />
-                </td>
-                <td className="py-1 pe-1">
-                  <TextInput
-                    figure
-                    aria-label={`${words}: how far from the guide line`}
-                    aria-invalid={problems.some((p) => p.index === index && p.cell === "out") || undefined}
-                    value={mark.outTyped ?? formatLength(mark.out, unit, fineness).figure}
-                    onChange={(event) => set(index, { outTyped: event.target.value })}
-                    className="px-2"
-                  />
-                </td>
-                <td className="w-24 py-1">
-                  <Select
-                    aria-label={`${words}: raised or hollowed`}
-                    value={mark.raised ? "out" : "in"}
-                    onChange={(event) => set(index, { raised: event.target.value === "out" })}
-                    className="px-2"
-                  >
-                    <option value="out">out</option>
-                    <option value="in">in</option>
-                  </Select>
-                </td>
-              </tr>
-            );
-          })}
-        </tbody>
-      </table>
+    <div className="grid grid-cols-[minmax(0,1fr)] gap-2">
+      <div className="relative overflow-x-auto">
+        <table className="w-full border-collapse text-start">
+          <caption className="mb-1 text-start font-semibold">
+            <Notch count={side === "front" ? 1 : 2} label="" className="me-2 inline" />
+            {name} marks{texts ? ", changed by hand" : ", as the rule has them"}
+          </caption>
+          <thead>
+            <tr className="text-sm text-soft">
+              <th scope="col" className="pe-2 text-start font-normal">
+                Mark
+              </th>
+              <th scope="col" className="text-start font-normal">
+                Up the line
+              </th>
+              <th scope="col" className="text-start font-normal" colSpan={2}>
+                Out or in
+              </th>
+            </tr>
+          </thead>
+          <tbody>
+            {shown.map((mark, index) => {
+              const words = `${name}, ${ordinals[index] ?? index + 1} mark`;
+              return (
+                <tr key={index}>
+                  <th scope="row" className="figures pe-2 text-start">
+                    {index + 1}
+                  </th>
+                  <td className="w-24 py-1 pe-1">
+                    <TextInput
+                      figure
+                      after="%"
+                      aria-label={`${words}: hundredths up the guide line`}
+                      aria-invalid={
+                        problems.some((p) => p.index === index && p.cell === "share") || undefined
+                      }
+                      value={mark.shareTyped ?? shareText(mark.share)}
+                      onChange={(event) => set(index, { shareTyped: event.target.value })}
+                      className="px-2 pe-7"
+                    />
+                  </td>
+                  <td className="py-1 pe-1">
+                    <TextInput
+                      figure
+                      aria-label={`${words}: how far from the guide line`}
+                      aria-invalid={problems.some((p) => p.index === index && p.cell === "out") || undefined}
+                      value={mark.outTyped ?? formatLength(mark.out, unit, fineness).figure}
+                      onChange={(event) => set(index, { outTyped: event.target.value })}
+                      className="px-2"
+                    />
+                  </td>
+                  <td className="w-24 py-1">
+                    <Select
+                      aria-label={`${words}: raised or hollowed`}
+                      value={mark.raised ? "out" : "in"}
+                      onChange={(event) => set(index, { raised: event.target.value === "out" })}
+                      className="px-2"
+                    >
+                      <option value="out">out</option>
+                      <option value="in">in</option>
+                    </Select>
+                  </td>
+                </tr>
+              );
+            })}
+          </tbody>
+        </table>
+      </div>
       {problems.map(({ cell, index, say }) => (
         <FieldError key={`${index}${cell}`}>
           {name} mark {index + 1}: {say}

@@ -9,7 +9,7 @@ import { Button } from "@/components/ui/button";
 import { Length, Phrase } from "@/components/ui/fraction";
 import { Notice } from "@/components/ui/notice";
 import { Screen } from "@/components/ui/screen";
-import { type Place } from "./marks-screen";
+import { type Place } from "./place";
 import { StepDrawing } from "./step-drawing";
 import { useWakeLock } from "./use-wake-lock";
 

@@ -24,7 +24,7 @@ export const SleeveDetails = memo(function SleeveDetails(props: SleeveDetailsPro
   return (
     <Card aria-labelledby="details-title">
       <CardHead id="details-title" title="Name and wearer" />
-      <div className="grid gap-5">
+      <div className="grid grid-cols-[minmax(0,1fr)] gap-5">
         <Field
           label="Name"
           optional

@@ -1,6 +1,6 @@
 "use client";
 
-import { useState } from "react";
+import { useMemo, useState } from "react";
 import { useSearchParams } from "next/navigation";
 import { useIdParam } from "@/components/clients/use-id-param";
 import { useView, useWorkshop } from "@/components/store/use-book";
@@ -121,7 +121,9 @@ function Drafting({ draftKey, justKept = false, onKept, set, sleeve, wearer, wor
     });
     return fillFromSet({ ...empty, setId: set.id, reach }, ask, null);
   });
-  if (handle.draft === undefined)
+  const { draft } = handle;
+  const begun = useMemo(() => (draft ? restoredForm(draft, unit, fineness) : null), [draft, unit, fineness]);
+  if (draft === undefined)
     return (
       <Screen title={sleeve ? sleeve.name : "Draft a sleeve"} back={backToSleeves}>
         <Progress label="Opening the book" />
@@ -129,7 +131,7 @@ function Drafting({ draftKey, justKept = false, onKept, set, sleeve, wearer, wor
     );
   return (
     <SleeveEditor
-      begun={handle.draft ? restoredForm(handle.draft, unit, fineness) : null}
+      begun={begun}
       {...{ draftKey, initial, sleeve, wearer, set, handle, justKept, today }}
       onKept={onKept}
     />

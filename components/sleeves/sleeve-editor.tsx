@@ -1,6 +1,6 @@
 "use client";
 
-import { useCallback, useDeferredValue, useMemo, useState } from "react";
+import { useCallback, useDeferredValue, useEffect, useMemo, useRef, useState } from "react";
 import { useRouter } from "next/navigation";
 import { BroughtBack, KeepTrouble } from "@/components/clients/form-notices";
 import { BinAsk } from "@/components/clients/bin-ask";
@@ -84,6 +84,12 @@ export function SleeveEditor(props: SleeveEditorProps) {
   const laterMade = useDeferredValue(made);
   const laterBeside = useDeferredValue(beside);
 
+  // Fields that are empty are only marked once Keep was pressed, a moment after it.
+  const leadOn = useRef(false);
+  useEffect(() => {
+    if (leadOn.current) leadOn.current = !focusFirstBad();
+  }, [laterBeside]);
+
   const onType = useCallback((key: FigureKey, text: string) => {
     setForm((now) => ({ ...now, typed: { ...now.typed, [key]: text } }));
   }, []);
@@ -97,7 +103,7 @@ export function SleeveEditor(props: SleeveEditorProps) {
   const keepIt = async (then: "marks" | "stay") => {
     setPressed(true);
     if (blocked) {
-      focusFirstBad();
+      leadOn.current = !focusFirstBad();
       return;
     }
     const id = sleeve?.id ?? newId();
@@ -165,7 +171,7 @@ export function SleeveEditor(props: SleeveEditorProps) {
           head={<HeadLineView {...{ line, unit, fineness }} checks={made?.ok ? made.checks : undefined} />}
           onFigure={onHandle}
         />
-        <div className="sleeve-form grid min-w-0 content-start gap-5">
+        <div className="sleeve-form grid min-w-0 grid-cols-[minmax(0,1fr)] content-start gap-5">
           <FiguresForm
             {...{ form, set, wearer, today }}
             beside={laterBeside}
@@ -214,7 +220,9 @@ function blockedWords(read: ReturnType<typeof readForm>, drawn: boolean): string
     : "This sleeve cannot be drawn yet. Put right what is marked above, then keep it.";
 }
 
-function focusFirstBad(): void {
-  // After the errors have been set out.
-  setTimeout(() => document.querySelector<HTMLElement>('.sleeve-form [aria-invalid="true"]')?.focus(), 0);
+/** Whether there was a marked field to go to. */
+function focusFirstBad(): boolean {
+  const field = document.querySelector<HTMLElement>('.sleeve-form [aria-invalid="true"]');
+  field?.focus();
+  return field !== null;
 }

@@ -66,7 +66,7 @@ export const StepDrawing = memo(function StepDrawing({ className, picture }: Ste
                 <circle
                   cx={at.x}
                   cy={at.y}
-                  r={point.fresh ? 7 : 3.5}
+                  r={point.fresh ? 7 : Math.min(3.5, Math.max(1.5, view.scale * 7))}
                   fill={point.fresh ? "var(--ink)" : "var(--chalk)"}
                   stroke="var(--well)"
                   strokeWidth={point.fresh ? 2 : 0}

@@ -22,7 +22,7 @@ export function usualBicepsEase(upperArmMm: number): number {
 }
 
 /** What the engine is asked, or null where a figure that it needs is not there. */
-export function askOf({ lengths, frontMarks, backMarks, hemOpens }: SleeveAskRecord): SleeveAsk | null {
+function askOf({ lengths, frontMarks, backMarks, hemOpens }: SleeveAskRecord): SleeveAsk | null {
   const mm = (key: FigureKey): number | undefined =>
     lengths[key] && lengths[key].typed !== "" ? lengths[key].mm : undefined;
   const length = mm("length");

@@ -8,14 +8,13 @@ import {
   type MarkStep,
   type Point,
   type PointName,
-  type SleeveDraft,
 } from "@/lib/drafting";
 import { type Phrase } from "@/lib/lengths/phrase";
 import { type Box } from "@/lib/sleeves/drawing-view";
 
 type Good = MadeSleeve & { ok: true };
 
-export interface DrawnPoint extends Point {
+interface DrawnPoint extends Point {
   name: PointName;
   words: string;
   /** Set by this step. */
@@ -36,7 +35,7 @@ export interface StepPicture {
 }
 
 /** A point in a word or two, beside its dot. */
-export function pointWords(name: PointName): string {
+function pointWords(name: PointName): string {
   if (/^mark/u.test(name)) return `${name.replace(/\D/gu, "")}`;
   if (/^foot/u.test(name)) return "";
   const words: Partial<Record<PointName, string>> = {
@@ -99,11 +98,6 @@ function boxOfStep({ draft, figures }: Good, step: MarkStep): Box {
     (drawn.length === 0 || inCap(bounds(drawn).max.y));
   const wide = Math.max(figures.biceps, onlyCap ? 0 : figures.hem, onlyCap ? 0 : (figures.elbow?.width ?? 0));
   return { x: -wide / 2, y: 0, w: wide, h: onlyCap ? figures.capDepth : figures.length };
-}
-
-/** The picture of the finished sleeve, for the list and the last step. */
-export function outlineCurves({ piece }: SleeveDraft): CubicBezier[] {
-  return piece.edges.flatMap((edge) => [...edge.curves]);
 }
 
 /** What rounding the marks has moved, said so that it can be trusted: tenths of a millimetre, whatever the unit. */

@@ -10,7 +10,10 @@ import { beginWorkshop, expect, test, untilDatabaseOpen, untilReadyWithoutALine 
 /** Taps a figure on the pad: whole inches, then the eighths key, which moves on by itself. */
 async function tap(page: Page, whole: string, eighths: RegExp): Promise<void> {
   for (const digit of whole) await page.getByRole("button", { name: digit, exact: true }).click();
-  await page.getByRole("group", { name: /^Eighths/ }).getByRole("button", { name: eighths }).click();
+  await page
+    .getByRole("group", { name: /^Eighths/ })
+    .getByRole("button", { name: eighths })
+    .click();
   const right = page.getByRole("button", { name: "It is right" });
   if (await right.isVisible()) await right.click();
 }

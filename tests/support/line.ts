@@ -35,7 +35,8 @@ export class Line {
       const path = incoming.url ?? "";
       const pass = () => {
         const headers = { ...incoming.headers };
-        if (this.appended.has(path)) delete headers["accept-encoding"];
+        if (this.appended.has(path))
+          for (const name of ["accept-encoding", "if-none-match", "if-modified-since"]) delete headers[name];
         const passed = request({ port: this.target, path, method: incoming.method, headers }, (response) => {
           const entry: Counted = { path, bytes: 0 };
           this.counted.push(entry);
