@@ -21,6 +21,8 @@ export const test = base.extend<{ server: AppServer; page: Page }>({
       // A stopped server is an ordinary day: the browser notes it in red, the app must not.
       if (message.type() === "error" && !/Failed to load resource|net::ERR_/.test(message.text()))
         problems.push(message.text());
+      // Only tests that spoil the database may see it made anew; they have browsers of their own.
+      if (message.type() === "warning" && message.text().includes("made anew")) problems.push(message.text());
     });
     await provide(page);
     expect(problems.filter((problem) => !problem.startsWith("ErrnoError"))).toEqual([]);
