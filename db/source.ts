@@ -1,5 +1,6 @@
 /** `RowSource` on any of our databases, by Drizzle. */
 import { and, asc, desc, eq, inArray, isNotNull, isNull, ne, sql } from "drizzle-orm";
+import { validate as isUuid } from "uuid";
 import { type PgColumn, type PgTable } from "drizzle-orm/pg-core";
 import { type AnyRow } from "@/lib/journal/merge";
 import { type TableName } from "@/lib/records/types";
@@ -16,18 +17,20 @@ export function drizzleSource(db: BookDatabase, workshopId: string): RowSource {
 
   return {
     workshop: () => rows(db.select().from(bookTables.workshops).where(of("workshops")).then()),
-    byIds: async (name, ids) => {
+    byIds: async (name, asked) => {
+      const ids = asked.filter((id) => isUuid(id));
       if (ids.length === 0) return [];
       const table = tableOf(name);
       return rows(
         db
           .select()
           .from(table)
-          .where(and(of(name), inArray(table.id, [...ids])))
+          .where(and(of(name), inArray(table.id, ids)))
           .then(),
       );
     },
-    byParents: async (name, column, ids) => {
+    byParents: async (name, column, asked) => {
+      const ids = asked.filter((id) => isUuid(id));
       if (ids.length === 0) return [];
       const table = tableOf(name);
       const parent = (table as unknown as Record<string, PgColumn | undefined>)[column];
@@ -36,7 +39,7 @@ export function drizzleSource(db: BookDatabase, workshopId: string): RowSource {
         db
           .select()
           .from(table)
-          .where(and(of(name), inArray(parent, [...ids])))
+          .where(and(of(name), inArray(parent, ids)))
           .then(),
       );
     },

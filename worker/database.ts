@@ -10,6 +10,7 @@ import { applyChanges, type BookDatabase, checkCounts, readMark } from "@/db/app
 import { deleteOthers, fetchEngine, openDatabase, type OpenDatabase } from "@/db/browser/open";
 import { bookTables } from "@/db/schema";
 import { drizzleSource } from "@/db/source";
+import { isSpoilt } from "@/db/spoilt";
 import { type Head, openJournal } from "@/lib/journal/journal";
 import { type AnyRow } from "@/lib/journal/merge";
 import { strictStore } from "@/lib/journal/strict-store";
@@ -110,6 +111,7 @@ class Leader {
     try {
       return await question(this.open!.db);
     } catch (error) {
+      if (!isSpoilt(error)) throw error;
       await this.rebuild(error);
       this.ready();
       return question(this.open!.db);

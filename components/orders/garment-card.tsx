@@ -35,13 +35,13 @@ export function GarmentCard({ form, at, people, today, otherNames, onLeaveOut }:
   };
 
   return (
-    <Card aria-label={name}>
+    <Card aria-label={`Garment ${at + 1}, ${name}`}>
       <CardHead
         level={3}
         title={name}
         end={
           onLeaveOut && (
-            <Button variant="quiet" onClick={onLeaveOut} aria-label={`Leave out ${name}`}>
+            <Button variant="quiet" onClick={onLeaveOut} aria-label={`Leave out garment ${at + 1}, ${name}`}>
               Leave out
             </Button>
           )

@@ -14,7 +14,6 @@ import { Notice } from "@/components/ui/notice";
 import { Screen } from "@/components/ui/screen";
 import { edit, setRemoved } from "@/lib/journal/change";
 import { orderBinQuestion } from "@/lib/orders/bin-order";
-import { dueWords } from "@/lib/orders/day-words";
 import { orderCautions } from "@/lib/orders/order-cautions";
 import { orderName } from "@/lib/orders/order-name";
 import { sayMoney } from "@/lib/orders/say-money";
@@ -114,11 +113,11 @@ function LiveOrder({ view }: { view: OrderCardView }) {
         )
       }
     >
-      <StageCard order={order} due={dueWords(order, today)} before={before} busy={busy} onMove={moveTo} />
+      <StageCard order={order} today={today} before={before} busy={busy} onMove={moveTo} />
       {!act && <KeepTrouble keep={problem} draft={null} />}
       <BalanceCard view={view} onTake={() => setMoney("take")} onGiveBack={() => setMoney("give-back")} />
       <OrderGarments view={view} today={today} />
-      <CautionsNotice cautions={cautions} />
+      <CautionsNotice cautions={cautions} folded={order.stage !== "agreed"} />
       <PriceLines view={view} />
       <Payments view={view} />
       {order.note && (

@@ -4,7 +4,7 @@ import { ButtonLink } from "@/components/ui/button";
 import { Card, CardHead } from "@/components/ui/card";
 import { staleness } from "@/lib/figures/staleness";
 import { setChoiceWords } from "@/lib/orders/garment-choices";
-import { fittingWords } from "@/lib/orders/day-words";
+import { countdownWords } from "@/lib/orders/day-words";
 import { ageOn } from "@/lib/people/age";
 import { formatDay } from "@/lib/people/format-day";
 import { type IsoDate } from "@/lib/people/iso-date";
@@ -107,7 +107,7 @@ function GarmentView({
             <dt className="text-soft">Fitting</dt>
             <dd>
               {formatDay(garment.fittingOn, { style: "long" })}
-              {open && <>, {fittingWords(garment.fittingOn, today).say}</>}
+              {open && <>, {countdownWords(garment.fittingOn, today)}</>}
             </dd>
           </>
         )}

@@ -4,10 +4,11 @@ import { type ReactNode } from "react";
 import { type UseFormReturn, useWatch } from "react-hook-form";
 import { Field, TextArea, TextInput } from "@/components/ui/field";
 import { type Currency } from "@/lib/money/currencies";
+import { countdownWords } from "@/lib/orders/day-words";
 import { type OrderCaution, orderCautions } from "@/lib/orders/order-cautions";
 import { type GarmentValues, type OrderValues } from "@/lib/orders/order-form";
 import { formatDay } from "@/lib/people/format-day";
-import { daysBetween, type IsoDate } from "@/lib/people/iso-date";
+import { type IsoDate } from "@/lib/people/iso-date";
 import { type OrderPeopleView } from "@/lib/store/queries/orders";
 import { CautionsNotice } from "./cautions-notice";
 import { GarmentsFields } from "./garments-fields";
@@ -45,9 +46,8 @@ export function typedCautions(
 function dueHint(dueOn: string, today: IsoDate): string | undefined {
   if (dueOn === "") return undefined;
   try {
-    const days = daysBetween(today, dueOn);
-    if (days < 0) return "That day is past.";
-    return `${formatDay(dueOn, { style: "long" })}, ${days === 0 ? "today" : days === 1 ? "tomorrow" : `in ${days} days`}.`;
+    if (dueOn < today) return `${formatDay(dueOn, { style: "long" })}. That day is past.`;
+    return `${formatDay(dueOn, { style: "long" })}, ${countdownWords(dueOn, today)}.`;
   } catch {
     // Half typed: nothing to say as yet.
     return undefined;

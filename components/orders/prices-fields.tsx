@@ -109,7 +109,7 @@ function PriceLine({
       <Field label="For" error={errors?.text?.message}>
         <TextInput {...form.register(`lines.${at}.text`)} autoComplete="off" />
       </Field>
-      <div className="grid grid-cols-[minmax(4.5rem,1fr)_minmax(0,2.5fr)] gap-3">
+      <div className="grid grid-cols-[minmax(6rem,1fr)_minmax(0,2fr)] items-start gap-3">
         <Field label="How many" error={errors?.quantity?.message}>
           <TextInput figure inputMode="numeric" {...form.register(`lines.${at}.quantity`)} />
         </Field>

@@ -5,14 +5,15 @@ import { Button } from "@/components/ui/button";
 import { Card, CardHead } from "@/components/ui/card";
 import { cx } from "@/components/ui/cx";
 import { stageWords } from "@/lib/clients/order-words";
-import { type DayWords } from "@/lib/orders/day-words";
+import { countdownWords, dueWords } from "@/lib/orders/day-words";
 import { stages } from "@/lib/orders/stages";
 import { formatDay } from "@/lib/people/format-day";
+import { type IsoDate } from "@/lib/people/iso-date";
 import { type Order, type Stage } from "@/lib/records/types";
 
 export interface StageCardProps {
   order: Order;
-  due: DayWords | null;
+  today: IsoDate;
   /** The stage before the last move, while that can be taken back. */
   before: Stage | null;
   busy: boolean;
@@ -23,8 +24,9 @@ const key =
   "relative flex h-full min-h-key w-full items-center justify-center gap-1 rounded border-2 px-1 py-2 text-center text-sm touch-manipulation";
 
 /** How far an order is: any stage by one tap, and the last tap taken back. */
-export function StageCard({ order, due, before, busy, onMove }: StageCardProps) {
+export function StageCard({ order, today, before, busy, onMove }: StageCardProps) {
   const at = stages.indexOf(order.stage);
+  const due = dueWords(order, today);
   return (
     <Card aria-labelledby="stage">
       <CardHead
@@ -34,7 +36,7 @@ export function StageCard({ order, due, before, busy, onMove }: StageCardProps) 
         end={
           due && (
             <p className={cx("text-lg font-bold", due.late && "text-pin")}>
-              {due.say.slice(0, 1).toUpperCase() + due.say.slice(1)}
+              {due.late || order.dueOn === null ? due.say : countdownWords(order.dueOn, today)}
             </p>
           )
         }

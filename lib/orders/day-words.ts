@@ -16,6 +16,13 @@ export function dueWords({ dueOn, stage }: Pick<Order, "dueOn" | "stage">, today
   return { say: `due ${formatDay(dueOn, { style: "relative", today })}`, late: false };
 }
 
+/** How far off a day is: "4 days ago", "today", "in 19 days". */
+export function countdownWords(day: IsoDate, today: IsoDate): string {
+  const days = daysBetween(today, day);
+  if (days < -1) return `${-days} days ago`;
+  return days > 1 ? `in ${days} days` : formatDay(day, { style: "relative", today });
+}
+
 /** When a fitting is: "tomorrow", "Friday"; one that is past stands out: "3 days ago". */
 export function fittingWords(fittingOn: IsoDate, today: IsoDate): DayWords {
   const days = daysBetween(fittingOn, today);

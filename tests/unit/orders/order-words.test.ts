@@ -1,6 +1,6 @@
 import { describe, expect, it } from "vitest";
 import { orderBinQuestion } from "@/lib/orders/bin-order";
-import { dueWords, fittingWords } from "@/lib/orders/day-words";
+import { countdownWords, dueWords, fittingWords } from "@/lib/orders/day-words";
 import { ordersCountWords, readOrdersPlace } from "@/lib/orders/list-place";
 import { orderCautions, receiptCautions } from "@/lib/orders/order-cautions";
 import { forWhom, orderName } from "@/lib/orders/order-name";
@@ -37,6 +37,19 @@ describe("when an order is due", () => {
     ["2026-11-27", "4 days ago", true],
   ])("a fitting on %s: %s", (on, say, late) => {
     expect(fittingWords(on, today)).toEqual({ say, late });
+  });
+});
+
+describe("how far off a day is", () => {
+  it.each([
+    ["2026-11-27", "4 days ago"],
+    ["2026-11-30", "yesterday"],
+    ["2026-12-01", "today"],
+    ["2026-12-02", "tomorrow"],
+    ["2026-12-03", "in 2 days"],
+    ["2027-01-02", "in 32 days"],
+  ])("%s: %s", (day, say) => {
+    expect(countdownWords(day, today)).toBe(say);
   });
 });
 

@@ -1,8 +1,10 @@
 import { type PGlite } from "@electric-sql/pglite";
+import { sql } from "drizzle-orm";
 import fc from "fast-check";
 import { afterAll, beforeAll, describe, expect, it } from "vitest";
 import { applyChanges, type BookDatabase, checkCounts, readMark } from "@/db/apply";
 import { drizzleSource } from "@/db/source";
+import { isSpoilt } from "@/db/spoilt";
 import { type Change } from "@/lib/journal/change";
 import { type AnyRow, overlay, type Rows } from "@/lib/journal/merge";
 import { type TableName, tableNames } from "@/lib/records/types";
@@ -57,6 +59,16 @@ const asked: [string, unknown][] = [
   ...["open", "owing", "all"].map((show): [string, unknown] => ["orderList", { show, limit: 3 }]),
   ...[0, 1].map((n): [string, unknown] => ["orderCard", { id: idOf(5, n) }]),
   ["receipt", { id: idOf(9, 0) }],
+  // Addresses are cut short and mistyped: no row, and no error either.
+  ...["", "nonsense"].flatMap((id): [string, unknown][] => [
+    ["clientCard", { id }],
+    ["wearerCard", { id }],
+    ["setCard", { id }],
+    ["orderCard", { id }],
+    ["orderPeople", { clientId: id }],
+    ["receipt", { id }],
+    ["sleeves", { ids: [id] }],
+  ]),
   ["bin", {}],
 ];
 
@@ -92,6 +104,16 @@ describe("applying the journal to PGlite", () => {
       `delete from ${{ clients: "clients", wearers: "wearers", orders: "orders", priceLines: "price_lines", payments: "payments" }[table as "clients"]}`,
     );
     await expect(checkCounts(db, await readMark(db, DEVICE))).rejects.toThrow(/0 rows where \d were kept/);
+  });
+});
+
+describe("an error of the database", () => {
+  it("is told apart: a bad question is not a spoilt database", async () => {
+    const bad = await db.execute(sql`select 'x'::uuid`).catch((error: unknown) => error);
+    expect(isSpoilt(bad)).toBe(false);
+    expect(isSpoilt(Object.assign(new Error("invalid page"), { code: "XX001" }))).toBe(true);
+    expect(isSpoilt(new Error("outer", { cause: { code: "58030" } }))).toBe(true);
+    expect(isSpoilt(new WebAssembly.RuntimeError("unreachable"))).toBe(true);
   });
 });
 
