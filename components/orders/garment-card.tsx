@@ -1,12 +1,11 @@
 "use client";
 
 import { TriangleAlert } from "lucide-react";
-import { type UseFormReturn, useWatch } from "react-hook-form";
+import { useWatch } from "react-hook-form";
 import { Button, ButtonLink } from "@/components/ui/button";
 import { Card, CardHead } from "@/components/ui/card";
 import { Field, Select, TextArea, TextInput } from "@/components/ui/field";
 import { setChoiceWords, sleevesFor, withWearer } from "@/lib/orders/garment-choices";
-import { type OrderValues } from "@/lib/orders/order-form";
 import { staleness } from "@/lib/figures/staleness";
 import { ageOn } from "@/lib/people/age";
 import { type WearerChoice } from "@/lib/store/queries/orders";

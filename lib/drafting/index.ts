@@ -1,12 +1,9 @@
 /** What the app may use of the drafting engine. Pure: lengths in mm, nothing rounded, nothing read or written. */
 export type {
   CubicBezier,
-  DraftProblem,
-  Edge,
   EdgeName,
   FigureName,
   GuideMark,
-  Notch,
   Phrase,
   Piece,
   Point,
@@ -16,10 +13,9 @@ export type {
   SleeveFigures,
 } from "@/lib/drafting/types";
 export type { LineName, PointName, SleeveDraft } from "@/lib/drafting/basic-sleeve";
-export type { Check, SourceMark, Verdict } from "@/lib/drafting/checks";
+export type { Check, Verdict } from "@/lib/drafting/checks";
 export type { MadeSleeve } from "@/lib/drafting/make-sleeve";
-export type { DrawnLine, MarkStep, Move } from "@/lib/drafting/mark-steps";
-export type { Seam, WalkedSeam } from "@/lib/drafting/seams";
+export type { MarkStep } from "@/lib/drafting/mark-steps";
 export { draftBasicSleeve } from "@/lib/drafting/basic-sleeve";
 export { defaultBeside, defaultMarks, defaultNotches, INCH } from "@/lib/drafting/guide";
 export { makeSleeve, remakeSleeve } from "@/lib/drafting/make-sleeve";

@@ -9,6 +9,7 @@
 import { promisifyRequest, type UseStore } from "idb-keyval";
 import { v4 as uuidv4 } from "uuid";
 import { type Clock, newClock, observe, tick, writeStamp } from "@/lib/clock/stamp";
+import { addOnlyTables } from "@/lib/records/types";
 import { receiptNumber, seriesOf } from "@/lib/receipts/number";
 import { type Change, newId, type RowChange, SCHEMA_NUMBER, type Write } from "./change";
 import { upgradeChange } from "./upgrade";
@@ -79,7 +80,11 @@ function freshHead(workshopId: string = newId()): Head {
   };
 }
 
+/** @throws where a write would change what is only ever added to (sync contract P3): a fault of the caller. */
 function stamped(writes: Write[], stamp: string): RowChange[] {
+  for (const { table, makes } of writes)
+    if (!makes && addOnlyTables.has(table))
+      throw new Error(`${table} are put right by adding, never changed`);
   return writes
     .filter((write) => write.makes || Object.keys(write.fields).length > 0)
     .map(({ table, id, makes, fields, bases }) => ({

@@ -1,5 +1,5 @@
 /** A server of our own for each test, which the test may stop and start, on one port: one origin. */
-import { test as base, type BrowserContext, chromium, expect, type Page } from "@playwright/test";
+import { test as base, expect, type Page } from "@playwright/test";
 import { mkdtempSync, rmSync } from "node:fs";
 import { tmpdir } from "node:os";
 import { join } from "node:path";
@@ -43,20 +43,6 @@ export async function untilDatabaseOpen(page: Page): Promise<void> {
   const line = page.locator(".kept-line");
   await expect(line).toHaveText(/^Kept on this phone · (?!opening|reading|the book does not)/, {
     timeout: 60_000,
-  });
-}
-
-/** A browser with a profile on the disk, to be killed and started again. */
-export async function openProfile(
-  dir: string,
-  options: { width?: number; height?: number } = {},
-): Promise<BrowserContext> {
-  return chromium.launchPersistentContext(dir, {
-    executablePath: process.env.CHROMIUM ?? "/usr/bin/chromium",
-    args: ["--no-sandbox", "--disable-background-networking", "--disable-component-update", "--disable-sync"],
-    viewport: { width: options.width ?? 360, height: options.height ?? 740 },
-    locale: "en-GB",
-    timezoneId: "Europe/Malta",
   });
 }
 

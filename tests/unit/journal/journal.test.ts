@@ -40,6 +40,19 @@ describe("the journal", () => {
     expect(edited.rows[0]!.fields.name!.stamp > made.rows[0]!.fields.name!.stamp).toBe(true);
   });
 
+  it("P3 refuses to change what is only ever added to", async () => {
+    const { journal } = fresh();
+    const payment: Write = {
+      table: "payments",
+      id: newId(),
+      makes: false,
+      fields: { amountMinor: 1 },
+      bases: {},
+    };
+    await expect(journal.append(() => [payment])).rejects.toThrow("never changed");
+    expect(await journal.since(0)).toEqual([]);
+  });
+
   it("keeps nothing of a change that fails while it is built, and takes no number for it", async () => {
     const { journal } = fresh();
     await journal.append(() => [client("Ada")]);

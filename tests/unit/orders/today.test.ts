@@ -5,7 +5,7 @@ import { newId } from "@/lib/journal/change";
 import { fullSet } from "@/lib/figures/body-measures";
 import { begin } from "@/lib/measuring/taking";
 import { type Client, type MeasurementSet, type Sleeve } from "@/lib/records/types";
-import { todayOn, todayQuery } from "@/lib/store/queries/today";
+import { todayOn, type todayQuery } from "@/lib/store/queries/today";
 import { client, head, order } from "./support";
 
 describe("the first path", () => {
