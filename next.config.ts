@@ -78,6 +78,13 @@ const config: NextConfig = {
           resource.request = resource.request.replace(/^node:/, "");
         }),
       );
+      // What jsPDF would fetch for turning web pages into PDF; nothing here does.
+      webpackConfig.resolve.alias = {
+        ...webpackConfig.resolve.alias,
+        html2canvas: false,
+        canvg: false,
+        dompurify: false,
+      };
       webpackConfig.resolve.fallback = {
         ...webpackConfig.resolve.fallback,
         fs: false,
@@ -103,6 +110,9 @@ const withSerwist = withSerwistInit({
   disable: process.env.NODE_ENV === "development",
   // The bundler's own copies of PGlite's files are never fetched: `db/browser/open.ts` hands over compressed ones.
   exclude: [
+    // For browsers without modules, and for the pages router: never asked for.
+    /chunks\/(polyfills|framework|main)-[0-9a-f]+\.js$/,
+    /chunks\/pages\//,
     /\.map$/,
     /\.(wasm|data)$/,
     /\.tar\.gz$/,
@@ -110,7 +120,9 @@ const withSerwist = withSerwistInit({
     /-manifest\.json?$/,
     /middleware-/,
   ],
-  globPublicPatterns: ["pglite/*.br", "fonts/*.ttf", "icons/*"],
+  globPublicPatterns: ["pglite/*.br", "fonts/*.ttf", "icons/icon.svg", "icons/icon-192.png"],
+  // The hash in the name says what is in it: no need to pass the browser's own cache by.
+  dontCacheBustURLsMatching: /^\/?(_next\/static\/|pglite\/)/,
   maximumFileSizeToCacheInBytes: 6 * 1024 * 1024,
 });
 

@@ -11,7 +11,7 @@ import { type Fineness, type Unit } from "@/lib/records/types";
 const width = 250;
 const height = 170;
 /** Room for the words on the axes. */
-const left = 54;
+const left = 74;
 const below = 28;
 
 /** The figure through time, with the published ones of the age faintly behind; the table says the same in words. */

@@ -1,10 +1,10 @@
-import { type CSSProperties, type ReactNode } from "react";
-import { cx } from "@/components/ui/cx";
+import { type CSSProperties } from "react";
 import { Tape } from "@/components/ui/tape";
 import { Notch } from "@/components/ui/notch";
 import { longDate } from "@/lib/pdf/long-date";
 import { type ReceiptDocument } from "@/lib/pdf/receipt-document";
 import { type Unit } from "@/lib/records/types";
+import { Pair } from "./pair";
 
 const words = {
   Receipt: { from: "Received from", amount: "Amount received", now: "This payment" },
@@ -112,13 +112,4 @@ function Lines({ lines }: { lines: readonly string[] }) {
       {line}
     </p>
   ));
-}
-
-function Pair({ value, className, children }: { value: string; className?: string; children: ReactNode }) {
-  return (
-    <div className={cx("flex flex-wrap items-end justify-between gap-x-4 py-1", className)}>
-      <dt className="min-w-0 flex-1 basis-32">{children}</dt>
-      <dd className="figures ms-auto whitespace-nowrap">{value}</dd>
-    </div>
-  );
 }

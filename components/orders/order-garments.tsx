@@ -1,3 +1,4 @@
+import { type ReactNode } from "react";
 import { TriangleAlert } from "lucide-react";
 import { AppLink } from "@/components/ui/app-link";
 import { ButtonLink } from "@/components/ui/button";
@@ -74,42 +75,33 @@ function GarmentView({
           )
         }
       />
-      <dl className="grid grid-cols-[auto_minmax(0,1fr)] items-baseline gap-x-4 gap-y-1">
+      <dl className="grid gap-1">
         {wearer && (
-          <>
-            <dt className="text-soft">Figures</dt>
-            <dd>
-              {set ? (
-                <AppLink href={`/measure/set?id=${set.id}`} className="inline-flex min-h-target items-center">
-                  {setChoiceWords(set)}
-                </AppLink>
-              ) : (
-                "Not chosen yet"
-              )}
-            </dd>
-          </>
+          <Fact name="Figures">
+            {set ? (
+              <AppLink href={`/measure/set?id=${set.id}`} className="inline-flex min-h-target items-center">
+                {setChoiceWords(set)}
+              </AppLink>
+            ) : (
+              "Not chosen yet"
+            )}
+          </Fact>
         )}
         {sleeve && (
-          <>
-            <dt className="text-soft">Sleeve</dt>
-            <dd>
-              <AppLink
-                href={`/sleeves/draft?id=${sleeve.id}`}
-                className="inline-flex min-h-target items-center wrap-anywhere"
-              >
-                {sleeve.name}
-              </AppLink>
-            </dd>
-          </>
+          <Fact name="Sleeve">
+            <AppLink
+              href={`/sleeves/draft?id=${sleeve.id}`}
+              className="inline-flex min-h-target items-center wrap-anywhere"
+            >
+              {sleeve.name}
+            </AppLink>
+          </Fact>
         )}
         {garment.fittingOn && (
-          <>
-            <dt className="text-soft">Fitting</dt>
-            <dd>
-              {formatDay(garment.fittingOn, { style: "long" })}
-              {open && <>, {countdownWords(garment.fittingOn, today)}</>}
-            </dd>
-          </>
+          <Fact name="Fitting">
+            {formatDay(garment.fittingOn, { style: "long" })}
+            {open && <>, {countdownWords(garment.fittingOn, today)}</>}
+          </Fact>
         )}
       </dl>
       {garment.note && <p className="mt-2 whitespace-pre-wrap wrap-anywhere">{garment.note}</p>}
@@ -127,5 +119,14 @@ function GarmentView({
         {!sleeve && draft && open && set && <ButtonLink href={draft}>Draft a sleeve</ButtonLink>}
       </div>
     </Card>
+  );
+}
+
+function Fact({ name, children }: { name: string; children: ReactNode }) {
+  return (
+    <div className="flex flex-wrap items-baseline gap-x-3">
+      <dt className="min-w-16 text-soft">{name}</dt>
+      <dd className="min-w-0 flex-1 basis-40">{children}</dd>
+    </div>
   );
 }

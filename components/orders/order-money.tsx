@@ -1,3 +1,4 @@
+import { Pair } from "@/components/money/pair";
 import { AppLink } from "@/components/ui/app-link";
 import { Button } from "@/components/ui/button";
 import { Card, RowLink, Row, Rows } from "@/components/ui/card";
@@ -35,17 +36,10 @@ export function BalanceCard({
       ) : (
         <>
           <p className="text-figure font-bold">{money(minor)}</p>
-          <dl className="mt-3 grid grid-cols-[minmax(0,1fr)_auto] gap-x-4">
-            <dt>Total</dt>
-            <dd className="text-end">{money(sums.totalMinor)}</dd>
-            <dt>Received</dt>
-            <dd className="text-end">{money(sums.receivedMinor)}</dd>
-            {sums.givenBackMinor > 0 && (
-              <>
-                <dt>Given back</dt>
-                <dd className="text-end">{money(sums.givenBackMinor)}</dd>
-              </>
-            )}
+          <dl className="mt-2">
+            <Pair value={money(sums.totalMinor)}>Total</Pair>
+            <Pair value={money(sums.receivedMinor)}>Received</Pair>
+            {sums.givenBackMinor > 0 && <Pair value={money(sums.givenBackMinor)}>Given back</Pair>}
           </dl>
         </>
       )}

@@ -109,11 +109,11 @@ function PriceLine({
       <Field label="For" error={errors?.text?.message}>
         <TextInput {...form.register(`lines.${at}.text`)} autoComplete="off" />
       </Field>
-      <div className="grid grid-cols-[minmax(6rem,1fr)_minmax(0,2fr)] items-start gap-3">
-        <Field label="How many" error={errors?.quantity?.message}>
+      <div className="flex flex-wrap items-start gap-3">
+        <Field className="min-w-0 flex-1 basis-24" label="How many" error={errors?.quantity?.message}>
           <TextInput figure inputMode="numeric" {...form.register(`lines.${at}.quantity`)} />
         </Field>
-        <Field label="Price of one" error={errors?.price?.message}>
+        <Field className="min-w-0 flex-[2] basis-40" label="Price of one" error={errors?.price?.message}>
           <TextInput
             figure
             inputMode={currency.digits === 0 ? "numeric" : "decimal"}

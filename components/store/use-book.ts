@@ -1,7 +1,7 @@
 "use client";
 
 import { useQuery } from "@tanstack/react-query";
-import { useCallback, useMemo, useState, useSyncExternalStore } from "react";
+import { useCallback, useMemo, useRef, useState, useSyncExternalStore } from "react";
 import { type Change, type Write } from "@/lib/journal/change";
 import { type Numbers } from "@/lib/journal/journal";
 import { overlay } from "@/lib/journal/merge";
@@ -67,21 +67,33 @@ export interface Keeping {
   problem: KeepProblem | null;
 }
 
-/** Keeping from a screen, with its state to show. */
+/** A write takes a few milliseconds: only one that takes longer than this is shown as being at work. */
+const SHOWN_BUSY_AFTER_MS = 120;
+
+/** Keeping from a screen, with its state to show. A second tap while the first is at work is the same write. */
 export function useKeep(): Keeping {
   const [busy, setBusy] = useState(false);
   const [problem, setProblem] = useState<KeepProblem | null>(null);
-  const keep = useCallback<Keeping["keep"]>(async (build) => {
-    setBusy(true);
-    setProblem(null);
-    try {
-      return await openBook().keep(build);
-    } catch (error) {
-      setProblem(keepProblem(error));
-      return null;
-    } finally {
-      setBusy(false);
-    }
+  const running = useRef<Promise<Change | null>>(null);
+  const keep = useCallback<Keeping["keep"]>((build) => {
+    running.current ??= (async () => {
+      // Drawing anything before the write is under way would only make it wait.
+      const writing = openBook().keep(build);
+      const timer = setTimeout(() => setBusy(true), SHOWN_BUSY_AFTER_MS);
+      try {
+        const change = await writing;
+        setProblem(null);
+        return change;
+      } catch (error) {
+        setProblem(keepProblem(error));
+        return null;
+      } finally {
+        clearTimeout(timer);
+        setBusy(false);
+        running.current = null;
+      }
+    })();
+    return running.current;
   }, []);
   return { keep, busy, problem };
 }

@@ -8,6 +8,7 @@ import { useToday } from "@/components/store/use-today";
 import { AppLink } from "@/components/ui/app-link";
 import { ButtonLink } from "@/components/ui/button";
 import { Card, RowLink, Rows } from "@/components/ui/card";
+import { cx } from "@/components/ui/cx";
 import { Notice } from "@/components/ui/notice";
 import { Progress } from "@/components/ui/progress";
 import { Screen } from "@/components/ui/screen";
@@ -43,6 +44,7 @@ export function TodayScreen() {
 
   return (
     <Screen
+      wide={view.anyOrder}
       title={onPhone ? formatDay(today, { style: "weekday" }) : "Today"}
       sub={workshop?.name}
       action={
@@ -51,11 +53,11 @@ export function TodayScreen() {
             {next.say}
           </ButtonLink>
         ) : (
-          <div className="grid grid-cols-[minmax(0,1fr)_minmax(0,1.6fr)] gap-2">
-            <ButtonLink href="/measure" className="min-h-key">
+          <div className="flex flex-wrap gap-2">
+            <ButtonLink href="/measure" className="min-h-key flex-1 basis-24">
               Measure
             </ButtonLink>
-            <ButtonLink variant="main" href="/orders/new">
+            <ButtonLink variant="main" href="/orders/new" className="flex-[2] basis-40">
               New order
             </ButtonLink>
           </div>
@@ -83,42 +85,54 @@ function Days({
   view: TodayView;
   today: string;
 }) {
+  const hasSide = fittings.length + owed.length > 0;
+  const column = "grid min-w-0 grid-cols-[minmax(0,1fr)] content-start gap-4";
   return (
-    <>
-      <Part id="late" title="Late" count={late.length} look>
-        {late.map((item) => (
-          <OrderRow key={item.order.id} item={item} day={dueWords(item.order, today)} money="owed" />
-        ))}
-      </Part>
-      <Part id="due" title="Due in the next 7 days" count={due.length}>
-        {due.map((item) => (
-          <OrderRow key={item.order.id} item={item} day={dueWords(item.order, today)} money="owed" />
-        ))}
-      </Part>
-      {late.length + due.length === 0 && (
-        <p className="rounded border-2 border-dashed border-edge px-4 py-6 text-center">
-          Nothing is late, and nothing is due in the next 7 days.
-        </p>
+    <div className={cx(column, hasSide ? "lg:grid-cols-2 lg:gap-8" : "lg:max-w-page")}>
+      <div className={column}>
+        <Part id="late" title="Late" count={late.length} look>
+          {late.map((item) => (
+            <OrderRow key={item.order.id} item={item} day={dueWords(item.order, today)} money="owed" />
+          ))}
+        </Part>
+        <Part id="due" title="Due in the next 7 days" count={due.length}>
+          {due.map((item) => (
+            <OrderRow key={item.order.id} item={item} day={dueWords(item.order, today)} money="owed" />
+          ))}
+        </Part>
+        {late.length + due.length === 0 && (
+          <p className="rounded border-2 border-dashed border-edge px-4 py-6 text-center">
+            Nothing is late, and nothing is due in the next 7 days.
+          </p>
+        )}
+        <LaterLink count={laterCount} />
+      </div>
+      {hasSide && (
+        <div className={column}>
+          <Part id="fittings" title="Fittings" count={fittings.length}>
+            {fittings.map((item) => (
+              <FittingRow key={item.garment.id} item={item} today={today} />
+            ))}
+          </Part>
+          <Part id="owed" title="Owed" count={owed.length}>
+            {owed.map((item) => (
+              <OrderRow key={item.order.id} item={item} day={null} />
+            ))}
+          </Part>
+        </div>
       )}
-      <Part id="fittings" title="Fittings" count={fittings.length}>
-        {fittings.map((item) => (
-          <FittingRow key={item.garment.id} item={item} today={today} />
-        ))}
-      </Part>
-      <Part id="owed" title="Owed" count={owed.length}>
-        {owed.map((item) => (
-          <OrderRow key={item.order.id} item={item} day={null} />
-        ))}
-      </Part>
-      {laterCount > 0 && (
-        <p>
-          <AppLink href="/orders" className="inline-flex min-h-target items-center font-semibold">
-            {laterCount === 1 ? "1 more order is open" : `${laterCount} more orders are open`}, for later or
-            with no day
-          </AppLink>
-        </p>
-      )}
-    </>
+    </div>
+  );
+}
+
+function LaterLink({ count }: { count: number }) {
+  if (count === 0) return null;
+  return (
+    <p>
+      <AppLink href="/orders" className="inline-flex min-h-target items-center font-semibold">
+        {count === 1 ? "1 more order is open" : `${count} more orders are open`}, for later or with no day
+      </AppLink>
+    </p>
   );
 }
 
