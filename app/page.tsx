@@ -1,5 +1,5 @@
-import { TodayScreen } from "@/components/today/today-screen";
+import { Today } from "@/components/today/today";
 
 export default function Page() {
-  return <TodayScreen />;
+  return <Today />;
 }
