@@ -1,6 +1,6 @@
 import { type Metadata } from "next";
 import { Suspense } from "react";
-import { ScreenOpening } from "@/components/clients/not-shown";
+import { ScreenOpening } from "@/components/frame/not-shown";
 import { MeasureScreen } from "@/components/measure/measure-screen";
 
 export const metadata: Metadata = { title: "Measure" };

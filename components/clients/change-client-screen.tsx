@@ -13,12 +13,12 @@ import { edit } from "@/lib/journal/change";
 import { type Client } from "@/lib/records/types";
 import { clientCardQuery } from "@/lib/store/queries/clients";
 import { NameAndPhone, RestOfClient } from "./client-inputs";
-import { BroughtBack, KeepTrouble } from "./form-notices";
-import { NotShown, ScreenOpening } from "./not-shown";
+import { BroughtBack, KeepTrouble } from "@/components/frame/form-notices";
+import { backToClients, NotShown, ScreenOpening } from "@/components/frame/not-shown";
 import { SimilarNotice } from "./similar-notice";
-import { useFormDraft } from "./use-form-draft";
-import { useIdParam } from "./use-id-param";
-import { readE164, usePhoneReading } from "./use-phone-reading";
+import { useFormDraft } from "@/components/store/use-form-draft";
+import { useIdParam } from "@/components/store/use-id-param";
+import { readE164, usePhoneReading } from "@/components/store/use-phone-reading";
 
 const TITLE = "Change the client";
 const NOT_HERE = "This client is not in the book.";
@@ -27,13 +27,17 @@ const draftKey = (id: string): string => `client:change:${id}`;
 
 export function ChangeClientScreen() {
   const id = useIdParam("id");
-  return id ? <Change key={id} id={id} /> : <NotShown title={TITLE} state="known" say={NOT_HERE} />;
+  return id ? (
+    <Change key={id} id={id} />
+  ) : (
+    <NotShown back={backToClients} title={TITLE} state="known" say={NOT_HERE} />
+  );
 }
 
 function Change({ id }: { id: string }) {
   const { view, state } = useView(clientCardQuery, { id });
   const handle = useDraft<ClientValues>(draftKey(id));
-  if (!view) return <NotShown title={TITLE} state={state} say={NOT_HERE} />;
+  if (!view) return <NotShown back={backToClients} title={TITLE} state={state} say={NOT_HERE} />;
   if (handle.draft === undefined) return <ScreenOpening title={TITLE} />;
   return <ChangeForm client={view.client} handle={handle} />;
 }

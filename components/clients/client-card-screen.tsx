@@ -14,9 +14,9 @@ import { BinAsk } from "./bin-ask";
 import { ClientOrders } from "./client-orders";
 import { ClientWearers } from "./client-wearers";
 import { ContactCard } from "./contact-card";
-import { KeepTrouble } from "./form-notices";
-import { backToClients, NotShown } from "./not-shown";
-import { useIdParam } from "./use-id-param";
+import { KeepTrouble } from "@/components/frame/form-notices";
+import { backToClients, NotShown } from "@/components/frame/not-shown";
+import { useIdParam } from "@/components/store/use-id-param";
 
 function sayMoney(minor: number, code: string): string {
   const known = currency(code);
@@ -27,12 +27,16 @@ const NOT_HERE = "This client is not in the book.";
 
 export function ClientCardScreen() {
   const id = useIdParam("id");
-  return id ? <ClientCard key={id} id={id} /> : <NotShown title="Client" state="known" say={NOT_HERE} />;
+  return id ? (
+    <ClientCard key={id} id={id} />
+  ) : (
+    <NotShown back={backToClients} title="Client" state="known" say={NOT_HERE} />
+  );
 }
 
 function ClientCard({ id }: { id: string }) {
   const { view, state } = useView(clientCardQuery, { id });
-  if (!view) return <NotShown title="Client" state={state} say={NOT_HERE} />;
+  if (!view) return <NotShown back={backToClients} title="Client" state={state} say={NOT_HERE} />;
   return view.client.removedAt === null ? <LiveClient view={view} /> : <BinnedClient view={view} />;
 }
 

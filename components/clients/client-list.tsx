@@ -15,7 +15,7 @@ import { countWords, namesInWords, newClientHref, PAGE } from "@/lib/clients/lis
 import { phoneLinks } from "@/lib/clients/phone-links";
 import { clientListQuery, type ClientListItem } from "@/lib/store/queries/clients";
 import { setListPlace, useListPlace } from "./list-place";
-import { useSettled } from "./use-settled";
+import { useSettled } from "@/components/store/use-settled";
 
 const ASK_AFTER_MS = 120;
 

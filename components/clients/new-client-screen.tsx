@@ -19,11 +19,11 @@ import {
 import { make, newId } from "@/lib/journal/change";
 import { NameAndPhone, RestOfClient } from "./client-inputs";
 import { FirstWearers } from "./first-wearers";
-import { BroughtBack, KeepTrouble } from "./form-notices";
-import { backToClients, ScreenOpening } from "./not-shown";
+import { BroughtBack, KeepTrouble } from "@/components/frame/form-notices";
+import { backToClients, ScreenOpening } from "@/components/frame/not-shown";
 import { SimilarNotice } from "./similar-notice";
-import { useFormDraft } from "./use-form-draft";
-import { readE164, usePhoneReading } from "./use-phone-reading";
+import { useFormDraft } from "@/components/store/use-form-draft";
+import { readE164, usePhoneReading } from "@/components/store/use-phone-reading";
 
 const KEY = "client:new";
 const TITLE = "New client";

@@ -5,7 +5,7 @@ import { AppLink } from "@/components/ui/app-link";
 import { Notice } from "@/components/ui/notice";
 import { similarClients, similarWords, type TypedClient } from "@/lib/clients/similar-client";
 import { clientListQuery } from "@/lib/store/queries/clients";
-import { useSettled } from "./use-settled";
+import { useSettled } from "@/components/store/use-settled";
 
 const ASK_AFTER_MS = 400;
 /** Of a common name there may be several before the one that is the same. */

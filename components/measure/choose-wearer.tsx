@@ -2,8 +2,8 @@
 
 import { useIsFetching } from "@tanstack/react-query";
 import { useState } from "react";
-import { backToClients } from "@/components/clients/not-shown";
-import { useSettled } from "@/components/clients/use-settled";
+import { backToClients } from "@/components/frame/not-shown";
+import { useSettled } from "@/components/store/use-settled";
 import { useView } from "@/components/store/use-book";
 import { useToday } from "@/components/store/use-today";
 import { Button, ButtonLink } from "@/components/ui/button";

@@ -1,8 +1,8 @@
 "use client";
 
 import { useRouter, useSearchParams } from "next/navigation";
-import { backToClients, NotShown } from "@/components/clients/not-shown";
-import { useIdParam } from "@/components/clients/use-id-param";
+import { backToClients, NotShown } from "@/components/frame/not-shown";
+import { useIdParam } from "@/components/store/use-id-param";
 import { useView, useWorkshop } from "@/components/store/use-book";
 import { useToday } from "@/components/store/use-today";
 import { ButtonLink } from "@/components/ui/button";
@@ -21,12 +21,16 @@ const NOT_HERE = "This wearer is not in the book.";
 
 export function HistoryScreen() {
   const id = useIdParam("wearer");
-  return id ? <HistoryOf key={id} id={id} /> : <NotShown title={TITLE} state="known" say={NOT_HERE} />;
+  return id ? (
+    <HistoryOf key={id} id={id} />
+  ) : (
+    <NotShown back={backToClients} title={TITLE} state="known" say={NOT_HERE} />
+  );
 }
 
 function HistoryOf({ id }: { id: string }) {
   const { view, state } = useView(wearerCardQuery, { id });
-  if (!view) return <NotShown title={TITLE} state={state} say={NOT_HERE} />;
+  if (!view) return <NotShown back={backToClients} title={TITLE} state={state} say={NOT_HERE} />;
   return <KnownHistory view={view} />;
 }
 

@@ -2,8 +2,8 @@
 
 import { useRouter } from "next/navigation";
 import { useEffect, useState } from "react";
-import { NotShown, ScreenOpening } from "@/components/clients/not-shown";
-import { useIdParam } from "@/components/clients/use-id-param";
+import { backToClients, NotShown, ScreenOpening } from "@/components/frame/not-shown";
+import { useIdParam } from "@/components/store/use-id-param";
 import { useKeep, useView, useWorkshop } from "@/components/store/use-book";
 import { useToday } from "@/components/store/use-today";
 import { ButtonLink } from "@/components/ui/button";
@@ -46,10 +46,20 @@ function MeasureWearer({ wearerId, correctsId, clientId }: MeasureWearerProps) {
   const { view, state } = useView(wearerCardQuery, { id: wearerId });
   const workshop = useWorkshop();
   const takenBy = useTakenBy();
-  if (!view) return <NotShown title="Measure" state={state} say="This wearer is not in the book." />;
+  if (!view)
+    return (
+      <NotShown back={backToClients} title="Measure" state={state} say="This wearer is not in the book." />
+    );
   const old = view.allSets.find(({ id }) => id === correctsId) ?? null;
   if (correctsId !== null && !old)
-    return <NotShown title="Put a set right" state={state} say="The set to put right is not in the book." />;
+    return (
+      <NotShown
+        back={backToClients}
+        title="Put a set right"
+        state={state}
+        say="The set to put right is not in the book."
+      />
+    );
   if (!workshop || takenBy === undefined) return <ScreenOpening title={`Measure ${view.wearer.name}`} />;
   const back =
     clientId === null

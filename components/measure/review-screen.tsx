@@ -1,7 +1,7 @@
 "use client";
 
 import { useRef, useState } from "react";
-import { KeepTrouble } from "@/components/clients/form-notices";
+import { KeepTrouble } from "@/components/frame/form-notices";
 import { Button } from "@/components/ui/button";
 import { Card, Row, RowButton, Rows } from "@/components/ui/card";
 import { Field, TextArea, TextInput } from "@/components/ui/field";

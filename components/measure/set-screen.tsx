@@ -1,7 +1,7 @@
 "use client";
 
-import { backToClients, NotShown } from "@/components/clients/not-shown";
-import { useIdParam } from "@/components/clients/use-id-param";
+import { backToClients, NotShown } from "@/components/frame/not-shown";
+import { useIdParam } from "@/components/store/use-id-param";
 import { useView, useWorkshop } from "@/components/store/use-book";
 import { useToday } from "@/components/store/use-today";
 import { AppLink } from "@/components/ui/app-link";
@@ -26,12 +26,16 @@ const NOT_HERE = "This measurement set is not in the book.";
 
 export function SetScreen() {
   const id = useIdParam("id");
-  return id ? <SetCard key={id} id={id} /> : <NotShown title={TITLE} state="known" say={NOT_HERE} />;
+  return id ? (
+    <SetCard key={id} id={id} />
+  ) : (
+    <NotShown back={backToClients} title={TITLE} state="known" say={NOT_HERE} />
+  );
 }
 
 function SetCard({ id }: { id: string }) {
   const { view, state } = useView(setCardQuery, { id });
-  if (!view) return <NotShown title={TITLE} state={state} say={NOT_HERE} />;
+  if (!view) return <NotShown back={backToClients} title={TITLE} state={state} say={NOT_HERE} />;
   return <KnownSet view={view} />;
 }
 

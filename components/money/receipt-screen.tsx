@@ -1,9 +1,9 @@
 "use client";
 
 import { useCallback, useMemo } from "react";
-import { useIdParam } from "@/components/clients/use-id-param";
+import { useIdParam } from "@/components/store/use-id-param";
 import { ShareDocument } from "@/components/share-document";
-import { OrderNotShown } from "@/components/orders/order-not-shown";
+import { backToOrders, NotShown } from "@/components/frame/not-shown";
 import { useView, useWorkshop } from "@/components/store/use-book";
 import { ButtonLink } from "@/components/ui/button";
 import { Card, CardHead } from "@/components/ui/card";
@@ -21,12 +21,16 @@ const NOT_HERE = "This receipt is not in the book.";
 
 export function ReceiptScreen() {
   const id = useIdParam("id");
-  return id ? <Receipt key={id} id={id} /> : <OrderNotShown title="Receipt" state="known" say={NOT_HERE} />;
+  return id ? (
+    <Receipt key={id} id={id} />
+  ) : (
+    <NotShown back={backToOrders} title="Receipt" state="known" say={NOT_HERE} />
+  );
 }
 
 function Receipt({ id }: { id: string }) {
   const { view, state } = useView(receiptQuery, { id });
-  if (!view) return <OrderNotShown title="Receipt" state={state} say={NOT_HERE} />;
+  if (!view) return <NotShown back={backToOrders} title="Receipt" state={state} say={NOT_HERE} />;
   return <KnownReceipt view={view} />;
 }
 

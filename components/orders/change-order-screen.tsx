@@ -4,10 +4,10 @@ import { zodResolver } from "@hookform/resolvers/zod";
 import { useRouter } from "next/navigation";
 import { useMemo, useState } from "react";
 import { useForm } from "react-hook-form";
-import { BroughtBack, KeepTrouble } from "@/components/clients/form-notices";
-import { ScreenOpening } from "@/components/clients/not-shown";
-import { useFormDraft } from "@/components/clients/use-form-draft";
-import { useIdParam } from "@/components/clients/use-id-param";
+import { BroughtBack, KeepTrouble } from "@/components/frame/form-notices";
+import { backToOrders, ScreenOpening } from "@/components/frame/not-shown";
+import { useFormDraft } from "@/components/store/use-form-draft";
+import { useIdParam } from "@/components/store/use-id-param";
 import { useKeep, useView } from "@/components/store/use-book";
 import { type DraftHandle, useDraft } from "@/components/store/use-draft";
 import { useToday } from "@/components/store/use-today";
@@ -26,19 +26,23 @@ import {
 } from "@/lib/store/queries/orders";
 import { NoCurrency } from "./no-currency";
 import { OrderInputs } from "./order-inputs";
-import { OrderNotShown } from "./order-not-shown";
+import { NotShown } from "@/components/frame/not-shown";
 
 const TITLE = "Change the order";
 const NOT_HERE = "This order is not in the book.";
 
 export function ChangeOrderScreen() {
   const id = useIdParam("id");
-  return id ? <ChangeOrder key={id} id={id} /> : <OrderNotShown title={TITLE} state="known" say={NOT_HERE} />;
+  return id ? (
+    <ChangeOrder key={id} id={id} />
+  ) : (
+    <NotShown back={backToOrders} title={TITLE} state="known" say={NOT_HERE} />
+  );
 }
 
 function ChangeOrder({ id }: { id: string }) {
   const { view, state } = useView(orderCardQuery, { id });
-  if (!view) return <OrderNotShown title={TITLE} state={state} say={NOT_HERE} />;
+  if (!view) return <NotShown back={backToOrders} title={TITLE} state={state} say={NOT_HERE} />;
   return <ChangeOrderOf view={view} />;
 }
 
@@ -58,7 +62,14 @@ function ChangeOrderOf({ view }: { view: OrderCardView }) {
       </Screen>
     );
   if (!people)
-    return <OrderNotShown title={TITLE} state={state} say="The client of this order is not in the book." />;
+    return (
+      <NotShown
+        back={backToOrders}
+        title={TITLE}
+        state={state}
+        say="The client of this order is not in the book."
+      />
+    );
   if (handle.draft === undefined) return <ScreenOpening title={TITLE} />;
   const currency = currencyOf(order.currency);
   if (!currency) return <NoCurrency title={TITLE} code={order.currency} />;

@@ -1,7 +1,7 @@
 "use client";
 
 import { useState } from "react";
-import { useSettled } from "@/components/clients/use-settled";
+import { useSettled } from "@/components/store/use-settled";
 import { useView } from "@/components/store/use-book";
 import { ButtonLink } from "@/components/ui/button";
 import { Card, RowLink, Rows } from "@/components/ui/card";
@@ -12,7 +12,7 @@ import { Progress } from "@/components/ui/progress";
 import { Screen } from "@/components/ui/screen";
 import { namesInWords, newClientHref } from "@/lib/clients/list-words";
 import { clientListQuery } from "@/lib/store/queries/clients";
-import { backToOrders } from "./order-not-shown";
+import { backToOrders } from "@/components/frame/not-shown";
 
 const AT_MOST = 30;
 const ASK_AFTER_MS = 120;

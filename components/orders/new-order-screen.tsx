@@ -4,10 +4,10 @@ import { zodResolver } from "@hookform/resolvers/zod";
 import { useRouter } from "next/navigation";
 import { useMemo, useState } from "react";
 import { useForm } from "react-hook-form";
-import { BroughtBack, KeepTrouble } from "@/components/clients/form-notices";
-import { ScreenOpening } from "@/components/clients/not-shown";
-import { useFormDraft } from "@/components/clients/use-form-draft";
-import { useIdParam } from "@/components/clients/use-id-param";
+import { BroughtBack, KeepTrouble } from "@/components/frame/form-notices";
+import { backToOrders, ScreenOpening } from "@/components/frame/not-shown";
+import { useFormDraft } from "@/components/store/use-form-draft";
+import { useIdParam } from "@/components/store/use-id-param";
 import { useKeep, useView, useWorkshop } from "@/components/store/use-book";
 import { type DraftHandle, useDraft } from "@/components/store/use-draft";
 import { useToday } from "@/components/store/use-today";
@@ -36,7 +36,7 @@ import { ChooseClient } from "./choose-client";
 import { DepositFields } from "./deposit-fields";
 import { NoCurrency } from "./no-currency";
 import { OrderInputs, typedCautions } from "./order-inputs";
-import { OrderNotShown } from "./order-not-shown";
+import { NotShown } from "@/components/frame/not-shown";
 
 const TITLE = "New order";
 
@@ -51,7 +51,8 @@ function NewOrder({ clientId }: { clientId: string }) {
   const workshop = useWorkshop();
   const handle = useDraft<unknown>(draftKey);
   const [round, setRound] = useState(0);
-  if (!people) return <OrderNotShown title={TITLE} state={state} say="This client is not in the book." />;
+  if (!people)
+    return <NotShown back={backToOrders} title={TITLE} state={state} say="This client is not in the book." />;
   if (people.client.removedAt !== null)
     return (
       <Screen title={TITLE}>

@@ -1,7 +1,7 @@
 import { ButtonLink } from "@/components/ui/button";
 import { Notice } from "@/components/ui/notice";
 import { Screen } from "@/components/ui/screen";
-import { backToOrders } from "./order-not-shown";
+import { backToOrders } from "@/components/frame/not-shown";
 
 /** In place of a form for money where nobody pays in the currency that is set down. */
 export function NoCurrency({ title, code }: { title: string; code: string }) {

@@ -3,8 +3,8 @@
 import { useRouter, useSearchParams } from "next/navigation";
 import { useState } from "react";
 import { BinAsk } from "@/components/clients/bin-ask";
-import { KeepTrouble } from "@/components/clients/form-notices";
-import { useIdParam } from "@/components/clients/use-id-param";
+import { KeepTrouble } from "@/components/frame/form-notices";
+import { useIdParam } from "@/components/store/use-id-param";
 import { TakeMoneySheet } from "@/components/money/take-money-sheet";
 import { useKeep, useView } from "@/components/store/use-book";
 import { useToday } from "@/components/store/use-today";
@@ -24,19 +24,23 @@ import { CautionsNotice } from "./cautions-notice";
 import { HandOverSheet } from "./hand-over-sheet";
 import { OrderGarments } from "./order-garments";
 import { BalanceCard, Payments, PriceLines } from "./order-money";
-import { backToOrders, OrderNotShown } from "./order-not-shown";
+import { backToOrders, NotShown } from "@/components/frame/not-shown";
 import { StageCard } from "./stage-card";
 
 const NOT_HERE = "This order is not in the book.";
 
 export function OrderCardScreen() {
   const id = useIdParam("id");
-  return id ? <OrderCard key={id} id={id} /> : <OrderNotShown title="Order" state="known" say={NOT_HERE} />;
+  return id ? (
+    <OrderCard key={id} id={id} />
+  ) : (
+    <NotShown back={backToOrders} title="Order" state="known" say={NOT_HERE} />
+  );
 }
 
 function OrderCard({ id }: { id: string }) {
   const { view, state } = useView(orderCardQuery, { id });
-  if (!view) return <OrderNotShown title="Order" state={state} say={NOT_HERE} />;
+  if (!view) return <NotShown back={backToOrders} title="Order" state={state} say={NOT_HERE} />;
   return view.order.removedAt === null ? <LiveOrder view={view} /> : <BinnedOrder view={view} />;
 }
 

@@ -1,13 +1,13 @@
 "use client";
 
-import { KeepTrouble } from "@/components/clients/form-notices";
+import { KeepTrouble } from "@/components/frame/form-notices";
 import { useKeep } from "@/components/store/use-book";
 import { Button, ButtonLink } from "@/components/ui/button";
 import { Notice } from "@/components/ui/notice";
 import { Screen } from "@/components/ui/screen";
 import { setRemoved } from "@/lib/journal/change";
 import { type Sleeve } from "@/lib/records/types";
-import { backToSleeves } from "./not-here";
+import { backToSleeves } from "@/components/frame/not-shown";
 
 /** A sleeve in the bin, with the way back. */
 export function BinnedSleeve({ sleeve }: { sleeve: Sleeve }) {

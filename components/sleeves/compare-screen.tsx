@@ -17,7 +17,7 @@ import { boxOf, outlineOf, unionOf } from "@/lib/sleeves/drawing-paths";
 import { fitView, toScreen } from "@/lib/sleeves/drawing-view";
 import { makeFromRecord } from "@/lib/sleeves/make-from-record";
 import { sleevesQuery } from "@/lib/store/queries/sleeves";
-import { backToSleeves } from "./not-here";
+import { backToSleeves } from "@/components/frame/not-shown";
 import { useSize } from "./use-size";
 import "./sleeves.css";
 

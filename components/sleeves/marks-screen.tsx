@@ -1,7 +1,7 @@
 "use client";
 
 import { useMemo, useState } from "react";
-import { useIdParam } from "@/components/clients/use-id-param";
+import { useIdParam } from "@/components/store/use-id-param";
 import { useView, useWorkshop } from "@/components/store/use-book";
 import { useDraft } from "@/components/store/use-draft";
 import { useToday } from "@/components/store/use-today";
@@ -19,7 +19,7 @@ import { stepPictures } from "@/lib/sleeves/mark-out";
 import { sleevesQuery, type SleeveView } from "@/lib/store/queries/sleeves";
 import { AllSteps } from "./all-steps";
 import { BinnedSleeve } from "./binned-sleeve";
-import { NotHere } from "./not-here";
+import { backToSleeves, NotShown } from "@/components/frame/not-shown";
 import { OneStep } from "./one-step";
 import { type Place } from "./place";
 
@@ -29,7 +29,7 @@ const NOT_HERE = "This sleeve is not in the book.";
 export function MarksScreen() {
   const id = useIdParam("id");
   const workshop = useWorkshop();
-  if (!id) return <NotHere title="Mark out" state="known" say={NOT_HERE} />;
+  if (!id) return <NotShown back={backToSleeves} title="Mark out" state="known" say={NOT_HERE} />;
   return <Marks key={id} id={id} unit={workshop?.unit ?? "in"} workshopName={workshop?.name ?? ""} />;
 }
 
@@ -41,7 +41,7 @@ interface Workplace {
 function Marks({ id, ...workplace }: Workplace & { id: string }) {
   const { state, view } = useView(sleevesQuery, { ids: [id] });
   const found = view[0];
-  if (!found) return <NotHere title="Mark out" state={state} say={NOT_HERE} />;
+  if (!found) return <NotShown back={backToSleeves} title="Mark out" state={state} say={NOT_HERE} />;
   if (found.sleeve.removedAt !== null) return <BinnedSleeve sleeve={found.sleeve} />;
   return <MarkOut found={found} {...workplace} />;
 }

@@ -2,7 +2,7 @@
 
 import { useMemo, useState } from "react";
 import { useSearchParams } from "next/navigation";
-import { useIdParam } from "@/components/clients/use-id-param";
+import { useIdParam } from "@/components/store/use-id-param";
 import { useView, useWorkshop } from "@/components/store/use-book";
 import { useDraft } from "@/components/store/use-draft";
 import { useToday } from "@/components/store/use-today";
@@ -15,7 +15,7 @@ import { emptyForm, formOfSleeve, restoredForm, type SleeveForm } from "@/lib/sl
 import { sleevesQuery } from "@/lib/store/queries/sleeves";
 import { setCardQuery, wearerCardQuery } from "@/lib/store/queries/wearers";
 import { BinnedSleeve } from "./binned-sleeve";
-import { backToSleeves, NotHere } from "./not-here";
+import { backToSleeves, NotShown } from "@/components/frame/not-shown";
 import { SleeveEditor } from "./sleeve-editor";
 
 /** The address says what to draft from: a kept sleeve, a measurement set, a wearer, or nothing but bare figures. */
@@ -35,7 +35,14 @@ export function SleeveDraftScreen() {
   if (setId) return <FromSet key={setId} id={setId} workshop={workshop} />;
   if (wearerId) return <FromWearer key={wearerId} id={wearerId} workshop={workshop} />;
   if (/(?:^|&)(?:id|set|wearer)=/u.test(asked))
-    return <NotHere title="Draft a sleeve" state="known" say="What to draft from is not in the book." />;
+    return (
+      <NotShown
+        back={backToSleeves}
+        title="Draft a sleeve"
+        state="known"
+        say="What to draft from is not in the book."
+      />
+    );
   return <Drafting draftKey="sleeve:bare" sleeve={null} wearer={null} set={null} workshop={workshop} />;
 }
 
@@ -45,7 +52,10 @@ function FromSleeve({ id, workshop }: { id: string; workshop: Workshop }) {
   const [kept, setKept] = useState(0);
   const cameKept = useSearchParams().has("kept");
   const found = view[0];
-  if (!found) return <NotHere title="Sleeve" state={state} say="This sleeve is not in the book." />;
+  if (!found)
+    return (
+      <NotShown back={backToSleeves} title="Sleeve" state={state} say="This sleeve is not in the book." />
+    );
   const { set, sleeve, wearer } = found;
   if (sleeve.removedAt !== null) return <BinnedSleeve sleeve={sleeve} />;
   return (
@@ -62,7 +72,14 @@ function FromSleeve({ id, workshop }: { id: string; workshop: Workshop }) {
 function FromSet({ id, workshop }: { id: string; workshop: Workshop }) {
   const { view, state } = useView(setCardQuery, { id });
   if (!view)
-    return <NotHere title="Draft a sleeve" state={state} say="This measurement set is not in the book." />;
+    return (
+      <NotShown
+        back={backToSleeves}
+        title="Draft a sleeve"
+        state={state}
+        say="This measurement set is not in the book."
+      />
+    );
   return (
     <Drafting
       draftKey={`sleeve:${id}`}
@@ -78,7 +95,14 @@ function FromWearer({ id, workshop }: { id: string; workshop: Workshop }) {
   const { view, state } = useView(wearerCardQuery, { id });
   // The latest set may still be on its way from the database: the form must not begin without it.
   if (!view || state === "opening")
-    return <NotHere title="Draft a sleeve" state={state} say="This wearer is not in the book." />;
+    return (
+      <NotShown
+        back={backToSleeves}
+        title="Draft a sleeve"
+        state={state}
+        say="This wearer is not in the book."
+      />
+    );
   return (
     <Drafting
       draftKey={`sleeve:${id}`}

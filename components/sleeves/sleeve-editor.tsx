@@ -2,7 +2,7 @@
 
 import { useCallback, useDeferredValue, useEffect, useMemo, useRef, useState } from "react";
 import { useRouter } from "next/navigation";
-import { BroughtBack, KeepTrouble } from "@/components/clients/form-notices";
+import { BroughtBack, KeepTrouble } from "@/components/frame/form-notices";
 import { BinAsk } from "@/components/clients/bin-ask";
 import { type DraftHandle } from "@/components/store/use-draft";
 import { useKeep, useView } from "@/components/store/use-book";
@@ -27,7 +27,7 @@ import { ChecksList } from "./checks-list";
 import { DrawingPanel } from "./drawing-panel";
 import { FiguresForm } from "./figures-form";
 import { HeadLineView } from "./head-line-view";
-import { backToSleeves } from "./not-here";
+import { backToSleeves } from "@/components/frame/not-shown";
 import { SleeveDetails } from "./sleeve-details";
 import { useLastGood } from "./use-last-good";
 import { useSavedForm } from "./use-saved-form";

@@ -3,8 +3,8 @@
 import { useRouter } from "next/navigation";
 import { useMemo, useState } from "react";
 import { type Resolver, useForm } from "react-hook-form";
-import { KeepTrouble } from "@/components/clients/form-notices";
-import { useFormDraft } from "@/components/clients/use-form-draft";
+import { KeepTrouble } from "@/components/frame/form-notices";
+import { useFormDraft } from "@/components/store/use-form-draft";
 import { useKeep } from "@/components/store/use-book";
 import { type DraftHandle } from "@/components/store/use-draft";
 import { Button } from "@/components/ui/button";

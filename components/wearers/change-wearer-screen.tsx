@@ -2,8 +2,8 @@
 
 import { useRouter } from "next/navigation";
 import { useMemo, useState } from "react";
-import { NotShown, ScreenOpening } from "@/components/clients/not-shown";
-import { useIdParam } from "@/components/clients/use-id-param";
+import { backToClients, NotShown, ScreenOpening } from "@/components/frame/not-shown";
+import { useIdParam } from "@/components/store/use-id-param";
 import { useKeep, useView } from "@/components/store/use-book";
 import { type DraftHandle, useDraft } from "@/components/store/use-draft";
 import { useToday } from "@/components/store/use-today";
@@ -20,13 +20,17 @@ const draftKey = (id: string): string => `client:wearer:change:${id}`;
 
 export function ChangeWearerScreen() {
   const id = useIdParam("id");
-  return id ? <Change key={id} id={id} /> : <NotShown title={TITLE} state="known" say={NOT_HERE} />;
+  return id ? (
+    <Change key={id} id={id} />
+  ) : (
+    <NotShown back={backToClients} title={TITLE} state="known" say={NOT_HERE} />
+  );
 }
 
 function Change({ id }: { id: string }) {
   const { view, state } = useView(wearerCardQuery, { id });
   const handle = useDraft<WearerValues>(draftKey(id));
-  if (!view) return <NotShown title={TITLE} state={state} say={NOT_HERE} />;
+  if (!view) return <NotShown back={backToClients} title={TITLE} state={state} say={NOT_HERE} />;
   if (handle.draft === undefined) return <ScreenOpening title={TITLE} />;
   return <ChangeForm wearer={view.wearer} handle={handle} />;
 }

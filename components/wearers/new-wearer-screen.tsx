@@ -2,8 +2,8 @@
 
 import { useRouter } from "next/navigation";
 import { useState } from "react";
-import { NotShown, ScreenOpening } from "@/components/clients/not-shown";
-import { useIdParam } from "@/components/clients/use-id-param";
+import { backToClients, NotShown, ScreenOpening } from "@/components/frame/not-shown";
+import { useIdParam } from "@/components/store/use-id-param";
 import { useKeep, useView } from "@/components/store/use-book";
 import { useDraft } from "@/components/store/use-draft";
 import { useToday } from "@/components/store/use-today";
@@ -20,7 +20,7 @@ export function NewWearerScreen() {
   return client ? (
     <NewOf key={client} clientId={client} />
   ) : (
-    <NotShown title={TITLE} state="known" say={NOT_HERE} />
+    <NotShown back={backToClients} title={TITLE} state="known" say={NOT_HERE} />
   );
 }
 
@@ -32,7 +32,7 @@ function NewOf({ clientId }: { clientId: string }) {
   const key = `client:${clientId}:new-wearer`;
   const handle = useDraft<WearerValues>(key);
   const { keep, busy, problem } = useKeep();
-  if (!view) return <NotShown title={TITLE} state={state} say={NOT_HERE} />;
+  if (!view) return <NotShown back={backToClients} title={TITLE} state={state} say={NOT_HERE} />;
   if (handle.draft === undefined) return <ScreenOpening title={TITLE} />;
   return (
     <WearerForm

@@ -1,9 +1,9 @@
 "use client";
 
 import { BinAsk } from "@/components/clients/bin-ask";
-import { KeepTrouble } from "@/components/clients/form-notices";
-import { backToClients, NotShown } from "@/components/clients/not-shown";
-import { useIdParam } from "@/components/clients/use-id-param";
+import { KeepTrouble } from "@/components/frame/form-notices";
+import { backToClients, NotShown } from "@/components/frame/not-shown";
+import { useIdParam } from "@/components/store/use-id-param";
 import { useKeep, useView, useWorkshop } from "@/components/store/use-book";
 import { useDraft } from "@/components/store/use-draft";
 import { useToday } from "@/components/store/use-today";
@@ -27,12 +27,16 @@ const NOT_HERE = "This wearer is not in the book.";
 
 export function WearerCardScreen() {
   const id = useIdParam("id");
-  return id ? <WearerCard key={id} id={id} /> : <NotShown title="Wearer" state="known" say={NOT_HERE} />;
+  return id ? (
+    <WearerCard key={id} id={id} />
+  ) : (
+    <NotShown back={backToClients} title="Wearer" state="known" say={NOT_HERE} />
+  );
 }
 
 function WearerCard({ id }: { id: string }) {
   const { view, state } = useView(wearerCardQuery, { id });
-  if (!view) return <NotShown title="Wearer" state={state} say={NOT_HERE} />;
+  if (!view) return <NotShown back={backToClients} title="Wearer" state={state} say={NOT_HERE} />;
   return view.wearer.removedAt === null ? <LiveWearer view={view} /> : <BinnedWearer view={view} />;
 }
 

@@ -3,8 +3,8 @@
 import { zodResolver } from "@hookform/resolvers/zod";
 import { useMemo } from "react";
 import { useForm, useWatch } from "react-hook-form";
-import { BroughtBack, KeepTrouble } from "@/components/clients/form-notices";
-import { useFormDraft } from "@/components/clients/use-form-draft";
+import { BroughtBack, KeepTrouble } from "@/components/frame/form-notices";
+import { useFormDraft } from "@/components/store/use-form-draft";
 import { type DraftHandle } from "@/components/store/use-draft";
 import { Button } from "@/components/ui/button";
 import { Screen, type ScreenProps } from "@/components/ui/screen";

@@ -3,9 +3,9 @@
 import { zodResolver } from "@hookform/resolvers/zod";
 import { useMemo, useState } from "react";
 import { useForm, useWatch } from "react-hook-form";
-import { BroughtBack, KeepTrouble } from "@/components/clients/form-notices";
-import { useFormDraft } from "@/components/clients/use-form-draft";
-import { usePhoneReading } from "@/components/clients/use-phone-reading";
+import { BroughtBack, KeepTrouble } from "@/components/frame/form-notices";
+import { useFormDraft } from "@/components/store/use-form-draft";
+import { usePhoneReading } from "@/components/store/use-phone-reading";
 import { useKeep } from "@/components/store/use-book";
 import { type DraftHandle, useDraft } from "@/components/store/use-draft";
 import { Button } from "@/components/ui/button";

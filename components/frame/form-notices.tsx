@@ -4,7 +4,7 @@ import { useState } from "react";
 import { Button } from "@/components/ui/button";
 import { Notice } from "@/components/ui/notice";
 import { type KeepProblem } from "@/lib/store/keep-problem";
-import { type FormDraft } from "./use-form-draft";
+import { type FormDraft } from "@/components/store/use-form-draft";
 
 /** Says quietly that something unfinished is back in the form. */
 export function BroughtBack({ draft: { broughtBack, startOver } }: { draft: FormDraft }) {
