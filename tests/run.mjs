@@ -61,6 +61,7 @@ function countPlaywright() {
 rmSync(output, { recursive: true, force: true });
 mkdirSync(output, { recursive: true });
 installPackages();
+if (run("npm", ["run", "prepare:browser"]) !== 0) process.exit(1);
 const unit = run("npx", [
   "vitest",
   "run",
