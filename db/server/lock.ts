@@ -24,6 +24,16 @@ function isAlive(pid: number): boolean {
   }
 }
 
+/** When a process began, as Linux counts it, or "" where it cannot be told: a number may be given out again. */
+function beganAt(pid: number): string {
+  try {
+    // The name in brackets may hold spaces; the 22nd field of all is the 20th behind it.
+    return readFileSync(`/proc/${pid}/stat`, "utf8").split(") ").pop()?.split(" ")[19] ?? "";
+  } catch {
+    return "";
+  }
+}
+
 /**
  * Takes the folder for this process, making it where it is missing; the returned function gives it back.
  * @throws DataFolderBusy while another living process has it.
@@ -34,7 +44,7 @@ export function lockFolder(folder: string): () => void {
   for (let tried = 0; ; tried++) {
     try {
       // "wx" fails where the file exists: the making of the file is the taking of the lock.
-      writeFileSync(file, String(process.pid), { flag: "wx" });
+      writeFileSync(file, `${process.pid} ${beganAt(process.pid)}`, { flag: "wx" });
       return () => rmSync(file, { force: true });
     } catch (error) {
       if ((error as NodeJS.ErrnoException).code !== "EEXIST" || tried > 3) throw error;

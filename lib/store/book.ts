@@ -185,7 +185,10 @@ export class Book {
   private watchOpening(database: DatabaseState): void {
     clearTimeout(this.openingTimer);
     if (database.phase !== "opening") return;
+    const begun = Date.now();
     this.openingTimer = setTimeout(() => {
+      // A phone that slept meanwhile proves nothing: the worker slept too. Look again.
+      if (document.hidden || Date.now() - begun > this.openedWithin * 1.5) return this.watchOpening(database);
       this.openedWithin *= 2;
       void this.leaveStuckDatabase().catch(() => undefined);
     }, this.openedWithin);

@@ -26,6 +26,8 @@ describe("the server's data folder", () => {
       other.kill("SIGKILL");
       await new Promise((resolve) => other.once("exit", resolve));
     }
+    // A number that another process has got since then holds nothing.
+    writeFileSync(join(folder, "notchbook.lock"), `${process.ppid} 1`);
     const unlock = lockFolder(folder);
     expect(existsSync(join(folder, "notchbook.lock"))).toBe(true);
     unlock();
