@@ -28,7 +28,14 @@ async function namesInList(page: Page, url: string): Promise<string[]> {
     .first()
     .waitFor({ timeout: 20_000 })
     .catch(() => undefined);
-  while (await more.isVisible()) await more.click();
+  // The key goes while the next ones are fetched: the list is whole only when it stays away.
+  for (let away = 0; away < 3;) {
+    if (await more.isVisible()) {
+      away = 0;
+      await more.click();
+    } else away++;
+    await page.waitForTimeout(250);
+  }
   const names = await page.getByRole("link", { name: /^Kept \d/ }).allInnerTexts();
   return names.map((text) => text.split("\n")[0]!.trim());
 }

@@ -16,6 +16,7 @@ export class Line {
   holdBack: RegExp | null = null;
   /** Paths that match are answered by 502. */
   refuse: RegExp | null = null;
+  refused = 0;
   /** Text put behind the server's answer, by path. */
   readonly appended = new Map<string, string>();
   private server: Server | undefined;
@@ -56,8 +57,10 @@ export class Line {
         passed.on("error", () => refuse(outgoing));
         incoming.pipe(passed);
       };
-      if (this.refuse?.test(path)) refuse(outgoing);
-      else if (this.holdBack?.test(path)) this.held.push({ pass, outgoing });
+      if (this.refuse?.test(path)) {
+        this.refused++;
+        refuse(outgoing);
+      } else if (this.holdBack?.test(path)) this.held.push({ pass, outgoing });
       else pass();
     });
     await new Promise<void>((resolve) => this.server!.listen(this.port, resolve));
