@@ -57,3 +57,19 @@ export async function beginWorkshop(
   await page.getByRole("button", { name: "Begin", exact: true }).click();
   await page.waitForURL((url) => url.pathname === "/");
 }
+
+/** Taps a figure on the pad: whole inches, then the eighths key, which moves on by itself; a question is answered. */
+export async function tapFigure(page: Page, whole: string, eighths: RegExp): Promise<void> {
+  const asked = page.locator(".pad-about").getByRole("heading");
+  const right = page.getByRole("button", { name: "It is right" });
+  const name = await asked.innerText();
+  const movedOn = async () => !(await asked.isVisible()) || (await asked.innerText()) !== name;
+  for (const digit of whole) await page.getByRole("button", { name: digit, exact: true }).click();
+  await page
+    .getByRole("group", { name: /^Eighths/ })
+    .getByRole("button", { name: eighths })
+    .click();
+  await expect.poll(async () => (await right.isVisible()) || (await movedOn())).toBe(true);
+  if (await right.isVisible()) await right.click();
+  await expect.poll(movedOn).toBe(true);
+}
