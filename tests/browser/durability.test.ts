@@ -40,6 +40,8 @@ async function namesInList(page: Page, url: string): Promise<string[]> {
   return names.map((text) => text.split("\n")[0]!.trim());
 }
 
+test.describe.configure({ retries: 0 });
+
 test("L1 a hundred ends of the browser lose nothing that was kept and double nothing", async ({ server }) => {
   test.setTimeout(900_000);
   console.log(`seed ${seed} (SEED=${seed} runs it again)`);

@@ -42,7 +42,7 @@ export async function untilReadyWithoutALine(page: Page): Promise<void> {
 export async function untilDatabaseOpen(page: Page): Promise<void> {
   const line = page.locator(".kept-line");
   await expect(line).toHaveText(/^Kept on this phone · (?!opening|reading|the book does not)/, {
-    timeout: 60_000,
+    timeout: 150_000,
   });
 }
 
