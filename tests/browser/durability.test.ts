@@ -69,7 +69,10 @@ test("L1 a hundred ends of the browser lose nothing that was kept and double not
       if (kill % 5 === 0 || kill % SPOIL_EVERY === SPOIL_EVERY - 1)
         check(await namesInList(page, server.url));
 
-      const until = new Promise((resolve) => setTimeout(resolve, 150 + luck() * 1500));
+      // Counted from the first press, so that a slow machine too is ended in and after writes, not before them.
+      let pressed = () => {};
+      const begun = new Promise<void>((resolve) => (pressed = resolve));
+      const until = begun.then(() => new Promise((resolve) => setTimeout(resolve, luck() * 1500)));
       let over = false;
       const writing = (async () => {
         for (let w = 0; w < 3 && !over; w++) {
@@ -77,7 +80,9 @@ test("L1 a hundred ends of the browser lose nothing that was kept and double not
           const name = nameOf(n++);
           await page.getByLabel("Name", { exact: true }).first().fill(name);
           tried.add(name);
-          await page.getByRole("button", { name: "Keep the client" }).click();
+          const press = page.getByRole("button", { name: "Keep the client" }).click();
+          pressed();
+          await press;
           // The screen moves on only when the change is kept.
           await page.waitForURL(/\/clients\/card/);
           kept.add(name);
