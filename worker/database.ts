@@ -11,6 +11,7 @@ import { deleteOthers, fetchEngine, openDatabase, type OpenDatabase } from "@/db
 import { bookTables } from "@/db/schema";
 import { drizzleSource } from "@/db/source";
 import { isSpoilt } from "@/db/spoilt";
+import { type Change } from "@/lib/journal/change";
 import { type Head, openJournal } from "@/lib/journal/journal";
 import { type AnyRow } from "@/lib/journal/merge";
 import { strictStore } from "@/lib/journal/strict-store";
@@ -27,6 +28,8 @@ import { queriesByName } from "@/lib/store/queries";
 
 const journal = openJournal(strictStore(JOURNAL_NAME, "journal"));
 const CHANGES_A_STEP = 100;
+/** Questions wait while a step is applied; a change of a copy that is read in holds hundreds of rows. */
+const ROWS_A_STEP = 1000;
 
 let state: DatabaseState = { phase: "waiting" };
 let leads = false;
@@ -55,24 +58,45 @@ async function catchUp(
     const last = changes.at(-1);
     if (!last) return applied;
     tell?.(applied - first, Math.max((await journal.head()).next - 1 - first, 1));
-    await applyChanges(open.db, changes);
+    for (const step of stepsOf(changes)) await applyChanges(open.db, step);
     applied = last.number;
   }
 }
 
+/** Runs of changes with about `ROWS_A_STEP` rows, in their order. */
+function stepsOf(changes: readonly Change[]): Change[][] {
+  const steps: Change[][] = [];
+  let rows = ROWS_A_STEP;
+  for (const change of changes) {
+    if (rows >= ROWS_A_STEP) {
+      steps.push([]);
+      rows = 0;
+    }
+    steps.at(-1)!.push(change);
+    rows += change.rows.length;
+  }
+  return steps;
+}
+
 type Engine = Awaited<ReturnType<typeof fetchEngine>>;
 
-async function openOnce(head: Head, engine: Engine): Promise<OpenDatabase> {
+interface Opened {
+  open: OpenDatabase;
+  applied: number;
+}
+
+async function openOnce(head: Head, engine: Engine): Promise<Opened> {
   become({ phase: "opening" });
   const open = await openDatabase(databaseName(head), engine);
   try {
     const mark = await readMark(open.db, head.device);
     if (mark.applied >= head.next) throw new Error("the database is ahead of the journal");
     await checkCounts(open.db, mark);
-    // What the mark says was really saved: it has just come out of a reopened database.
-    await journal.confirm(mark.applied);
-    await catchUp(open, head, (done, of) => become({ phase: "reading", done, of }));
-    return open;
+    // What the mark says was really saved: it has just come out of a reopened database. On a full phone this cannot be
+    // noted; the screens then only lay more changes over the rows.
+    await journal.confirm(mark.applied, head.book).catch(() => undefined);
+    const applied = await catchUp(open, head, (done, of) => become({ phase: "reading", done, of }));
+    return { open, applied };
   } catch (error) {
     await open.close().catch(() => undefined);
     throw error;
@@ -98,7 +122,7 @@ class Leader {
     const engine = await fetchEngine((done, of) => become({ phase: "fetching", done, of }));
     const leader = new Leader(head, engine, null);
     try {
-      leader.open = await openOnce(head, engine);
+      leader.take(await openOnce(head, engine));
     } catch (error) {
       await leader.rebuild(error);
     }
@@ -108,14 +132,23 @@ class Leader {
   /** Asks the database; where it cannot answer, asks again the one made anew. */
   async ask<T>(question: (db: BookDatabase) => Promise<T>): Promise<T> {
     await this.rebuilding;
+    const asked = this.open;
     try {
-      return await question(this.open!.db);
+      return await question(asked!.db);
     } catch (error) {
       if (!isSpoilt(error)) throw error;
-      await this.rebuild(error);
-      this.ready();
+      // Several may have been asked of the one that was spoilt; by the time this fails there may be another.
+      if (asked === this.open || this.open === null) {
+        await this.rebuild(error);
+        this.ready();
+      }
       return question(this.open!.db);
     }
+  }
+
+  private take({ open, applied }: Opened): void {
+    this.open = open;
+    this.applied = applied;
   }
 
   source(db: BookDatabase) {
@@ -134,6 +167,8 @@ class Leader {
     while (this.again) {
       this.again = false;
       this.applied = await this.ask(() => catchUp(this.open!, this.head));
+      // After a failure everybody has to hear that it answers again.
+      if (state.phase !== "ready") this.ready();
       state = { phase: "ready", applied: this.applied, rebuilt: this.rebuilt };
       news.tell({ kind: "rows-changed", applied: this.applied });
     }
@@ -155,7 +190,7 @@ class Leader {
     void this.open?.close().catch(() => undefined);
     this.open = null;
     this.head = await journal.leaveDatabase(this.head.generation);
-    this.open = await openOnce(this.head, this.engine);
+    this.take(await openOnce(this.head, this.engine));
     this.rebuilt = true;
   }
 }

@@ -27,13 +27,41 @@ function makeClient(): QueryClient {
   });
 }
 
+/** The screens' rows, right for whoever lays every change after `after` over them. */
+interface KeptScreens {
+  after: number;
+  value: string;
+}
+
+/** The last change that no screen's rows need laid over them. */
+async function neededAfter(): Promise<number> {
+  const book = openBook();
+  const { next } = await book.opened;
+  return (book.pending.all()[0]?.number ?? next) - 1;
+}
+
+/**
+ * The rows of the screens, once the changes that they lack are held: a screen that was not looked at since has older
+ * rows than the database, and would show an order as not taken. Null where those changes are too many to be held.
+ */
+async function readScreens({ after, value }: KeptScreens): Promise<string | null> {
+  const book = openBook();
+  const lacking = await book.changesSince(after);
+  book.pending.add(lacking);
+  return lacking.length === 0 || (await neededAfter()) <= after ? value : null;
+}
+
 /** Keeps the screens' rows under the name of the book that they are of: another book never sees them. */
 function makePersister() {
   const keyOf = async (key: string) => `${key}/${(await openBook().opened).book}`;
   return createAsyncStoragePersister({
     storage: {
-      getItem: async (key) => (await get<string>(await keyOf(key), screensStore)) ?? null,
-      setItem: async (key, value) => set(await keyOf(key), value, screensStore),
+      getItem: async (key) => {
+        const kept = await get<KeptScreens>(await keyOf(key), screensStore);
+        return kept?.value ? readScreens(kept) : null;
+      },
+      setItem: async (key, value) =>
+        set(await keyOf(key), { after: await neededAfter(), value } satisfies KeptScreens, screensStore),
       removeItem: async (key) => del(await keyOf(key), screensStore),
     },
     throttleTime: 500,

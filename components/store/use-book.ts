@@ -36,7 +36,7 @@ export interface Viewed<V> {
 
 /** What a query shows now: the database's rows, or the last seen, with every kept change laid over them. */
 export function useView<A, V>(query: Query<A, V>, args: A): Viewed<V> {
-  const { data, isError } = useQuery({
+  const { data, isError, isPlaceholderData } = useQuery({
     queryKey: [query.name, args],
     queryFn: () => openBook().read(query.name, args),
     // A list that is being searched goes on showing the last answer until the next one is there.
@@ -52,7 +52,9 @@ export function useView<A, V>(query: Query<A, V>, args: A): Viewed<V> {
     () => query.view(overlay(data ?? {}, pending), JSON.parse(key) as A),
     [query, data, pending, key],
   );
-  return { view, state: data ? "known" : isError ? "failed" : "opening" };
+  // The last answer was to another question: that it does not hold this thing does not say that it is not there.
+  const known = data !== undefined && !(isPlaceholderData && view === null);
+  return { view, state: known ? "known" : isError ? "failed" : "opening" };
 }
 
 /** The workshop, or null where none is known (not begun yet, or still opening). */

@@ -6,7 +6,7 @@ import { v7 as uuidv7 } from "uuid";
 import { type FieldsByTable, type RowHead, type RowOf, type TableName } from "@/lib/records/types";
 
 /** Moves up by one with each migration that changes synced fields. */
-export const SCHEMA_NUMBER = 1;
+export const SCHEMA_NUMBER = 2;
 
 export interface FieldChange {
   value: unknown;

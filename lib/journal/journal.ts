@@ -47,18 +47,24 @@ export interface Journal {
    * @param book the book that it was written for. @throws BookReplaced where another one stands here by now.
    */
   append(build: (numbers: Numbers) => Write[], book?: string): Promise<Change>;
-  /** Keeps rows with the stamps they already have (a copy that is read back), as one change. */
-  appendRows(rows: RowChange[], workshopId: string): Promise<Change>;
+  /**
+   * Keeps rows with the stamps they already have (a copy that is read back), as one change.
+   * @param book as in `append`. @throws BookReplaced
+   */
+  appendRows(rows: RowChange[], book?: string): Promise<Change>;
   /** Changes numbered above `after`, in order, at most `limit`. */
   since(after: number, limit?: number): Promise<Change[]>;
-  /** Notes what a reopened database was seen to hold. */
-  confirm(number: number): Promise<Head>;
+  /** Notes what a reopened database of `book` was seen to hold; of a book that is no more, nothing. */
+  confirm(number: number, book: string): Promise<Head>;
   /** Notes that a copy was saved: the last change in it, and when it was made. */
   noteCopy(copy: { number: number; at: string }): Promise<Head>;
   /** Gives up the database of a generation; gives the head with the next one. Once, however many tabs ask. */
   leaveDatabase(generation: number): Promise<Head>;
-  /** Empties everything in one transaction and begins a new book for `workshopId`. */
-  startAnew(workshopId?: string): Promise<Head>;
+  /**
+   * Empties everything in one transaction and begins a new book for `workshopId`.
+   * @param seen the head of the book that is to go. @throws BookReplaced where that one has moved on, with nothing cleared.
+   */
+  startAnew(workshopId?: string, seen?: Head): Promise<Head>;
 }
 
 /** Another window has cleared this book or read in another. Its rows are no more: nothing may be written about them. */
@@ -80,6 +86,18 @@ function freshHead(workshopId: string = newId()): Head {
   };
 }
 
+/**
+ * The value without what PostgreSQL cannot hold and nobody can see: the sign of code 0, and half an emoji (a keyboard
+ * that deletes by halves leaves one). One of them in the journal and no database could follow it any more.
+ */
+function storable(value: unknown): unknown {
+  if (typeof value === "string") return value.replaceAll("\0", "").replace(/\p{Surrogate}/gu, "");
+  if (Array.isArray(value)) return value.map(storable);
+  if (typeof value === "object" && value !== null)
+    return Object.fromEntries(Object.entries(value).map(([name, member]) => [name, storable(member)]));
+  return value;
+}
+
 /** @throws where a write would change what is only ever added to (sync contract P3): a fault of the caller. */
 function stamped(writes: Write[], stamp: string): RowChange[] {
   for (const { table, makes } of writes)
@@ -94,7 +112,7 @@ function stamped(writes: Write[], stamp: string): RowChange[] {
       fields: Object.fromEntries(
         Object.entries(fields).map(([name, value]) => [
           name,
-          { value: value ?? null, stamp, base: bases[name] ?? null },
+          { value: storable(value ?? null), stamp, base: bases[name] ?? null },
         ]),
       ),
     }));
@@ -108,7 +126,7 @@ export function openJournal(store: UseStore, now: () => number = Date.now): Jour
 
   const put = (
     build: (head: Head, stamp: string, numbers: Numbers) => RowChange[],
-    { workshopId, book }: { workshopId?: string; book?: string },
+    book: string | undefined,
   ) =>
     store("readwrite", async (objects) => {
       const done = promisifyRequest(objects.transaction);
@@ -126,7 +144,7 @@ export function openJournal(store: UseStore, now: () => number = Date.now): Jour
       const change: Change = {
         number: head.next,
         device: head.device,
-        workshopId: workshopId ?? head.workshopId,
+        workshopId: head.workshopId,
         schema: SCHEMA_NUMBER,
         writtenAt: new Date(now()).toISOString(),
         rows,
@@ -140,6 +158,7 @@ export function openJournal(store: UseStore, now: () => number = Date.now): Jour
   const updateHead = async (change: (head: Head) => Head): Promise<Head> =>
     store("readwrite", async (objects) => {
       const done = promisifyRequest(objects.transaction);
+      done.catch(() => undefined);
       const head = change(await readHead(objects));
       objects.put(head, "head");
       await done;
@@ -150,22 +169,30 @@ export function openJournal(store: UseStore, now: () => number = Date.now): Jour
     head: async () =>
       (await store("readonly", (objects) => promisifyRequest<Head | undefined>(objects.get("head")))) ??
       updateHead((head) => head),
-    append: (build, book) => put((_head, stamp, numbers) => stamped(build(numbers), stamp), { book }),
-    appendRows: (rows, workshopId) => put(() => rows, { workshopId }),
+    append: (build, book) => put((_head, stamp, numbers) => stamped(build(numbers), stamp), book),
+    appendRows: (rows, book) => put(() => rows, book),
     since: async (after, limit) => {
       const held = await store("readonly", (objects) =>
         promisifyRequest<Change[]>(objects.getAll(IDBKeyRange.bound(after, Infinity, true), limit)),
       );
       return held.map((change) => upgradeChange(change));
     },
-    confirm: (number) =>
-      updateHead((head) => (number > head.confirmed ? { ...head, confirmed: number } : head)),
+    confirm: (number, book) =>
+      updateHead((head) =>
+        head.book === book && number > head.confirmed ? { ...head, confirmed: number } : head,
+      ),
     noteCopy: (lastCopy) => updateHead((head) => ({ ...head, lastCopy })),
     leaveDatabase: (generation) =>
       updateHead((head) => (head.generation === generation ? { ...head, generation: generation + 1 } : head)),
-    startAnew: (workshopId) =>
+    startAnew: (workshopId, seen) =>
       store("readwrite", async (objects) => {
         const done = promisifyRequest(objects.transaction);
+        done.catch(() => undefined);
+        if (seen) {
+          const held = await readHead(objects);
+          if (held.book !== seen.book || held.next !== seen.next)
+            throw new BookReplaced("This book has moved on.");
+        }
         const head = freshHead(workshopId);
         objects.clear();
         objects.put(head, "head");

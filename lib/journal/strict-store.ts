@@ -24,9 +24,22 @@ export function strictStore(databaseName: string, storeName: string): UseStore {
     opening.catch(() => (opening = undefined));
     return opening;
   };
-  return async (mode, use) => {
-    const database = await open();
-    const transaction = database.transaction(storeName, mode, { durability: "strict" });
-    return use(transaction.objectStore(storeName));
+  const begin = async (mode: IDBTransactionMode): Promise<IDBTransaction> =>
+    (await open()).transaction(storeName, mode, { durability: "strict" });
+  return async (mode, run) => {
+    const transaction = await begin(mode).catch((error: unknown) => {
+      // Some browsers close a connection without saying so. Nothing has begun yet, so it may be tried on another.
+      if ((error as Error | null)?.name !== "InvalidStateError") throw error;
+      opening = undefined;
+      return begin(mode);
+    });
+    // While a failed request's error passes through its transaction, the transaction itself has none yet.
+    let reason: DOMException | null = null;
+    transaction.addEventListener("error", (event) => (reason ??= (event.target as IDBRequest).error));
+    try {
+      return await run(transaction.objectStore(storeName));
+    } catch (error) {
+      throw error ?? reason ?? transaction.error;
+    }
   };
 }

@@ -33,6 +33,8 @@ export class Book {
   private readonly listeners = new Set<() => void>();
   private readonly changeListeners = new Set<(applied: number) => void>();
   private current: BookState = { phase: "reading-journal" };
+  /** Every change up to here has been read or needs not be. Own changes do not move it: another tab's may lie before. */
+  private readTo = 0;
   /** The device's state as it was when the book was opened; rejects where storage is refused. */
   readonly opened: Promise<Head>;
   private worker: Worker | undefined;
@@ -66,34 +68,31 @@ export class Book {
    * @throws KeepProblem, with words for the user, and nothing kept.
    */
   async keep(build: Write[] | ((numbers: Numbers) => Write[])): Promise<Change> {
-    try {
-      const start = performance.now();
+    const start = performance.now();
+    const change = await this.kept(async () => {
       const { book } = await this.opened;
-      const change = await this.journal.append(typeof build === "function" ? build : () => build, book);
+      return this.journal.append(typeof build === "function" ? build : () => build, book);
+    });
+    // It is kept: whatever goes wrong from here on may not say that it is not, or it would be kept twice.
+    try {
       performance.measure("notchbook:kept", { start });
-      return this.show(change);
     } catch (error) {
-      throw keepProblem(error);
+      console.error(error);
     }
+    return this.show(change);
   }
 
-  /** Keeps rows of a copy with the stamps they have. @throws KeepProblem */
-  async keepRows(rows: RowChange[]): Promise<void> {
-    try {
-      const head = await this.journal.head();
-      this.show(await this.journal.appendRows(rows, head.workshopId));
-    } catch (error) {
-      throw keepProblem(error);
-    }
+  /** Keeps rows of a copy in `book`, with the stamps they have. @throws KeepProblem */
+  async keepRows(rows: RowChange[], book: string): Promise<void> {
+    this.show(await this.kept(() => this.journal.appendRows(rows, book)));
   }
 
-  /** Clears everything on this phone and begins an empty book; every tab starts again. @throws KeepProblem */
-  async startAnew(workshopId?: string): Promise<void> {
-    try {
-      await this.journal.startAnew(workshopId);
-    } catch (error) {
-      throw keepProblem(error);
-    }
+  /**
+   * Clears everything on this phone and begins an empty book; every tab starts again.
+   * @param seen where nothing may have been kept since: the head as it was. @throws KeepProblem
+   */
+  async startAnew(workshopId?: string, seen?: Head): Promise<Head> {
+    return this.kept(() => this.journal.startAnew(workshopId, seen));
   }
 
   /** Tells every other tab to begin again, after `startAnew` and what was to follow it. */
@@ -125,6 +124,14 @@ export class Book {
     return this.ask(() => this.calls.page(table, afterId, limit));
   }
 
+  private async kept<T>(write: () => Promise<T>): Promise<T> {
+    try {
+      return await write();
+    } catch (error) {
+      throw keepProblem(error);
+    }
+  }
+
   private async ask<T>(call: () => Promise<T>): Promise<T> {
     for (let tried = 1; ; tried++) {
       await this.ready();
@@ -135,7 +142,7 @@ export class Book {
       const answer = await Promise.race([call(), late]).finally(() => clearTimeout(timer));
       if (answer !== "late") return answer;
       if (tried >= TRIES) {
-        void this.leaveStuckDatabase();
+        void this.leaveStuckDatabase().catch(() => undefined);
         throw new Error("The database does not answer.");
       }
       this.news.tell({ kind: "state-wanted" });
@@ -153,7 +160,8 @@ export class Book {
   private async open(): Promise<void> {
     try {
       const head = await this.opened;
-      this.pending.add(await this.journal.since(head.confirmed));
+      this.readTo = head.confirmed;
+      await this.readOn();
       this.become({ phase: "open", head, database: { phase: "waiting" } });
     } catch (error) {
       this.become({ phase: "no-storage", say: storageProblem(error) });
@@ -166,11 +174,14 @@ export class Book {
   private beginWorker(): void {
     this.worker?.terminate();
     this.worker = this.startWorker();
-    this.worker.onerror = (event) =>
+    this.worker.onerror = (event) => {
       this.setDatabase({
         phase: "failed",
         say: event.message || "The database's program could not be loaded.",
       });
+      // Another tab's may lead and answer all the same.
+      this.news.tell({ kind: "state-wanted" });
+    };
   }
 
   /** Ends the thread that hangs, in whichever tab it is; the next one makes the database anew from the journal. */
@@ -195,7 +206,11 @@ export class Book {
   }
 
   private show(change: Change): Change {
-    this.pending.add([change]);
+    try {
+      this.pending.add([change]);
+    } catch (error) {
+      console.error(error);
+    }
     this.news.tell({ kind: "journal-grew" });
     void this.refreshHead();
     return change;
@@ -206,15 +221,22 @@ export class Book {
     if (head && this.current.phase === "open") this.become({ ...this.current, head });
   }
 
+  private async readOn(): Promise<void> {
+    const changes = await this.journal.since(this.readTo);
+    this.pending.add(changes);
+    this.readTo = Math.max(this.readTo, changes.at(-1)?.number ?? 0);
+  }
+
   private async catchUpWithOthers(): Promise<void> {
-    this.pending.add(await this.journal.since(this.pending.last));
+    await this.opened;
+    await this.readOn();
     await this.refreshHead();
   }
 
   private hear(item: News): void {
     if (item.kind === "journal-grew") void this.catchUpWithOthers().catch(() => undefined);
     if (item.kind === "state") this.setDatabase(item.state);
-    if (item.kind === "rows-changed") this.tellRowsChanged(item.applied);
+    if (item.kind === "rows-changed") this.rowsChanged(item.applied);
     if (item.kind === "database-stuck") {
       void this.refreshHead();
       this.beginWorker();
@@ -232,6 +254,12 @@ export class Book {
     if (database.phase !== "ready") return;
     for (const { ready } of this.waiters.splice(0)) ready();
     this.tellRowsChanged(database.applied);
+  }
+
+  private rowsChanged(applied: number): void {
+    if (this.current.phase === "open" && this.current.database.phase === "ready")
+      this.become({ ...this.current, database: { ...this.current.database, applied } });
+    this.tellRowsChanged(applied);
   }
 
   private tellRowsChanged(applied: number): void {

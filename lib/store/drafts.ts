@@ -2,7 +2,7 @@
  * What is being typed and is not kept yet: half-taken measurement sets, half-filled forms. Stays on this phone,
  * survives a flat battery, and goes when the thing itself is kept.
  */
-import { del, entries, get, set } from "idb-keyval";
+import { del, entries, get, promisifyRequest, set } from "idb-keyval";
 import { strictStore } from "@/lib/journal/strict-store";
 import { DRAFTS_NAME } from "./channels";
 
@@ -37,9 +37,10 @@ export async function listDrafts<T>(prefix: string): Promise<{ key: string; draf
     .sort((a, b) => b.draft.savedAt.localeCompare(a.draft.savedAt));
 }
 
-/** Takes every draft away, with the book that they belong to. */
+/** Takes every draft away, with the book that they belong to. Resolves when they are gone from the disk. */
 export async function dropAllDrafts(): Promise<void> {
-  await store("readwrite", async (objects) => {
+  await store("readwrite", (objects) => {
     objects.clear();
+    return promisifyRequest(objects.transaction);
   });
 }

@@ -15,6 +15,6 @@ export async function freshDatabase(): Promise<{ db: BookDatabase; client: PGlit
 export async function emptyDatabase(client: PGlite): Promise<void> {
   await client.exec(
     `truncate workshops, clients, wearers, measurement_sets, sleeves, orders, garments, price_lines, payments, receipts,
-     client_index, order_sums, journal_marks`,
+     sums, client_index, order_sums, journal_marks`,
   );
 }

@@ -13,6 +13,7 @@ import {
 } from "@/lib/copy/read-in";
 import { readCopy } from "@/lib/copy/read-copy";
 import { makeCopy, type SavedCopy, writeCopy } from "@/lib/copy/saved-copy";
+import { make } from "@/lib/journal/change";
 import { openJournal } from "@/lib/journal/journal";
 import { overlay } from "@/lib/journal/merge";
 import { strictStore } from "@/lib/journal/strict-store";
@@ -29,14 +30,17 @@ function freshBook(failAfter = Infinity) {
   let pieces = 0;
   let told = 0;
   const book: BookToFill = {
-    startAnew: async (workshopId) => void (await journal.startAnew(workshopId)),
+    startAnew: (workshopId, seen) => journal.startAnew(workshopId, seen),
     tellBookChanged: () => void told++,
-    keepRows: async (rows) => {
+    keepRows: async (rows, into) => {
       if (++pieces > failAfter) throw keepProblem(new DOMException("full", "QuotaExceededError"));
-      await journal.appendRows(rows, (await journal.head()).workshopId);
+      await journal.appendRows(rows, into).catch((error: unknown) => {
+        throw keepProblem(error);
+      });
     },
     noteCopy: async (copy) => void (await journal.noteCopy(copy)),
     head: () => journal.head(),
+    changesSince: (after) => journal.since(after),
   };
   const rows = async () => {
     const source = { page: () => Promise.reject(new Error("closed")), changesSince: journal.since };
@@ -48,6 +52,26 @@ function freshBook(failAfter = Infinity) {
 const sample = (seed: number) => fc.sample(changesOf({ max: 12 }), { numRuns: 1, seed })[0]!;
 const tables = (rows: Parameters<typeof makeCopy>[0]) =>
   makeCopy(rows, [], { workshopId: WORKSHOP, madeAt }).tables;
+
+const newClient = (name: string) =>
+  make("clients", { name, phone: "", phoneE164: null, email: "", address: "", note: "" });
+
+/** More rows than one change takes, so that a first piece may get in and the second not. */
+function manyClients() {
+  const rows = overlay({}, sample(8));
+  const [client] = rows.clients!;
+  rows.clients = Array.from({ length: 1200 }, (_, n) => ({
+    ...client!,
+    id: `01890001-0000-7000-8000-${n.toString(16).padStart(12, "0")}`,
+  }));
+  return rows;
+}
+
+/** The same book on a phone that has room again. */
+const withRoom = ({ book, journal }: ReturnType<typeof freshBook>): BookToFill => ({
+  ...book,
+  keepRows: async (rows, into) => void (await journal.appendRows(rows, into)),
+});
 
 async function fileOf(rows: Parameters<typeof makeCopy>[0], drafts: SavedCopy["drafts"] = []) {
   const text = await writeCopy(makeCopy(rows, drafts, { workshopId: WORKSHOP, madeAt }));
@@ -87,13 +111,7 @@ describe("reading in", () => {
   });
 
   it("ended half-way says so, and goes on from there to the whole copy", async () => {
-    const rows = overlay({}, sample(8));
-    // More rows than one change takes, so that a first piece gets in and the second does not.
-    const [client] = rows.clients!;
-    rows.clients = Array.from({ length: 1200 }, (_, n) => ({
-      ...client!,
-      id: `01890001-0000-7000-8000-${n.toString(16).padStart(12, "0")}`,
-    }));
+    const rows = manyClients();
     const { bytes, copy } = await fileOf(rows);
     const there = freshBook(1);
     const { workshopId } = await there.journal.head();
@@ -107,14 +125,86 @@ describe("reading in", () => {
     const rest = planReading(again, { workshopId: WORKSHOP, rows: await there.rows() });
     expect(rest.kind).toBe("same");
     expect(rest.counts.same).toBe(500);
-    const book: BookToFill = {
-      ...there.book,
-      keepRows: async (piece) => void (await there.journal.appendRows(piece, WORKSHOP)),
-    };
-    await readIn(book, again, left.bytes, rest, left.whole);
+    await readIn(withRoom(there), again, left.bytes, rest, left.whole);
     expect(tables(await there.rows())).toEqual(tables(rows));
-    expect((await there.journal.head()).lastCopy?.at).toBe(madeAt);
+    const head = await there.journal.head();
+    expect(head.lastCopy).toEqual({ number: head.next - 1, at: madeAt });
     expect(await unfinishedReading()).toBeNull();
+  });
+
+  it("that goes on counts as copied nothing that was kept between, as that is in no copy", async () => {
+    const { bytes, copy } = await fileOf(manyClients());
+    const there = freshBook(1);
+    const { workshopId } = await there.journal.head();
+    await expect(
+      readIn(there.book, copy, bytes, planReading(copy, { workshopId, rows: {} })),
+    ).rejects.toThrow();
+    await there.journal.append(() => [newClient("Own")]);
+    const rest = planReading(copy, { workshopId: WORKSHOP, rows: await there.rows() });
+    await readIn(withRoom(there), copy, bytes, rest, true);
+    const head = await there.journal.head();
+    expect(head.lastCopy!.number).toBeLessThan(2);
+    expect((await there.rows()).clients!.some(({ name }) => name === "Own")).toBe(true);
+  });
+
+  it("that goes on drops what was being typed in the earlier book, and keeps what was typed since", async () => {
+    const { bytes, copy } = await fileOf(manyClients(), [
+      { key: "client:new", savedAt: madeAt, value: "of the copy" },
+    ]);
+    const there = freshBook();
+    await setDraft("client:new", "of the book before");
+    await setDraft("order:new", "of the book before");
+    // The phone stops right after the clearing.
+    const cutOff: BookToFill = {
+      ...there.book,
+      tellBookChanged: () => {
+        throw new Error("cut off");
+      },
+    };
+    const { workshopId } = await there.journal.head();
+    const plan = planReading(copy, { workshopId, rows: {} });
+    await expect(readIn(cutOff, copy, bytes, plan)).rejects.toThrow("cut off");
+    await new Promise((later) => setTimeout(later, 5));
+    await setDraft("wearer:new", "typed since");
+    const rest = planReading(copy, { workshopId: WORKSHOP, rows: await there.rows() });
+    await readIn(there.book, copy, bytes, rest, true);
+    expect((await draftsForCopy()).map(({ key, value }) => [key, value])).toEqual([
+      ["client:new", "of the copy"],
+      ["wearer:new", "typed since"],
+    ]);
+  });
+
+  it("clears nothing without asking where another window began to fill the book meanwhile", async () => {
+    const { bytes, copy } = await fileOf(manyClients());
+    const there = freshBook();
+    const { workshopId } = await there.journal.head();
+    const plan = planReading(copy, { workshopId, rows: await there.rows() });
+    expect(plan.kind).toBe("empty");
+    await there.journal.append(() => [newClient("Kept in another window")]);
+    await expect(readIn(there.book, copy, bytes, plan)).rejects.toThrow(/changed in another window/);
+    expect((await there.rows()).clients).toHaveLength(1);
+    expect(await unfinishedReading()).toBeNull();
+  });
+
+  it("puts no row of one workshop into the book of another that was begun in another window", async () => {
+    const { bytes, copy } = await fileOf(manyClients());
+    const there = freshBook();
+    await there.journal.startAnew(WORKSHOP);
+    const plan = planReading(copy, { workshopId: WORKSHOP, rows: {} });
+    // Before the first piece, and between two.
+    await there.journal.startAnew();
+    await expect(readIn(there.book, copy, bytes, plan)).rejects.toThrow(/changed in another window/);
+    expect(await there.journal.since(0)).toEqual([]);
+    await there.journal.startAnew(WORKSHOP);
+    const interrupted: BookToFill = {
+      ...there.book,
+      keepRows: async (rows, into) => {
+        await there.book.keepRows(rows, into);
+        await there.journal.startAnew();
+      },
+    };
+    await expect(readIn(interrupted, copy, bytes, plan)).rejects.toThrow(/another window/);
+    expect(await there.journal.since(0)).toEqual([]);
   });
 
   it("merged in, leaves the book's own last copy as it is, and what is being typed now", async () => {
@@ -126,7 +216,7 @@ describe("reading in", () => {
     ]);
     const there = freshBook();
     await there.journal.startAnew(WORKSHOP);
-    await there.journal.appendRows(changes[0]!.rows, WORKSHOP);
+    await there.journal.appendRows(changes[0]!.rows);
     await setDraft("a", "now");
     const plan = planReading(copy, { workshopId: WORKSHOP, rows: await there.rows() });
     await readIn(there.book, copy, bytes, plan);

@@ -82,10 +82,9 @@ describe("the journal", () => {
   it("stamps on after a copy with later stamps was read in", async () => {
     const { journal } = fresh(() => 1000);
     const far = "0fffffffffff-0000-other";
-    await journal.appendRows(
-      [{ table: "clients", id: "a", makes: true, fields: { name: { value: "x", stamp: far, base: null } } }],
-      newId(),
-    );
+    await journal.appendRows([
+      { table: "clients", id: "a", makes: true, fields: { name: { value: "x", stamp: far, base: null } } },
+    ]);
     const after = await journal.append(() => [client("b")]);
     expect(after.rows[0]!.fields.name!.stamp > far).toBe(true);
   });
@@ -112,8 +111,52 @@ describe("the journal", () => {
     const { journal } = fresh();
     await journal.append(() => [client("Ada")]);
     await journal.append(() => [client("Ida")]);
-    await journal.confirm(2);
-    expect((await journal.confirm(1)).confirmed).toBe(2);
+    const { book } = await journal.head();
+    await journal.confirm(2, book);
+    expect((await journal.confirm(1, book)).confirmed).toBe(2);
+  });
+
+  it("notes nothing about a new book that the database of the one before it was seen to hold", async () => {
+    const { journal } = fresh();
+    await journal.append(() => [client("Ada")]);
+    const before = await journal.head();
+    await journal.startAnew();
+    expect((await journal.confirm(1, before.book)).confirmed).toBe(0);
+  });
+
+  it("keeps no rows of a copy in another book than the one that they were meant for", async () => {
+    const { journal } = fresh();
+    const { book } = await journal.head();
+    await journal.startAnew();
+    await expect(journal.appendRows([], book)).rejects.toThrow("no more");
+    expect((await journal.head()).next).toBe(1);
+  });
+
+  it("clears nothing where something was kept since the clearing was decided", async () => {
+    const { journal } = fresh();
+    const seen = await journal.head();
+    await journal.append(() => [client("Ada")]);
+    await expect(journal.startAnew(undefined, seen)).rejects.toThrow("moved on");
+    expect(await journal.since(0)).toHaveLength(1);
+    expect((await journal.startAnew(undefined, await journal.head())).next).toBe(1);
+  });
+
+  it("keeps nothing that no database could hold: the sign of code 0, half an emoji", async () => {
+    const { journal } = fresh();
+    const whole = "A\ud83e\uddf5\nda مريم";
+    const kept = await journal.append(() => [
+      client(`A\0${whole}\ud83e`),
+      make("measurementSets", {
+        wearerId: newId(),
+        takenOn: "2026-03-14",
+        takenBy: "",
+        figures: [{ key: "wrist", typed: "6\0\udf00", mm: 152.4 }],
+        note: "",
+        correctsId: null,
+      }),
+    ]);
+    expect(kept.rows[0]!.fields.name!.value).toBe(`A${whole}`);
+    expect(kept.rows[1]!.fields.figures!.value).toEqual([{ key: "wrist", typed: "6", mm: 152.4 }]);
   });
 });
 

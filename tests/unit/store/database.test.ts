@@ -18,7 +18,7 @@ let db: BookDatabase;
 let client: PGlite;
 beforeAll(async () => {
   ({ db, client } = await freshDatabase());
-});
+}, 60_000);
 afterAll(() => client.close());
 
 async function everything(): Promise<Rows> {
@@ -59,6 +59,8 @@ const asked: [string, unknown][] = [
   ...["open", "owing", "all"].map((show): [string, unknown] => ["orderList", { show, limit: 3 }]),
   ...[0, 1].map((n): [string, unknown] => ["orderCard", { id: idOf(5, n) }]),
   ["receipt", { id: idOf(9, 0) }],
+  ...[2, 50].map((limit): [string, unknown] => ["sumList", { limit }]),
+  ...[0, 1].map((n): [string, unknown] => ["sum", { id: idOf(10, n) }]),
   // Addresses are cut short and mistyped: no row, and no error either.
   ...["", "nonsense"].flatMap((id): [string, unknown][] => [
     ["clientCard", { id }],
@@ -68,6 +70,7 @@ const asked: [string, unknown][] = [
     ["orderPeople", { clientId: id }],
     ["receipt", { id }],
     ["sleeves", { ids: [id] }],
+    ["sum", { id }],
   ]),
   ["bin", {}],
 ];
@@ -101,7 +104,7 @@ describe("applying the journal to PGlite", () => {
     await applyChanges(db, [change!]);
     const table = change!.rows[0]!.table;
     await client.exec(
-      `delete from ${{ clients: "clients", wearers: "wearers", orders: "orders", priceLines: "price_lines", payments: "payments" }[table as "clients"]}`,
+      `delete from ${{ clients: "clients", wearers: "wearers", orders: "orders", priceLines: "price_lines", payments: "payments", sums: "sums" }[table as "clients"]}`,
     );
     await expect(checkCounts(db, await readMark(db, DEVICE))).rejects.toThrow(/0 rows where \d were kept/);
   });
@@ -114,6 +117,9 @@ describe("an error of the database", () => {
     expect(isSpoilt(Object.assign(new Error("invalid page"), { code: "XX001" }))).toBe(true);
     expect(isSpoilt(new Error("outer", { cause: { code: "58030" } }))).toBe(true);
     expect(isSpoilt(new WebAssembly.RuntimeError("unreachable"))).toBe(true);
+    expect(isSpoilt(Object.assign(new Error("bad file descriptor"), { code: "EBADF" }))).toBe(true);
+    // The journal's own, met while the database follows it.
+    expect(isSpoilt(new DOMException("gone", "UnknownError"))).toBe(false);
   });
 });
 
