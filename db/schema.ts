@@ -22,6 +22,8 @@ import {
   type ReceiptSnapshot,
   type SleeveAskRecord,
   type Stage,
+  type StyleId,
+  type SumInput,
   type TakenFigure,
   type Unit,
   type Fineness,
@@ -103,7 +105,7 @@ export const sleeves = pgTable(
     wearerId: uuid("wearer_id"),
     setId: uuid("set_id"),
     name: text("name").notNull(),
-    style: text("style").$type<"plain">().notNull(),
+    style: text("style").$type<StyleId>().notNull(),
     ask: jsonb("ask").$type<SleeveAskRecord>().notNull(),
     fineness: integer("fineness").$type<Fineness>().notNull(),
     note: text("note").notNull(),
@@ -195,6 +197,19 @@ export const receipts = pgTable(
   ],
 );
 
+export const sums = pgTable(
+  "sums",
+  {
+    ...head(),
+    orderId: uuid("order_id"),
+    kind: text("kind").notNull(),
+    name: text("name").notNull(),
+    inputs: jsonb("inputs").$type<Record<string, SumInput>>().notNull(),
+    note: text("note").notNull(),
+  },
+  (t) => [primaryKey({ columns: [t.workshopId, t.id] }), index().on(t.workshopId, t.orderId)],
+);
+
 /** The tables of a workshop's book, by the names that changes use. */
 export const bookTables = {
   workshops,
@@ -207,6 +222,7 @@ export const bookTables = {
   priceLines,
   payments,
   receipts,
+  sums,
 };
 
 /** Worked out from the rows above as they are written; never synced, made again at any time. */

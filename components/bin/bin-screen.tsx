@@ -44,7 +44,7 @@ export function BinScreen() {
       )}
       {state === "opening" && items.length === 0 && <Progress label="Opening the book" />}
       {state === "known" && items.length === 0 && (
-        <Empty say="The bin is empty. A client, wearer, order or sleeve that you put in the bin stands here until you bring it back." />
+        <Empty say="The bin is empty. A client, wearer, order, sleeve or sum that you put in the bin stands here until you bring it back." />
       )}
       {items.length > 0 && (
         <Card flush notches={0} aria-label="In the bin">

@@ -25,6 +25,7 @@ import { HandOverSheet } from "./hand-over-sheet";
 import { OrderGarments } from "./order-garments";
 import { BalanceCard, Payments, PriceLines } from "./order-money";
 import { backToOrders, NotShown } from "@/components/frame/not-shown";
+import { OrderSums } from "@/components/sums/order-sums";
 import { StageCard } from "./stage-card";
 
 const NOT_HERE = "This order is not in the book.";
@@ -121,6 +122,7 @@ function LiveOrder({ view }: { view: OrderCardView }) {
       {!act && <KeepTrouble keep={problem} draft={null} />}
       <BalanceCard view={view} onTake={() => setMoney("take")} onGiveBack={() => setMoney("give-back")} />
       <OrderGarments view={view} today={today} />
+      <OrderSums view={view} />
       <CautionsNotice cautions={cautions} folded={order.stage !== "agreed"} />
       <PriceLines view={view} />
       <Payments view={view} />

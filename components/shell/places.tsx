@@ -78,9 +78,10 @@ export const places: readonly Place[] = [
   },
 ];
 
-/** The place a path belongs to: the one it is, or lies below; wearers and measuring belong to the clients, the bin to the workshop. */
+/** The place a path belongs to: the one it is, or lies below; wearers and measuring belong to the clients, sums to the sleeves, the bin to the workshop. */
 export const placeOf = (path: string): string => {
   if (/^\/(measure|wearers)(\/|$)/.test(path)) return "/clients";
+  if (/^\/sums(\/|$)/.test(path)) return "/sleeves";
   if (path === "/bin") return "/settings";
   const below = places.find(({ href }) => href !== "/" && (path === href || path.startsWith(`${href}/`)));
   return below?.href ?? (path === "/" ? "/" : "");

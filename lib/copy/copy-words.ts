@@ -12,6 +12,7 @@ export function contentWords({ tables, drafts }: SavedCopy): string[] {
     ["wearers", "wearer"],
     ["measurementSets", "measurement set"],
     ["sleeves", "sleeve"],
+    ["sums", "sewing sum"],
     ["orders", "order"],
     ["payments", "payment"],
     ["receipts", "receipt"],

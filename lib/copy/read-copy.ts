@@ -14,17 +14,23 @@ const tables = z.strictObject(
   },
 );
 
+/** The tables of a copy of version 1, which came before sewing sums; read as one that has none. */
+const tablesOf1 = tables.omit({ sums: true }).transform((older) => ({ ...older, sums: [] }));
+
 const heading = z.object({ format: z.literal(COPY_FORMAT), version: z.int().min(1), schema: z.int().min(1) });
 
-const shape = z.strictObject({
+const members = {
   format: z.literal(COPY_FORMAT),
-  version: z.literal(COPY_VERSION),
   schema: z.int(),
   madeAt: z.iso.datetime(),
   workshop: z.strictObject({ id: z.guid(), name: z.string() }),
-  tables,
   drafts: z.array(z.strictObject({ key: z.string(), savedAt: z.string(), value: z.unknown() })),
-});
+};
+
+const shape = z.discriminatedUnion("version", [
+  z.strictObject({ ...members, version: z.literal(1), tables: tablesOf1 }),
+  z.strictObject({ ...members, version: z.literal(COPY_VERSION), tables }),
+]);
 
 const notACopy =
   "This file is not a saved copy of Notchbook. Choose the file that Notchbook saved; its name begins with “notchbook”.";

@@ -1,6 +1,7 @@
 /**
- * A saved copy: everything of a book in one JSON file of our own format. Version 1 has the members of `SavedCopy`;
- * `sha256` is the checksum of the canonical JSON of all the others. A file of every version there ever was must open.
+ * A saved copy: everything of a book in one JSON file of our own format. Version 2 has the members of `SavedCopy`;
+ * version 1 had no table `sums`. `sha256` is the checksum of the canonical JSON of all the others. A file of every
+ * version there ever was must open.
  */
 import { SCHEMA_NUMBER } from "@/lib/journal/change";
 import { type AnyRow, type Rows } from "@/lib/journal/merge";
@@ -8,7 +9,7 @@ import { type RowOf, type TableName, tableNames } from "@/lib/records/types";
 import { canonicalJson, sha256 } from "./canonical-json";
 
 export const COPY_FORMAT = "notchbook-copy";
-export const COPY_VERSION = 1;
+export const COPY_VERSION = 2;
 
 /** What was being typed and not kept yet. */
 export interface CopiedDraft {

@@ -20,6 +20,24 @@ const head = {
   removedAt: text.nullable(),
 };
 
+const typedLength = z.strictObject({ typed: text, mm: z.number() });
+
+const styleId = z.enum([
+  "plain",
+  "gathered-head",
+  "gathered-hem",
+  "puff",
+  "leg-of-mutton",
+  "statement",
+  "bishop",
+  "bell",
+  "flounced",
+  "petal",
+  "lantern",
+  "cap",
+  "tiered",
+]);
+
 const guideMarks = z.array(z.strictObject({ share: z.number(), out: z.number() })).nullable();
 
 const snapshot = z.strictObject({
@@ -81,12 +99,18 @@ export const rowSchemas = {
     wearerId: id.nullable(),
     setId: id.nullable(),
     name: text,
-    style: z.literal("plain"),
+    style: styleId,
     ask: z.strictObject({
-      lengths: z.record(text, z.strictObject({ typed: text, mm: z.number() })),
+      lengths: z.record(text, typedLength),
       frontMarks: guideMarks,
       backMarks: guideMarks,
       hemOpens: z.boolean(),
+      style: z
+        .strictObject({
+          figures: z.record(text, z.union([typedLength, z.number()])),
+          cloth: z.enum(["fine", "medium", "heavy"]),
+        })
+        .optional(),
     }),
     fineness,
     note: text,
@@ -137,5 +161,20 @@ export const rowSchemas = {
     number: text,
     issuedOn: day,
     snapshot,
+  }),
+  sums: z.strictObject({
+    ...head,
+    orderId: id.nullable(),
+    kind: text,
+    name: text,
+    inputs: z.record(
+      text,
+      z.strictObject({
+        typed: text,
+        mm: z.number().optional(),
+        value: z.union([z.number(), text]).optional(),
+      }),
+    ),
+    note: text,
   }),
 } satisfies { [T in TableName]: z.ZodType<RowOf<T>> };

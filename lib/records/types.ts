@@ -76,11 +76,27 @@ export interface TypedLength {
   mm: number;
 }
 
+/** The styles that a sleeve can have; `lib/drafting` has a recipe for each. */
+export type StyleId =
+  | "plain"
+  | "gathered-head"
+  | "gathered-hem"
+  | "puff"
+  | "leg-of-mutton"
+  | "statement"
+  | "bishop"
+  | "bell"
+  | "flounced"
+  | "petal"
+  | "lantern"
+  | "cap"
+  | "tiered";
+
 export interface SleeveFields {
   wearerId: string | null;
   setId: string | null;
   name: string;
-  style: "plain";
+  style: StyleId;
   /** What the drafting form holds: lengths by figure name, and the guide marks as set. */
   ask: SleeveAskRecord;
   fineness: Fineness;
@@ -93,6 +109,8 @@ export interface SleeveAskRecord {
   frontMarks: { share: number; out: number }[] | null;
   backMarks: { share: number; out: number }[] | null;
   hemOpens: boolean;
+  /** What the style asks for beyond the plain sleeve: lengths and ratios by name, and the cloth's weight. */
+  style?: { figures: Record<string, TypedLength | number>; cloth: "fine" | "medium" | "heavy" };
 }
 
 export type Stage = "agreed" | "cut" | "sewing" | "fitting" | "ready" | "handed-over";
@@ -163,6 +181,27 @@ export interface ReceiptFields {
   snapshot: ReceiptSnapshot;
 }
 
+/**
+ * One answer to a question of a sewing sum, as typed: a length with its millimetres, or the number or the choice that
+ * it came to. Neither where it was left out.
+ */
+export interface SumInput {
+  typed: string;
+  mm?: number;
+  value?: number | string;
+}
+
+/** A kept sewing sum. Only what was put in is kept; what comes out is worked out again. */
+export interface SumFields {
+  /** The order that it is on, or null. */
+  orderId: string | null;
+  /** Names a sum of `lib/sewing`. */
+  kind: string;
+  name: string;
+  inputs: Record<string, SumInput>;
+  note: string;
+}
+
 export interface FieldsByTable {
   workshops: WorkshopFields;
   clients: ClientFields;
@@ -174,6 +213,7 @@ export interface FieldsByTable {
   priceLines: PriceLineFields;
   payments: PaymentFields;
   receipts: ReceiptFields;
+  sums: SumFields;
 }
 
 export type TableName = keyof FieldsByTable;
@@ -189,6 +229,7 @@ export type Garment = RowOf<"garments">;
 export type PriceLine = RowOf<"priceLines">;
 export type Payment = RowOf<"payments">;
 export type Receipt = RowOf<"receipts">;
+export type Sum = RowOf<"sums">;
 
 export const tableNames = [
   "workshops",
@@ -201,6 +242,7 @@ export const tableNames = [
   "priceLines",
   "payments",
   "receipts",
+  "sums",
 ] as const satisfies readonly TableName[];
 
 /** Only ever added to; put right by adding (sync contract P3). */

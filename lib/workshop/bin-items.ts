@@ -4,7 +4,13 @@ import { wentWithClient } from "@/lib/clients/bin-question";
 import { orderName } from "@/lib/orders/order-name";
 import { type BinItem } from "@/lib/store/queries/bin";
 
-const kinds = { clients: "Client", wearers: "Wearer", orders: "Order", sleeves: "Sleeve" } as const;
+const kinds = {
+  clients: "Client",
+  wearers: "Wearer",
+  orders: "Order",
+  sleeves: "Sleeve",
+  sums: "Sum",
+} as const;
 
 export interface BinWords {
   kind: string;
@@ -22,7 +28,9 @@ const parentOf = (item: BinItem): string | null =>
     ? item.row.clientId
     : item.table === "sleeves"
       ? item.row.wearerId
-      : null;
+      : item.table === "sums"
+        ? item.row.orderId
+        : null;
 
 /**
  * What comes back together with a thing: first what it stands in and is in the bin too (an order its client), then the

@@ -2,7 +2,7 @@
 import fc from "fast-check";
 import { writeStamp } from "@/lib/clock/stamp";
 import { type Change, type RowChange, SCHEMA_NUMBER } from "@/lib/journal/change";
-import { type FieldsByTable, type TableName } from "@/lib/records/types";
+import { type FieldsByTable, type SumInput, type TableName } from "@/lib/records/types";
 
 export const WORKSHOP = "01890000-0000-7000-8000-000000000001";
 export const DEVICE = "3f0c8a52-6d5e-4b7a-9a41-1c2d3e4f5a6b";
@@ -16,6 +16,7 @@ const wearerId = fc.integer({ min: 0, max: 7 }).map((n) => idOf(2, n));
 const orderId = fc.integer({ min: 0, max: 6 }).map((n) => idOf(5, n));
 const lineId = fc.integer({ min: 0, max: 9 }).map((n) => idOf(7, n));
 const paymentId = fc.integer({ min: 0, max: 9 }).map((n) => idOf(8, n));
+const sumId = fc.integer({ min: 0, max: 5 }).map((n) => idOf(10, n));
 const day = fc
   .integer({ min: 0, max: 60 })
   .map((n) => new Date(Date.UTC(2026, 2, 1 + n)).toISOString().slice(0, 10));
@@ -108,7 +109,24 @@ const payment: fc.Arbitrary<Made<"payments">> = fc.record({
   }),
 });
 
-const made = fc.oneof(client, wearer, order, line, payment);
+const sum: fc.Arbitrary<Made<"sums">> = fc.record({
+  table: fc.constant("sums" as const),
+  id: sumId,
+  fields: fc.record({
+    orderId: fc.option(orderId, { nil: null }),
+    kind: fc.constantFrom("ruffle", "cuff-band", "of a later version"),
+    name: fc.constantFrom("", "Collar frill"),
+    inputs: fc.constantFrom<Record<string, SumInput>[]>(
+      {},
+      { seam: { typed: "15", mm: 381 }, ratio: { typed: "2½", value: 2.5 }, cloth: { typed: "" } },
+      { shape: { typed: "half", value: "half" } },
+    ),
+    note: fc.constant(""),
+    removedAt,
+  }),
+});
+
+const made = fc.oneof(client, wearer, order, line, payment, sum);
 
 /**
  * Changes of one device, numbered from 1. A row is made by its first change, and edited (all fields or some of

@@ -1,7 +1,13 @@
 import { type RowOf, type TableName } from "@/lib/records/types";
 import { compareText, type Query, rowsOf } from "../query";
 
-export const binTables = ["clients", "wearers", "orders", "sleeves"] as const satisfies readonly TableName[];
+export const binTables = [
+  "clients",
+  "wearers",
+  "orders",
+  "sleeves",
+  "sums",
+] as const satisfies readonly TableName[];
 export type BinTable = (typeof binTables)[number];
 
 export type BinItem = { [T in BinTable]: { table: T; row: RowOf<T> } }[BinTable];
@@ -12,10 +18,10 @@ const LIMIT = 200;
 export const binQuery: Query<Record<string, never>, BinItem[]> = {
   name: "bin",
   need: async (source) => {
-    const [clients, wearers, orders, sleeves] = await Promise.all(
+    const [clients, wearers, orders, sleeves, sums] = await Promise.all(
       binTables.map((table) => source.binned(table, LIMIT)),
     );
-    return { clients, wearers, orders, sleeves };
+    return { clients, wearers, orders, sleeves, sums };
   },
   view: (rows) =>
     binTables

@@ -4,6 +4,7 @@ import { binQuery } from "./bin";
 import { clientCardQuery, clientListQuery } from "./clients";
 import { orderCardQuery, orderListQuery, orderPeopleQuery, receiptQuery } from "./orders";
 import { sleeveListQuery, sleevesQuery } from "./sleeves";
+import { sumListQuery, sumQuery } from "./sums";
 import { todayQuery } from "./today";
 import { setCardQuery, wearerCardQuery } from "./wearers";
 import { workshopQuery } from "./workshop";
@@ -22,6 +23,8 @@ const queries: Query<any, any>[] = [
   orderCardQuery,
   orderPeopleQuery,
   receiptQuery,
+  sumListQuery,
+  sumQuery,
   binQuery,
 ];
 

@@ -7,6 +7,7 @@ import {
   type Order,
   type Receipt,
   type Sleeve,
+  type Sum,
   type Wearer,
 } from "@/lib/records/types";
 import { byKey, findRow, idsIn, liveRowsOf, newestFirst, type Query, type RowSource, rowsOf } from "../query";
@@ -111,6 +112,8 @@ export interface OrderCardView extends OrderListItem {
   clientWearers: Wearer[];
   sets: MeasurementSet[];
   sleeves: Sleeve[];
+  /** Sewing sums put on it, as they were made. */
+  sewingSums: Sum[];
 }
 
 /** One order with everything on it; null where there is no such order. */
@@ -118,9 +121,10 @@ export const orderCardQuery: Query<{ id: string }, OrderCardView | null> = {
   name: "orderCard",
   need: async (source, { id }) => {
     const orders = await source.byIds("orders", [id]);
-    const [parts, receipts, clientWearers] = await Promise.all([
+    const [parts, receipts, sums, clientWearers] = await Promise.all([
       withOrderParts(source, orders),
       source.byParents("receipts", "orderId", [id]),
+      source.byParents("sums", "orderId", [id]),
       source.byParents("wearers", "clientId", idsIn(orders, "clientId")),
     ]);
     const known = new Set(clientWearers.map((row) => row.id));
@@ -132,7 +136,7 @@ export const orderCardQuery: Query<{ id: string }, OrderCardView | null> = {
       source.byIds("sleeves", idsIn(parts.garments ?? [], "sleeveId")),
     ]);
     const drawn = new Map([...sleeves, ...bareSleeves].map((row) => [row.id, row]));
-    return { ...parts, receipts, wearers, measurementSets, sleeves: [...drawn.values()] };
+    return { ...parts, receipts, sums, wearers, measurementSets, sleeves: [...drawn.values()] };
   },
   view: (rows, { id }) => {
     const order = findRow(rows, "orders", id);
@@ -148,6 +152,9 @@ export const orderCardQuery: Query<{ id: string }, OrderCardView | null> = {
         .sort(byKey((wearer) => wearer.id)),
       sets: rowsOf(rows, "measurementSets").sort(newestFirst),
       sleeves: liveRowsOf(rows, "sleeves").sort(newestFirst),
+      sewingSums: liveRowsOf(rows, "sums")
+        .filter((sum) => sum.orderId === id)
+        .sort(byKey((sum) => sum.id)),
     };
   },
 };

@@ -201,7 +201,7 @@ describe("reading a file", () => {
     expect(await say('{"format":"another"}')).toMatch(/not a saved copy/);
     expect(await say("[]")).toMatch(/not a saved copy/);
     const copy = await read(await copyText());
-    expect(await say(await writeCopy({ ...copy, version: 2 }))).toMatch(/newer Notchbook/);
+    expect(await say(await writeCopy({ ...copy, version: 3 }))).toMatch(/newer Notchbook/);
     expect(await say(await writeCopy({ ...copy, schema: 99 }))).toMatch(/newer Notchbook/);
     expect(await unpackCopy(new Uint8Array())).toMatchObject({ ok: false });
   });
