@@ -14,7 +14,7 @@ export function FirstWearers({ form, today }: { form: UseFormReturn<NewClientVal
   const { fields, append, remove } = useFieldArray({ control: form.control, name: "wearers" });
   const wearers = useWatch({ control: form.control, name: "wearers" });
   return (
-    <section aria-labelledby="first-wearers" className="grid gap-3">
+    <section aria-labelledby="first-wearers" className="grid grid-cols-[minmax(0,1fr)] gap-3">
       <h2 id="first-wearers" className="font-figure text-lg font-bold">
         Who is it sewn for?
       </h2>

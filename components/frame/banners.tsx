@@ -1,5 +1,6 @@
 "use client";
 
+import { usePathname } from "next/navigation";
 import { useState } from "react";
 import { OfflineReady } from "@/components/shell/offline-ready";
 import { UpdateBanner } from "@/components/shell/update-banner";
@@ -14,6 +15,7 @@ import { dismissReady, takeUpdate, useServiceWorker } from "./use-service-worker
 export function Banners() {
   const shell = useServiceWorker();
   const book = useBookState();
+  const path = usePathname();
   const [later, setLater] = useState(false);
   const database = book.phase === "open" ? book.database : null;
   return (
@@ -22,7 +24,8 @@ export function Banners() {
       {database?.phase === "ready" && database.rebuilt && <MadeAgain />}
       <UnfinishedReading />
       <UpdateBanner ready={shell.updateWaits && !later} onUse={takeUpdate} onLater={() => setLater(true)} />
-      <OfflineReady ready={shell.justReady} onClose={dismissReady} />
+      {/* The start says so itself, and nothing may push away what is being filled in there. */}
+      <OfflineReady ready={shell.justReady && path !== "/start"} onClose={dismissReady} />
     </>
   );
 }

@@ -18,43 +18,46 @@ export function HistoryTable({
 }) {
   const rows = points.map((point, i) => ({ ...point, before: points[i - 1] })).reverse();
   return (
-    <table className="w-full text-start">
-      <caption className="sr-only">Each time it was taken, the newest first</caption>
-      <thead>
-        <tr className="border-b-2 border-edge text-start">
-          <th scope="col" className="py-2 pe-3 text-start font-semibold">
-            Taken
-          </th>
-          <th scope="col" className="py-2 pe-3 text-end font-semibold">
-            Figure
-          </th>
-          <th scope="col" className="py-2 text-end font-semibold">
-            Change
-          </th>
-        </tr>
-      </thead>
-      <tbody>
-        {rows.map(({ setId, on, by, mm, before }) => (
-          <tr key={setId} className="border-b border-line">
-            <th scope="row" className="pe-3 text-start font-normal">
-              <AppLink href={`/measure/set?id=${setId}`} className="inline-flex min-h-target items-center">
-                {formatDay(on)}
-              </AppLink>
-              {by && <span className="block text-sm text-soft">by {by}</span>}
+    // With very large text the columns are wider than a phone: then they are moved under the thumb, not cut off.
+    <div className="overflow-x-auto">
+      <table className="w-full text-start">
+        <caption className="sr-only">Each time it was taken, the newest first</caption>
+        <thead>
+          <tr className="border-b-2 border-edge text-start">
+            <th scope="col" className="py-2 pe-3 text-start font-semibold">
+              Taken
             </th>
-            <td className="pe-3 text-end text-lg font-bold">
-              <Length mm={mm} unit={unit} fineness={fineness} />
-            </td>
-            <td className="text-end">
-              {before ? (
-                <LengthChange fromMm={before.mm} toMm={mm} unit={unit} fineness={fineness} />
-              ) : (
-                <span className="text-soft">first</span>
-              )}
-            </td>
+            <th scope="col" className="py-2 pe-3 text-end font-semibold">
+              Figure
+            </th>
+            <th scope="col" className="py-2 text-end font-semibold">
+              Change
+            </th>
           </tr>
-        ))}
-      </tbody>
-    </table>
+        </thead>
+        <tbody>
+          {rows.map(({ setId, on, by, mm, before }) => (
+            <tr key={setId} className="border-b border-line">
+              <th scope="row" className="pe-3 text-start font-normal">
+                <AppLink href={`/measure/set?id=${setId}`} className="inline-flex min-h-target items-center">
+                  {formatDay(on)}
+                </AppLink>
+                {by && <span className="block text-sm text-soft">by {by}</span>}
+              </th>
+              <td className="pe-3 text-end text-lg font-bold">
+                <Length mm={mm} unit={unit} fineness={fineness} />
+              </td>
+              <td className="text-end">
+                {before ? (
+                  <LengthChange fromMm={before.mm} toMm={mm} unit={unit} fineness={fineness} />
+                ) : (
+                  <span className="text-soft">first</span>
+                )}
+              </td>
+            </tr>
+          ))}
+        </tbody>
+      </table>
+    </div>
   );
 }

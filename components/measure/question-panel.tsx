@@ -49,7 +49,7 @@ export function QuestionPanel(props: QuestionPanelProps) {
       ref={panel}
       tabIndex={-1}
       aria-label="A question about this figure"
-      className="pad-question grid gap-2 outline-none"
+      className="pad-question outline-none"
     >
       <Notice tone="look" title={questions.length > 1 ? "Look at these once more" : "Look at this once more"}>
         <QuestionWords questions={questions} unit={unit} fineness={fineness} />
@@ -59,7 +59,7 @@ export function QuestionPanel(props: QuestionPanelProps) {
           Take it as {meant.typed}
         </Button>
       )}
-      <div className="grid grid-cols-2 gap-2">
+      <div className="pad-answers">
         <Button className="min-h-key" onClick={onAgain}>
           Take again
         </Button>

@@ -106,7 +106,7 @@ function KnownSet({ view: { set, wearer, client, correctedBy, corrects } }: { vi
       <div className="grid gap-2 sm:grid-cols-2">
         {!correctedBy && wearer && (
           <ButtonLink full href={`/measure?wearer=${wearer.id}&corrects=${set.id}`}>
-            Put right
+            Put a figure right
           </ButtonLink>
         )}
         <ShareButton text={shareText(set, name, unit, fineness)} title={`Figures of ${name}`} />

@@ -49,9 +49,15 @@ export function ReceiptCard({ doc, unit }: { doc: ReceiptDocument; unit: Unit })
           <div className="flex flex-wrap items-center justify-between gap-x-4 gap-y-1">
             <div>
               <p className="font-bold">{said.amount}</p>
-              <p>{[doc.payment.label, doc.payment.methodLabel].filter(Boolean).join(", ")}</p>
+              <p>
+                {doc.payment.label
+                  ? [doc.payment.label, doc.payment.methodLabel.toLowerCase()].filter(Boolean).join(", ")
+                  : doc.payment.methodLabel}
+              </p>
             </div>
-            <p className="figures ms-auto text-figure font-bold wrap-anywhere">{doc.payment.amountText}</p>
+            <p className="figures ms-auto text-[clamp(1.5rem,11vw,2.75rem)] leading-none font-bold wrap-anywhere">
+              {doc.payment.amountText}
+            </p>
           </div>
         </div>
         <dl className="grid">

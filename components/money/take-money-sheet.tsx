@@ -168,7 +168,7 @@ function MoneyForm({ view, kind, currency, workshop, draftKey, handle, found }: 
     form.setValue("amount", moneyFigure(minor, currency), { shouldDirty: true, shouldValidate: true });
 
   return (
-    <form noValidate onSubmit={submit} className="grid grid-cols-[minmax(0,1fr)] gap-4">
+    <form noValidate onSubmit={submit} className="flex flex-col gap-4">
       <BroughtBack draft={draft} />
       <Choice
         label="What it is"
@@ -202,9 +202,11 @@ function MoneyForm({ view, kind, currency, workshop, draftKey, handle, found }: 
         <TextInput {...form.register("note")} autoComplete="off" />
       </Field>
       <KeepTrouble keep={problem} draft={handle.problem} />
-      <Button type="submit" variant="main" full busy={busy || form.formState.isSubmitting}>
-        Keep, and make the receipt
-      </Button>
+      <div className="sheet-action">
+        <Button type="submit" variant="main" full busy={busy || form.formState.isSubmitting}>
+          Keep, and make the receipt
+        </Button>
+      </div>
       <Ask
         open={ask !== null}
         onOpenChange={(open) => !open && setAsk(null)}
@@ -227,6 +229,7 @@ interface QuickAmountsProps {
 
 /** The amounts that are likely, one tap each; the one that stands in the field already is left out. */
 function QuickAmounts({ kind, sums, amount, currency, onFill }: QuickAmountsProps) {
+  const half = suggestedDeposit(sums.totalMinor);
   const held = sums.receivedMinor - sums.givenBackMinor;
   const offered =
     kind === "giving-back"
@@ -236,7 +239,9 @@ function QuickAmounts({ kind, sums, amount, currency, onFill }: QuickAmountsProp
         ]
       : [
           { say: "All", minor: sums.balanceMinor },
-          ...(kind === "deposit" ? [{ say: "Half", minor: suggestedDeposit(sums.totalMinor) }] : []),
+          ...(kind === "deposit"
+            ? [{ say: half * 2 === sums.totalMinor ? "Half" : "About half", minor: half }]
+            : []),
         ];
   const keys = offered.filter(
     ({ minor }, i) =>

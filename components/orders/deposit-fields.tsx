@@ -25,10 +25,11 @@ export function DepositFields({ form, currency }: { form: UseFormReturn<OrderVal
   const [lines, deposit] = useWatch({ control: form.control, name: ["lines", "deposit"] });
   const { totalMinor, whole } = liveTotal(lines, currency);
   const half = whole && totalMinor > 0 ? suggestedDeposit(totalMinor) : 0;
+  const halfSaid = half * 2 === totalMinor ? "Half" : "About half";
   const fill = () =>
     form.setValue("deposit.amount", moneyFigure(half, currency), { shouldDirty: true, shouldValidate: true });
   return (
-    <section aria-labelledby="deposit" className="grid gap-3">
+    <section aria-labelledby="deposit" className="grid grid-cols-[minmax(0,1fr)] gap-3">
       <h2 id="deposit" className="font-figure text-lg font-bold">
         Deposit
       </h2>
@@ -43,7 +44,7 @@ export function DepositFields({ form, currency }: { form: UseFormReturn<OrderVal
         })}
         hint={
           half > 0
-            ? `Half is ${formatMoney(half, currency)}. Half as a deposit is common practice; nothing binds you to it.`
+            ? `${halfSaid} is ${formatMoney(half, currency)}. Half as a deposit is common practice; nothing binds you to it.`
             : undefined
         }
       />
@@ -59,7 +60,9 @@ export function DepositFields({ form, currency }: { form: UseFormReturn<OrderVal
             />
           </Field>
           {half > 0 && deposit.amount !== moneyFigure(half, currency) && (
-            <Button onClick={fill}>Half: {formatMoney(half, currency)}</Button>
+            <Button onClick={fill}>
+              {halfSaid}: {formatMoney(half, currency)}
+            </Button>
           )}
           <Choice label="How" options={methodOptions} {...form.register("deposit.method")} />
           <p className="text-soft">A receipt with its own number is made along with the order.</p>

@@ -5,7 +5,7 @@ import { useState } from "react";
 import { useFieldArray, type UseFormReturn, useWatch } from "react-hook-form";
 import { Button, ButtonLink } from "@/components/ui/button";
 import { garmentKinds } from "@/lib/orders/garment-kinds";
-import { sameForNext } from "@/lib/orders/garment-choices";
+import { sameForNext, withWearer } from "@/lib/orders/garment-choices";
 import { emptyGarment, freshName, type GarmentValues, type OrderValues } from "@/lib/orders/order-form";
 import { type IsoDate } from "@/lib/people/iso-date";
 import { type OrderPeopleView } from "@/lib/store/queries/orders";
@@ -30,10 +30,16 @@ export function GarmentsFields({ form, people, today, otherNames }: GarmentsFiel
   const last = garments.at(-1);
   const again =
     last && last.kind.trim() !== "" && sameForNext(last, garments, people, freshName("garment", garments));
+  const [only, second] = people.wearers;
+  /** Where there is one wearer alone, it is for that one. */
+  const another = () => {
+    const empty = emptyGarment(freshName("garment", garments));
+    return only && !second ? withWearer(empty, only.wearer.id, people) : empty;
+  };
   const nameOfNext = again && people.wearers.find(({ wearer }) => wearer.id === again.wearerId)?.wearer.name;
 
   return (
-    <section aria-labelledby="garments" className="grid gap-3">
+    <section aria-labelledby="garments" className="grid grid-cols-[minmax(0,1fr)] gap-3">
       <h2 id="garments" className="font-figure text-lg font-bold">
         What is sewn
       </h2>
@@ -73,16 +79,20 @@ export function GarmentsFields({ form, people, today, otherNames }: GarmentsFiel
           setLeft(null);
         }}
       />
-      <div className="grid gap-2">
+      <div className="grid grid-cols-[minmax(0,1fr)] gap-2">
         {again && (
-          <Button icon={<Plus className="size-5" />} onClick={() => append(again, { shouldFocus: false })}>
+          <Button
+            className="wrap-anywhere"
+            icon={<Plus className="size-5" />}
+            onClick={() => append(again, { shouldFocus: false })}
+          >
             The same for {nameOfNext}
           </Button>
         )}
         <Button
           icon={<Plus className="size-5" />}
           onClick={() =>
-            append(emptyGarment(freshName("garment", garments)), {
+            append(another(), {
               focusName: `garments.${fields.length}.kind`,
             })
           }

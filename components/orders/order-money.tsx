@@ -103,7 +103,11 @@ export function Payments({ view: { order, payments, receipts } }: { view: OrderC
                     {formatDay(paidOn, { style: "short" })}, {methodWords(method).toLowerCase()}
                   </span>
                   {note && <span className="block wrap-anywhere">{note}</span>}
-                  {receipt && <span className="block">Receipt {receipt.number}</span>}
+                  {receipt && (
+                    <span className="block">
+                      Receipt <span className="whitespace-nowrap">{receipt.number}</span>
+                    </span>
+                  )}
                 </>
               ),
               figure: <Money minor={signed} currency={order.currency} />,

@@ -5,6 +5,7 @@ import { useState } from "react";
 import { useFieldArray, type UseFormReturn, useWatch } from "react-hook-form";
 import { Button } from "@/components/ui/button";
 import { Card } from "@/components/ui/card";
+import { cx } from "@/components/ui/cx";
 import { Field, TextInput } from "@/components/ui/field";
 import { Money } from "@/components/ui/money";
 import { type Currency } from "@/lib/money/currencies";
@@ -39,7 +40,7 @@ export function PricesFields({ form, currency, nameOf }: PricesFieldsProps) {
     );
 
   return (
-    <section aria-labelledby="prices" className="grid gap-3">
+    <section aria-labelledby="prices" className="grid grid-cols-[minmax(0,1fr)] gap-3">
       <h2 id="prices" className="font-figure text-lg font-bold">
         Price
       </h2>
@@ -69,9 +70,14 @@ export function PricesFields({ form, currency, nameOf }: PricesFieldsProps) {
           setLeft(null);
         }}
       />
-      <div className="grid gap-2">
+      <div className="grid grid-cols-[minmax(0,1fr)] gap-2">
         {unpriced.map((garment) => (
-          <Button key={garment.rowId} icon={<Plus className="size-5" />} onClick={() => addFor(garment)}>
+          <Button
+            key={garment.rowId}
+            className="wrap-anywhere"
+            icon={<Plus className="size-5" />}
+            onClick={() => addFor(garment)}
+          >
             Price of {lineText(garment, nameOf(garment.wearerId))}
           </Button>
         ))}
@@ -110,10 +116,18 @@ function PriceLine({
         <TextInput {...form.register(`lines.${at}.text`)} autoComplete="off" />
       </Field>
       <div className="flex flex-wrap items-start gap-3">
-        <Field className="min-w-0 flex-1 basis-24" label="How many" error={errors?.quantity?.message}>
+        <Field
+          className={cx("min-w-0 flex-1", errors?.quantity ? "basis-full" : "basis-24")}
+          label="How many"
+          error={errors?.quantity?.message}
+        >
           <TextInput figure inputMode="numeric" {...form.register(`lines.${at}.quantity`)} />
         </Field>
-        <Field className="min-w-0 flex-[2] basis-40" label="Price of one" error={errors?.price?.message}>
+        <Field
+          className={cx("min-w-0 flex-[2]", errors?.price ? "basis-full" : "basis-40")}
+          label="Price of one"
+          error={errors?.price?.message}
+        >
           <TextInput
             figure
             inputMode={currency.digits === 0 ? "numeric" : "decimal"}

@@ -103,7 +103,7 @@ export function StartForm({
             </Select>
           </Field>
           <p className="text-sm text-soft">
-            Phone numbers are read as in {countryName(country)}. All of this can be changed later under
+            Country, for phone numbers: {countryName(country)}. All of this can be changed later under
             Workshop.
           </p>
         </form>

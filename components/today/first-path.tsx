@@ -29,7 +29,7 @@ export function FirstPath({ steps }: { steps: readonly FirstStep[] }) {
                 <Notch label="" />
               ) : null}
             </span>
-            <span className="min-w-0 flex-1 basis-40">
+            <span className="min-w-0 flex-1 basis-28">
               <span className={cx("block", state === "later" ? "text-soft" : "font-semibold")}>
                 <span className="sr-only">{signs[state]}: </span>
                 {say}
@@ -37,8 +37,8 @@ export function FirstPath({ steps }: { steps: readonly FirstStep[] }) {
               {state === "next" && <span className="block text-soft">{why}</span>}
             </span>
             {state === "later" && (
-              <ButtonLink variant="quiet" href={href} aria-label={`${say} at once`}>
-                At once
+              <ButtonLink variant="quiet" className="-me-3 px-3!" href={href} aria-label={`${say} now`}>
+                Now
               </ButtonLink>
             )}
           </li>

@@ -105,7 +105,7 @@ function Days({
             Nothing is late, and nothing is due in the next 7 days.
           </p>
         )}
-        <LaterLink count={laterCount} />
+        <LaterLink count={laterCount} more={late.length + due.length > 0} />
       </div>
       {hasSide && (
         <div className={column}>
@@ -125,12 +125,14 @@ function Days({
   );
 }
 
-function LaterLink({ count }: { count: number }) {
+function LaterLink({ count, more }: { count: number; more: boolean }) {
   if (count === 0) return null;
+  const further = more ? " more" : "";
   return (
     <p>
       <AppLink href="/orders" className="inline-flex min-h-target items-center font-semibold">
-        {count === 1 ? "1 more order is open" : `${count} more orders are open`}, for later or with no day
+        {count === 1 ? `1${further} order is open` : `${count}${further} orders are open`}, for later or with
+        no day
       </AppLink>
     </p>
   );

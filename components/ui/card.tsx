@@ -82,7 +82,7 @@ function RowBody({ title, sub, figure, sign }: RowSaid) {
           <span className="block font-semibold wrap-anywhere">{title}</span>
           {sub && <span className="block text-sm text-soft">{sub}</span>}
         </span>
-        {figure !== undefined && <span className="figures text-lg font-semibold">{figure}</span>}
+        {figure !== undefined && <span className="figures ms-auto text-lg font-semibold">{figure}</span>}
       </span>
     </>
   );

@@ -23,7 +23,7 @@ export function Length({ mm, unit, fineness = 8, size = "text", className }: Len
   const { negative, whole, numerator, denominator } = formatLength(mm, unit, fineness);
   return (
     <span className={cx("figures whitespace-nowrap", sizes[size], className)}>
-      <span aria-hidden="true" className="inline-flex items-baseline">
+      <span aria-hidden="true" className="length-row">
         {negative && <span>−</span>}
         {(whole > 0 || numerator === 0 || unit === "cm") && <span>{whole}</span>}
         {numerator > 0 &&

@@ -30,13 +30,13 @@ export function Screen({ title, sub, back, action, tools, wide, children }: Scre
             className="-ms-2 inline-flex min-h-target items-center gap-1 pe-3 font-semibold text-chalk no-underline hover:underline"
           >
             <ChevronLeft aria-hidden="true" className="size-6 shrink-0" />
-            {back.label}
+            <span className="min-w-0 wrap-anywhere">{back.label}</span>
           </AppLink>
         )}
         <div className="flex flex-wrap items-end justify-between gap-x-4 gap-y-2">
           <div className="min-w-0 flex-1 basis-48">
             <h1 className="font-figure text-xl font-bold text-balance wrap-anywhere lg:text-2xl">{title}</h1>
-            {sub && <p className="text-soft">{sub}</p>}
+            {sub && <p className="text-soft wrap-anywhere">{sub}</p>}
           </div>
           {tools && <div className="flex flex-wrap gap-2">{tools}</div>}
         </div>

@@ -25,10 +25,16 @@ export function WearerInputs({ register, errors, known, today, short }: WearerIn
         label="Age"
         options={[
           { value: "born", label: "Birth month" },
-          { value: "told", label: "Age" },
-          { value: "grown", label: "Grown up", sub: "not asked" },
+          { value: "told", label: "In years" },
+          { value: "grown", label: "Grown up" },
         ]}
-        hint={known === "born" ? "A child's figures grow old: the age says how fast." : undefined}
+        hint={
+          known === "grown"
+            ? "The age is not asked."
+            : known === "born"
+              ? "A child's figures grow old: the age says how fast."
+              : undefined
+        }
       />
       {known === "born" && (
         <div className="grid grid-cols-[repeat(auto-fit,minmax(min(100%,9rem),1fr))] items-start gap-3">

@@ -4,6 +4,7 @@ import { type UsualBounds, usualBounds } from "@/lib/figures/usual-bounds";
 import { formatPlain } from "@/lib/lengths/format-length";
 import { type Phrase } from "@/lib/lengths/phrase";
 import { mmPerInch } from "@/lib/lengths/units";
+import { formatDay } from "@/lib/people/format-day";
 import { type IsoDate, daysBetween } from "@/lib/people/iso-date";
 import { type Unit } from "@/lib/records/types";
 
@@ -173,7 +174,7 @@ function changeQuestions(
   const change = mm - previous.mm;
   const ask = (text: string): Question[] => {
     const say: Phrase = [
-      `Last time, ${previous.takenOn}, the ${named(figure)} was `,
+      `Last time, ${formatDay(previous.takenOn)}, the ${named(figure)} was `,
       { mm: previous.mm },
       "; now it is ",
       { mm },

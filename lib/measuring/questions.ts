@@ -2,7 +2,6 @@ import { askAbout, type Question } from "@/lib/figures/ask-about";
 import { type MeasureKey } from "@/lib/figures/body-measures";
 import { parseLength } from "@/lib/lengths/parse-length";
 import { type Known, type TakenHere, type Taking } from "@/lib/measuring/taking";
-import { formatDay } from "@/lib/people/format-day";
 import { entryOf } from "@/lib/measuring/entry";
 
 /** A question with a sign that stays the same while its figures do. */
@@ -19,10 +18,6 @@ function signOf({ kind, say }: Question, key: MeasureKey): string {
   if (kind === "order" || kind === "halves") return [kind, ...lengths].join(":");
   return [kind, key, ...(lengths.length > 0 ? lengths : say)].join(":");
 }
-
-/** Days in words: the questions name last time's as an ISO date. */
-const withDays = <T>(part: T): T | string =>
-  typeof part === "string" ? part.replace(/\d{4}-\d\d-\d\d/gu, (day) => formatDay(day)) : part;
 
 /** What there is to ask about one figure, among the others of its set. */
 export function questionsAbout(figures: Figures, key: MeasureKey, known: Known): SignedQuestion[] {
@@ -42,12 +37,7 @@ export function questionsAbout(figures: Figures, key: MeasureKey, known: Known):
     askAbout(key, previous.mm, { ageYears, others: {}, today: on }).some(({ kind }) => kind === "bounds");
   return askAbout(key, figure.mm, { ...context, unit: figure.unit })
     .filter(({ kind }) => kind !== "bounds" || !usualForHer)
-    .map((question) => ({
-      ...question,
-      say: question.say.map(withDays),
-      key,
-      sign: signOf(question, key),
-    }));
+    .map((question) => ({ ...question, key, sign: signOf(question, key) }));
 }
 
 /** Questions about the figure at hand that have no answer yet. */

@@ -26,13 +26,15 @@ export function readOrdersPlace(json: string | null): OrdersPlace {
   }
 }
 
-const kinds: Record<OrderListShow, string> = {
-  open: " not handed over, the soonest due first",
-  owing: " with money to come or to give back, the oldest first",
-  all: ", the newest first",
+const kinds: Record<OrderListShow, { what: string; by: string }> = {
+  open: { what: " not handed over", by: ", the soonest due first" },
+  owing: { what: " with money to come or to give back", by: ", the oldest first" },
+  all: { what: "", by: ", the newest first" },
 };
 
 /** How many stand on the list, for the eye and for a screen reader. */
 export function ordersCountWords(show: OrderListShow, shown: number, more: boolean): string {
-  return `${more ? "The first " : ""}${shown} ${shown === 1 ? "order" : "orders"}${kinds[show]}`;
+  const { what, by } = kinds[show];
+  if (shown === 1) return `1 order${what}`;
+  return `${more ? "The first " : ""}${shown} orders${what}${by}`;
 }

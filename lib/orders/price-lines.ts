@@ -53,6 +53,11 @@ export function readLine(values: LineValues, currency: Currency): LineReading {
   const price = parseMoney(values.price, currency);
   if (values.price.trim() === "")
     problems.push({ field: "price", say: "Type the price of one, or 0 where it is free." });
+  else if (/^\s*[-−–—]/u.test(values.price))
+    problems.push({
+      field: "price",
+      say: "A price is never below 0. To take something off, type a lower price for what it is taken off.",
+    });
   else if (!price.ok) problems.push({ field: "price", say: price.say });
   else if (price.minor * (quantity ?? 1) > AMOUNT_AT_MOST)
     problems.push({ field: "price", say: "That is too large. Look at the number, and type a smaller one." });

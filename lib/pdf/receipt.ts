@@ -127,11 +127,15 @@ function parties({ doc, set, width, base, isRoll, plain, label }: Desk): Group {
   return { gap: base * 1.6, parts: row([from(room), whatFor(width - room, room)]) };
 }
 
+/** "Deposit, cash". */
+const howPaid = ({ label, methodLabel }: Desk["doc"]["payment"]): string =>
+  label ? present([label, methodLabel.toLowerCase()]).join(", ") : methodLabel;
+
 function amountCard({ doc, set, width, base, isRoll, plain, strong }: Desk): Group {
-  const { amountText, label, methodLabel } = doc.payment;
+  const { amountText } = doc.payment;
   const padding = base * (isRoll ? 0.8 : 1.1);
   const room = width - 2 * padding;
-  const how = present([label, methodLabel]).join(", ");
+  const how = howPaid(doc.payment);
   const sizes = [3, 2.6, 2.2, 1.8, 1.5, 1.25].map((times) => times * base);
   const build = (): Block => {
     const said = (x: number, width: number) => [
@@ -258,8 +262,7 @@ function sums({ doc, set, width, base, plain, strong, label, isRoll }: Desk): Gr
       ? { parts }
       : { gap: base * 1.1, parts: [...set.lines("Paid before", label, { x: 0, width }), ...parts] };
   });
-  const how = present([payment.label, payment.methodLabel]).join(", ");
-  const now = present([words[doc.title].now, how]).join(": ");
+  const now = present([words[doc.title].now, howPaid(payment)]).join(": ");
   const balanceSizes = (isRoll ? [1.35, 1.15, 1] : [1.6, 1.3, 1]).map((times) => times * base);
   const size = fittingSize(set, `${doc.balanceLabel} ${doc.balanceText}`, true, balanceSizes, width - base);
   const balance = { size, bold: true };

@@ -23,7 +23,8 @@ function waiting(head: Head, now: Date): string {
   const n = changesSinceCopy(head);
   if (!head.lastCopy) return `${changes(n)}, no copy yet`;
   const when = sinceWords(new Date(head.lastCopy.at), now);
-  return n === 0 ? `all in the copy of ${when}` : `${changes(n)} since the last copy, ${when}`;
+  // Short, so that it stands on one line of a phone.
+  return n === 0 ? `all in the copy of ${when}` : `copy of ${when}, ${n} since`;
 }
 
 /** The same as a sentence of its own. */

@@ -10,7 +10,7 @@ import { ageOn } from "@/lib/people/age";
 import { readPhone } from "@/lib/people/phone";
 import { rowSchemas } from "@/lib/records/schemas";
 import { tableNames } from "@/lib/records/types";
-import { makeFromRecord } from "@/lib/sleeves/make-from-record";
+import { styleFromRecord } from "@/lib/sleeves/make-style-from-record";
 import { rowsOf } from "@/lib/store/query";
 import { todayQuery } from "@/lib/store/queries/today";
 import { idOf, WORKSHOP } from "@/tests/support/changes";
@@ -93,7 +93,7 @@ describe.each(days)("the invented workshop on %s", (today) => {
 
   it("has sleeves that can be drawn, with nothing wrong about them", () => {
     for (const sleeve of all("sleeves")) {
-      const made = makeFromRecord(sleeve.ask);
+      const made = styleFromRecord(sleeve);
       expect(made?.ok, sleeve.name).toBe(true);
       if (made?.ok)
         expect(

@@ -117,7 +117,7 @@ describe("askAbout: change since last time (common practice, no source)", () => 
   const previous = { mm: 400, takenOn: "2025-12-14" };
   it("a child's length does not shrink", () => {
     expect(ask("armLength", 380, { ageYears: 8, previous })[0]!.text).toBe(
-      "Last time, 2025-12-14, the arm length was 40 cm; now it is 38 cm. A child's arm and back do not get shorter: measure it once more.",
+      "Last time, 14 Dec 2025, the arm length was 40 cm; now it is 38 cm. A child's arm and back do not get shorter: measure it once more.",
     );
     expect(ask("armLength", 392, { ageYears: 8, previous })).toEqual([]);
     expect(ask("armLength", 415, { ageYears: 8, previous })).toEqual([]);

@@ -69,7 +69,7 @@ describe("the order form", () => {
     ["Dress", "", "45", "lines.0.quantity", /whole number from 1/],
     ["Dress", "1", "", "lines.0.price", /or 0 where it is free/],
     ["Dress", "1", "45.5555", "lines.0.price", /2 figures after the point/],
-    ["Dress", "1", "-45", "lines.0.price", /without the minus/],
+    ["Dress", "1", "-45", "lines.0.price", /type a lower price/],
     ["Dress", "9999", "10001001", "lines.0.price", /type a smaller one/],
   ])("“%s” × “%s” at “%s” says at %s what to type", (text, quantity, price, at, say) => {
     const problems = problemsOf(filled({ lines: [line(text, quantity, price)] }));

@@ -91,7 +91,8 @@ describe("what an order is called", () => {
   });
 
   it("counts what stands on the list", () => {
-    expect(ordersCountWords("open", 1, false)).toBe("1 order not handed over, the soonest due first");
+    expect(ordersCountWords("open", 1, false)).toBe("1 order not handed over");
+    expect(ordersCountWords("open", 2, false)).toBe("2 orders not handed over, the soonest due first");
     expect(ordersCountWords("all", 30, true)).toBe("The first 30 orders, the newest first");
   });
 

@@ -3,7 +3,7 @@ import { type ReceiptPaper, receiptPapers } from "@/lib/pdf/papers";
 import { type ReceiptDocument } from "@/lib/pdf/receipt-document";
 import { receiptPdf } from "@/lib/pdf/receipt";
 import { boxPainter, printTools } from "./print-tools";
-import { type ReadPdf, readPdf, wordsOf } from "./read-pdf";
+import { type ReadPdf, readPdf, wordsOf } from "@/tests/support/read-pdf";
 import * as samples from "./receipt-samples";
 
 // A4 and the unit: ISO 216 and 1 in = 25.4 mm (seen, sources.md); A5 is half an A4 to the millimetre. Rolls as
@@ -65,7 +65,7 @@ const everyText = (doc: ReceiptDocument): string[] => [
   ...doc.lines.flatMap(({ text, quantity, unitText, amountText }) => [text, quantity, unitText, amountText]),
   doc.totalText,
   doc.payment.label,
-  doc.payment.methodLabel,
+  doc.payment.label ? doc.payment.methodLabel.toLowerCase() : doc.payment.methodLabel,
   doc.payment.amountText,
   ...doc.earlier.flatMap(({ number, label, amountText }) => [number, label, amountText]),
   doc.receivedText,

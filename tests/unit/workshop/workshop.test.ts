@@ -105,7 +105,7 @@ describe("the line of what is kept", () => {
 
   it("L4 says how many changes no copy has, and since when", () => {
     expect(said(ready, 102, { number: 60, at: tuesday })).toBe(
-      "Kept on this phone · 41 changes since the last copy, Tuesday",
+      "Kept on this phone · copy of Tuesday, 41 since",
     );
     expect(said(ready, 2)).toBe("Kept on this phone · 1 change, no copy yet");
     expect(said(ready, 61, { number: 60, at: tuesday })).toBe(
