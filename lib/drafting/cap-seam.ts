@@ -6,6 +6,7 @@
  * cut leaves the underarm level, steepens through the hollow, turns over once, and flattens to the level at the
  * crown; hence slopes that rise to one peak and then fall. Everything here keeps to that shape.
  */
+import { hobby } from "@/lib/drafting/fair";
 import { distance } from "@/lib/drafting/measure";
 import { type CubicBezier, type Point } from "@/lib/drafting/types";
 
@@ -206,12 +207,4 @@ function segment(
     { x: b.x - second * Math.cos(to), y: b.y - second * Math.sin(to) },
     b,
   ];
-}
-
-/** Hobby's velocity function, tension 1, as a share of the chord. */
-function hobby(theta: number, phi: number): number {
-  const [st, ct, sp, cp] = [Math.sin(theta), Math.cos(theta), Math.sin(phi), Math.cos(phi)];
-  const shape = Math.SQRT2 * (st - sp / 16) * (sp - st / 16) * (ct - cp);
-  const spread = 1 + ((Math.sqrt(5) - 1) / 2) * ct + ((3 - Math.sqrt(5)) / 2) * cp;
-  return (2 + shape) / (3 * spread);
 }

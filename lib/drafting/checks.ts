@@ -278,7 +278,10 @@ function elbow({ ask: { elbowGirth }, figures }: Subject): Check | undefined {
 }
 
 /** Long enough to pass the elbow; with no elbow taken, longer than it is wide. */
-function passesElbow({ ask: { elbowDepth }, figures: { length, biceps } }: Subject): boolean {
+export function passesElbow({
+  ask: { elbowDepth },
+  figures: { length, biceps },
+}: Pick<Subject, "ask" | "figures">): boolean {
   return length > (elbowDepth ?? 1.2 * biceps);
 }
 

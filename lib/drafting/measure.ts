@@ -6,11 +6,6 @@ function bezier([a, b, c, d]: CubicBezier): Bezier {
   return new Bezier(a.x, a.y, b.x, b.y, c.x, c.y, d.x, d.y);
 }
 
-function cubic(curve: Bezier): CubicBezier {
-  const [a, b, c, d] = curve.points.map(({ x, y }): Point => ({ x, y }));
-  return [a!, b!, c!, d!];
-}
-
 export function lerp(a: Point, b: Point, t: number): Point {
   return { x: a.x + (b.x - a.x) * t, y: a.y + (b.y - a.y) * t };
 }
@@ -28,9 +23,46 @@ export function reversed(curves: readonly CubicBezier[]): CubicBezier[] {
   return curves.map(([a, b, c, d]): CubicBezier => [d, c, b, a]).reverse();
 }
 
-/** Arc length of one curve, mm, by 24-point Gauss-Legendre quadrature. */
+/** Abscissae and weights of the quadrature, from bezier-js. Its curve objects are too slow to make for every length. */
+const { Tvalues, Cvalues } = Bezier.getUtils();
+
+/** dB/dt. */
+function velocity([a, b, c, d]: CubicBezier, t: number): Point {
+  const s = 1 - t;
+  const [p, q, r] = [3 * s * s, 6 * s * t, 3 * t * t];
+  return {
+    x: p * (b.x - a.x) + q * (c.x - b.x) + r * (d.x - c.x),
+    y: p * (b.y - a.y) + q * (c.y - b.y) + r * (d.y - c.y),
+  };
+}
+
+export function pointOn([a, b, c, d]: CubicBezier, t: number): Point {
+  const s = 1 - t;
+  const [p, q, r, u] = [s * s * s, 3 * s * s * t, 3 * s * t * t, t * t * t];
+  return { x: p * a.x + q * b.x + r * c.x + u * d.x, y: p * a.y + q * b.y + r * c.y + u * d.y };
+}
+
+/** Arc length of a curve up to the parameter `t`, mm, by 24-point Gauss-Legendre quadrature. */
+export function lengthUpTo(curve: CubicBezier, t: number): number {
+  let sum = 0;
+  for (const [i, at] of Tvalues.entries()) {
+    const { x, y } = velocity(curve, (t / 2) * (at + 1));
+    sum += Cvalues[i]! * Math.hypot(x, y);
+  }
+  return (t / 2) * sum;
+}
+
+/** Curves are never changed, so each is measured once. */
+const measured = new WeakMap<CubicBezier, number>();
+
+/** Arc length of one curve, mm. */
 export function curveLength(curve: CubicBezier): number {
-  return bezier(curve).length();
+  let length = measured.get(curve);
+  if (length === undefined) {
+    length = lengthUpTo(curve, 1);
+    measured.set(curve, length);
+  }
+  return length;
 }
 
 /** Arc length of a chain, mm. */
@@ -55,8 +87,7 @@ export interface Place {
 export function placeAt(curves: readonly CubicBezier[], at: number): Place {
   let left = Math.max(0, at);
   for (const [index, curve] of curves.entries()) {
-    const whole = bezier(curve);
-    const length = whole.length();
+    const length = curveLength(curve);
     if (left > length && index < curves.length - 1) {
       left -= length;
       continue;
@@ -67,12 +98,12 @@ export function placeAt(curves: readonly CubicBezier[], at: number): Place {
     let high = 1;
     let t = left / length;
     for (let step = 0; step < 60; step++) {
-      const miss = whole.split(0, t).length() - left;
+      const miss = lengthUpTo(curve, t) - left;
       if (Math.abs(miss) < 1e-9) break;
       if (miss > 0) high = t;
       else low = t;
-      const d = whole.derivative(t);
-      const newton = t - miss / Math.hypot(d.x, d.y);
+      const { x, y } = velocity(curve, t);
+      const newton = t - miss / Math.hypot(x, y);
       t = newton > low && newton < high ? newton : (low + high) / 2;
     }
     return { index, t };
@@ -83,11 +114,9 @@ export function placeAt(curves: readonly CubicBezier[], at: number): Place {
 /** The point at a place, and the unit direction the chain runs in there. */
 export function pointAt(curves: readonly CubicBezier[], at: number): { point: Point; direction: Point } {
   const { index, t } = placeAt(curves, at);
-  const whole = bezier(curves[index]!);
-  const { x, y } = whole.get(t);
-  const d = whole.derivative(t);
-  const size = Math.hypot(d.x, d.y);
-  return { point: { x, y }, direction: { x: d.x / size, y: d.y / size } };
+  const { x, y } = velocity(curves[index]!, t);
+  const size = Math.hypot(x, y);
+  return { point: pointOn(curves[index]!, t), direction: { x: x / size, y: y / size } };
 }
 
 /** A chain cut in two, `at` mm along. Nothing moves: the two halves run over the same line. */
@@ -97,10 +126,21 @@ export function splitAt(curves: readonly CubicBezier[], at: number): [CubicBezie
   const after = curves.slice(index + 1);
   if (t <= 0) return [before, curves.slice(index)];
   if (t >= 1) return [curves.slice(0, index + 1), after];
-  const { left, right } = bezier(curves[index]!).split(t);
+  const [left, right] = splitCurve(curves[index]!, t);
   return [
-    [...before, cubic(left)],
-    [cubic(right), ...after],
+    [...before, left],
+    [right, ...after],
+  ];
+}
+
+/** De Casteljau's cut of one curve at its parameter `t`. */
+export function splitCurve([a, b, c, d]: CubicBezier, t: number): [CubicBezier, CubicBezier] {
+  const [ab, bc, cd] = [lerp(a, b, t), lerp(b, c, t), lerp(c, d, t)];
+  const [abc, bcd] = [lerp(ab, bc, t), lerp(bc, cd, t)];
+  const middle = lerp(abc, bcd, t);
+  return [
+    [a, ab, abc, middle],
+    [middle, bcd, cd, d],
   ];
 }
 

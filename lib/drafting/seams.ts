@@ -10,8 +10,12 @@ export interface SeamSide {
   readonly measured: Edge | number;
 }
 
-/** How the two sides meet. `by` is how much longer the first is, where that was asked for. */
-export type Joining = { readonly how: "equal" } | { readonly how: "eased"; readonly by?: number };
+/** How the two sides meet. `by` is how much longer the first is, where that was asked for; of pleats, what they take up. */
+export type Joining =
+  | { readonly how: "equal" }
+  | { readonly how: "eased"; readonly by?: number }
+  | { readonly how: "gathered" }
+  | { readonly how: "pleated"; readonly by: number };
 
 export interface Seam {
   readonly id: string;
@@ -21,6 +25,7 @@ export interface Seam {
 
 export interface WalkedSeam {
   readonly id: string;
+  readonly how: Joining["how"];
   /** mm, in the order of the seam's sides. */
   readonly lengths: readonly [number, number];
   /** First less second. */
@@ -42,17 +47,16 @@ export function walk({ id, sides, joining }: Seam): WalkedSeam {
   const [first, second] = [sides[0].words, sides[1].words];
   const start = `${first[0]!.toUpperCase()}${first.slice(1)}`;
   const even = Math.abs(difference) <= LINE_WIDTH;
-  const read = even
-    ? say`${start} and ${second} both measure ${a!}.`
-    : say`${start} measures ${a!} and ${second} ${b!}: ${Math.abs(difference)} ${difference > 0 ? "longer" : "shorter"}.`;
-  const agrees =
-    joining.how === "equal"
-      ? even
-      : joining.by === undefined
-        ? difference >= -LINE_WIDTH
-        : Math.abs(difference - joining.by) <= LINE_WIDTH;
+  const read =
+    joining.how === "gathered" && difference > LINE_WIDTH
+      ? say`${start} measures ${a!} and is gathered into the ${b!} of ${second}: ${ratioWords(a! / b!)}.`
+      : even
+        ? say`${start} and ${second} both measure ${a!}.`
+        : say`${start} measures ${a!} and ${second} ${b!}: ${Math.abs(difference)} ${difference > 0 ? "longer" : "shorter"}.`;
+  const agrees = meets(joining, difference);
   return {
     id,
+    how: joining.how,
     lengths,
     difference,
     agrees,
@@ -61,14 +65,26 @@ export function walk({ id, sides, joining }: Seam): WalkedSeam {
   };
 }
 
+function meets(joining: Joining, difference: number): boolean {
+  if (joining.how === "equal") return Math.abs(difference) <= LINE_WIDTH;
+  if (joining.how === "gathered" || joining.by === undefined) return difference >= -LINE_WIDTH;
+  return Math.abs(difference - joining.by) <= LINE_WIDTH;
+}
+
+/** "2.5 : 1". */
+export function ratioWords(ratio: number): string {
+  return `${Math.round(ratio * 10) / 10} : 1`;
+}
+
 function nothing(joining: Joining, difference: number): Phrase {
-  return joining.how === "eased" && difference > LINE_WIDTH
-    ? say`Ease in the ${difference}.`
-    : say`Nothing to change.`;
+  if (difference <= LINE_WIDTH) return say`Nothing to change.`;
+  if (joining.how === "eased") return say`Ease in the ${difference}.`;
+  if (joining.how === "pleated") return say`The pleats take up the ${difference}.`;
+  return say`Nothing to change.`;
 }
 
 function change(joining: Joining, difference: number, first: string): Phrase {
-  const wanted = joining.how === "eased" ? (joining.by ?? 0) : 0;
+  const wanted = joining.how === "eased" || joining.how === "pleated" ? (joining.by ?? 0) : 0;
   const off = difference - wanted;
   return say`${off > 0 ? "Shorten" : "Lengthen"} ${first} by ${Math.abs(off)}.`;
 }

@@ -17,15 +17,18 @@ export type EdgeName = "capFront" | "capBack" | "underarmFront" | "underarmBack"
 
 /** One side of a piece: a chain of curves, each starting where the one before ends. */
 export interface Edge {
-  readonly name: EdgeName;
+  /** Unique in its piece; those of the basic sleeve are `EdgeName`. */
+  readonly name: string;
   readonly curves: readonly CubicBezier[];
 }
 
 /** `at` is the arc length from the start of the edge; one notch marks the front, two the back. */
 export interface Notch {
-  readonly edge: EdgeName;
+  readonly edge: string;
   readonly at: number;
   readonly count: 1 | 2;
+  /** Meets the notch of the same id on the partner's edge. */
+  readonly id?: string;
 }
 
 /** A closed outline: the edges in order, clockwise as seen on the paper, each starting where the last ends. */

@@ -1,5 +1,5 @@
 /** The drafting engine alone, in Node: what one redraft costs. */
-import { makeSleeve } from "@/lib/drafting";
+import { makeSleeve, makeStyle, recipes, type SleeveAsk } from "@/lib/drafting";
 import { type Measured, spread } from "./report";
 
 const inches = (n: number): number => n * 25.4;
@@ -33,4 +33,32 @@ export function measureEngine(): Measured[] {
     { what: "one redraft, cap depth given (engine, Node)", value: spread(given) },
     { what: "one redraft, cap depth found from the armhole (engine, Node)", value: spread(found) },
   ];
+}
+
+/** Figures that every style can be made from: a grown arm, and a short sleeve for those that want one. */
+const grown: SleeveAsk = {
+  length: inches(23),
+  biceps: inches(14),
+  hem: inches(9.5),
+  capDepth: inches(5.5),
+  armhole: { front: inches(8.5), back: inches(8.75) },
+  upperArm: inches(11.5),
+  wrist: inches(6.5),
+  hand: inches(7.5),
+};
+
+/** Each style redrawn while a figure of its block changes, as under a finger; and marked out, rounded to eighths. */
+export function measureStyles(): Measured[] {
+  return recipes.map(({ id, name }) => {
+    const ask = (i: number) => ({
+      style: id,
+      block: { ...grown, biceps: grown.biceps + (i % 16) },
+      values: {},
+    });
+    if (!makeStyle(ask(0)).ok) throw new Error(`The bench's figures do not make a ${name}`);
+    return {
+      what: `one redraft of a style: ${name} (engine, Node)`,
+      value: spread(time(400, (i) => makeStyle(ask(i)))),
+    };
+  });
 }
