@@ -12,6 +12,7 @@ import {
   type ReceiptFields,
   type ReceiptSnapshot,
   type SleeveFields,
+  type SumFields,
   type TakenFigure,
   type WorkshopFields,
 } from "@/lib/records/types";
@@ -40,6 +41,15 @@ const workshop: WorkshopFields = {
   demo: true,
 };
 
+/** On no order yet. */
+const ruffleSum: SumFields = {
+  orderId: null,
+  kind: "ruffle",
+  name: "Ruffle for a hem, tried out",
+  inputs: { seam: { typed: "15", mm: 381 }, ratio: { typed: "2 1/2", value: 2.5 } },
+  note: "",
+};
+
 /** A wearer as far as an order needs one. */
 interface Placed {
   wearerId: string;
@@ -62,7 +72,8 @@ export function demoWrites(ask: DemoAsk): Write[] {
     const { client, clientId, wearers } = placed.get(order.client)!;
     writes.push(...orderWrites(order, client, clientId, wearers, ask));
   }
-  writes.push(make("sleeves", bareSleeve(), newIdOf(ask)));
+  writes.push(make("sleeves", bareSleeve(), newIdOf(ask)), make("sleeves", statementSleeve(), newIdOf(ask)));
+  writes.push(make("sums", ruffleSum, newIdOf(ask)));
   return writes;
 
   /** One drafted from four figures, for nobody yet. */
@@ -78,6 +89,18 @@ export function demoWrites(ask: DemoAsk): Write[] {
       ask: readForm(form).record,
       fineness: 8,
       note,
+    };
+  }
+
+  /** The same block made full, with the usual figures of the style. */
+  function statementSleeve(): SleeveFields {
+    const plain = bareSleeve();
+    return {
+      ...plain,
+      name: "Child’s statement sleeve, tried out",
+      style: "statement",
+      ask: { ...plain.ask, style: { figures: {}, cloth: "medium" } },
+      note: "The plain one made full: six slashes, opened at the head.",
     };
   }
 }

@@ -71,10 +71,31 @@ function opening(head: Point, foot: Point, slash: Pick<Slash, "head" | "foot">):
   return afterwards(turnAbout(foot, turn), moveBy(slash.foot * away.x, slash.foot * away.y));
 }
 
+/** Where the panels come to lie, without their outlines. */
+export type Laid = Pick<Spread, "motions" | "lips">;
+
 /**
- * Cuts `piece` along `slashes` and opens each. They must run side by side, in the order of their `from` along the
- * outline. The panel in the middle stays where it is; with a slash in the middle, its two lips move apart evenly and
- * its foot keeps its place.
+ * How the panels lie when each slash is opened. The panel in the middle stays where it is; with a slash in the middle, its
+ * two lips move apart evenly and its foot keeps its place.
+ */
+export function layPanels(
+  lines: readonly SlashLine[],
+  openings: readonly Pick<Slash, "head" | "foot">[],
+): Laid {
+  const motions = aboutTheMiddle(panelMotions(lines, openings), lines);
+  const lips = lines.map(({ head, foot }, i): Lips => {
+    const [one, other] = [motions[i]!, motions[i + 1]!];
+    return {
+      head: { before: movePoint(head, one), after: movePoint(head, other) },
+      foot: { before: movePoint(foot, one), after: movePoint(foot, other) },
+    };
+  });
+  return { motions, lips };
+}
+
+/**
+ * Cuts `piece` along `slashes` and opens each, as `layPanels` lays them. They must run side by side, in the order of their
+ * `from` along the outline.
  */
 export function slashAndSpread(piece: Piece, slashes: readonly Slash[]): Spread {
   if (slashes.length === 0) return { piece, panels: [piece], motions: [STILL], lips: [] };
@@ -82,22 +103,17 @@ export function slashAndSpread(piece: Piece, slashes: readonly Slash[]): Spread 
     head: placePoint(piece, from),
     foot: placePoint(piece, to),
   }));
-  const chain = panelMotions(ends, slashes);
-  const motions = aboutTheMiddle(chain, ends);
-  const lips = ends.map(({ head, foot }, i): Lips => {
-    const [one, other] = [motions[i]!, motions[i + 1]!];
-    return {
-      head: { before: movePoint(head, one), after: movePoint(head, other) },
-      foot: { before: movePoint(foot, one), after: movePoint(foot, other) },
-    };
-  });
+  const { lips, motions } = layPanels(ends, slashes);
+  const stretches = motions.map((_, i) => panelStretches(piece, slashes, i));
   return {
     piece: {
       ...piece,
-      edges: wholeRing(piece, slashes, motions, lips),
+      edges: wholeRing(piece, slashes, stretches, { lips, motions }),
       notches: piece.notches.map((notch) => carried(notch, slashes)),
     },
-    panels: motions.map((_, i) => ({ edges: panelEdges(piece, slashes, ends, motions, i) })),
+    panels: motions.map((motion, i) => ({
+      edges: panelEdges(stretches[i]!, [ends[i - 1], ends[i]], motion),
+    })),
     motions,
     lips,
   };
@@ -133,8 +149,13 @@ export function midpoint(a: Point, b: Point): Point {
   return { x: (a.x + b.x) / 2, y: (a.y + b.y) / 2 };
 }
 
+interface Stretches {
+  readonly out: readonly Edge[];
+  readonly back: readonly Edge[];
+}
+
 /** The stretch of the outline that belongs to panel `i` on its way out, and on its way back where it has one. */
-function panelStretches(piece: Piece, slashes: readonly Slash[], i: number): { out: Edge[]; back: Edge[] } {
+function panelStretches(piece: Piece, slashes: readonly Slash[], i: number): Stretches {
   const before = slashes[i - 1];
   const after = slashes[i];
   if (!before) return { out: along(piece, after!.to, after!.from), back: [] };
@@ -143,14 +164,10 @@ function panelStretches(piece: Piece, slashes: readonly Slash[], i: number): { o
 }
 
 function panelEdges(
-  piece: Piece,
-  slashes: readonly Slash[],
-  ends: readonly SlashLine[],
-  motions: readonly Rigid[],
-  i: number,
+  { out, back }: Stretches,
+  [before, after]: readonly [SlashLine | undefined, SlashLine | undefined],
+  motion: Rigid,
 ): Edge[] {
-  const { out, back } = panelStretches(piece, slashes, i);
-  const [before, after] = [ends[i - 1], ends[i]];
   return moveEdges(
     [
       ...out,
@@ -158,17 +175,16 @@ function panelEdges(
       ...back,
       ...(before ? [{ name: "slash", curves: [line(before.foot, before.head)] }] : []),
     ],
-    motions[i]!,
+    motion,
   );
 }
 
 function wholeRing(
   piece: Piece,
   slashes: readonly Slash[],
-  motions: readonly Rigid[],
-  lips: readonly Lips[],
+  stretches: readonly Stretches[],
+  { lips, motions }: Laid,
 ): Edge[] {
-  const stretches = motions.map((_, i) => panelStretches(piece, slashes, i));
   const ring: Edge[] = [];
   for (const [i, motion] of motions.entries()) {
     ring.push(...moveEdges(stretches[i]!.out, motion));

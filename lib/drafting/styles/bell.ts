@@ -1,15 +1,14 @@
 /** The bell: a smooth head, slashed from the lower edge and hinged at the head, hanging wide with no gathers. */
-import { INCH } from "@/lib/drafting/guide";
 import { say } from "@/lib/drafting/say";
-import { type StyleFigure, type StyleRecipe } from "@/lib/drafting/styles/context";
+import { settled, type StyleFigure, type StyleRecipe } from "@/lib/drafting/styles/context";
 import {
   curvedHemStep,
   easedHead,
   fullSleeve,
   hingedCount,
+  hingedOpening,
   NARROW_HEM,
   setInEased,
-  sizeOf,
   spreadFigure,
 } from "@/lib/drafting/styles/full-sleeve";
 import { underarmWalk } from "@/lib/drafting/styles/parts";
@@ -21,12 +20,10 @@ export const bell: StyleRecipe = {
   look: "Smooth at the shoulder, and wide at a round lower edge that hangs in soft folds.",
   // Its lower edge is far wider than the block's.
   replaces: ["elbow", "hem-wrist", "hem-hand", "hem-arm"],
-  figures: (ground): StyleFigure[] => {
-    const scale = sizeOf(ground);
-    return [
-      hingedCount(6),
-      spreadFigure("footOpen", 1.25 * INCH * scale, "Wider, the lower edge swings out in deeper folds."),
-    ];
+  figures: (ground, typed): StyleFigure[] => {
+    const slashes = hingedCount(6);
+    const opening = hingedOpening(ground, settled(slashes, typed));
+    return [slashes, spreadFigure("footOpen", opening, "Wider, the lower edge swings out in deeper folds.")];
   },
   make: (context) => {
     const sleeve = fullSleeve(context, {

@@ -5,12 +5,18 @@ import { edgeOf } from "@/lib/drafting/outline";
 import { type PatternPiece, type StyleStep } from "@/lib/drafting/pattern";
 import { say } from "@/lib/drafting/say";
 import { bandChecks, bandFigures, bandOpening, bandPiece, bandSeams } from "@/lib/drafting/styles/band";
-import { type StyleContext, type StyleFigure, type StyleRecipe } from "@/lib/drafting/styles/context";
+import {
+  settled,
+  type StyleContext,
+  type StyleFigure,
+  type StyleRecipe,
+} from "@/lib/drafting/styles/context";
 import {
   aboveBand,
   easedHead,
   fullSleeve,
   hingedCount,
+  hingedOpening,
   setInEased,
   sizeOf,
   spreadFigure,
@@ -32,7 +38,11 @@ export const bishop: StyleRecipe = {
     const scale = sizeOf(ground);
     const slashes = hingedCount(6);
     const band = bandFigures(ground, CUFF.depth, "cuff");
-    const opening = bandOpening(ground, typed, { slashes, band, most: 1.25 * INCH * scale });
+    const opening = bandOpening(ground, typed, {
+      slashes,
+      band,
+      most: hingedOpening(ground, settled(slashes, typed)),
+    });
     const room = ground.figures.length - ground.figures.capDepth;
     return [
       slashes,

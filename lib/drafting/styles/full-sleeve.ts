@@ -12,7 +12,12 @@ import {
 } from "@/lib/drafting/styles/context";
 import { FULLEST, headGoal, headPlaces, pattern } from "@/lib/drafting/styles/parts";
 import { downTo, EMPTY, outlined } from "@/lib/drafting/styles/plain-sleeve";
-import { type SpreadAsk, type SpreadPiece, spreadPiece } from "@/lib/drafting/styles/spread-piece";
+import {
+  type SpreadAsk,
+  type SpreadPiece,
+  spreadPiece,
+  spreadLengths,
+} from "@/lib/drafting/styles/spread-piece";
 import { count, tooFar } from "@/lib/drafting/styles/statement";
 import { straightSides } from "@/lib/drafting/straight-sides";
 import { type Phrase, type Piece } from "@/lib/drafting/types";
@@ -20,6 +25,14 @@ import { type Phrase, type Piece } from "@/lib/drafting/types";
 /** How many slashes where the head is hinged: over fewer hinges than three no curve runs smoothly. */
 export function hingedCount(usual: number): StyleFigure {
   return { ...count("slashes", usual), low: 3 };
+}
+
+/**
+ * What each slash is opened by as a rule where the head is hinged, mm: the practice's 1 1/4 in, and all together no further
+ * than the sleeve is long, or a short one's head turns hollow.
+ */
+export function hingedOpening(ground: StyleGround, slashes: number): number {
+  return Math.min(1.25 * INCH * sizeOf(ground), ground.figures.length / slashes);
 }
 
 /** Practice is given for a child's sleeve of 12 in across: smaller ones take less, larger ones keep it. */
@@ -142,14 +155,17 @@ const KEPT = { within: 1 / 2000, lift: 1 / 10, step: 1 / 1000 };
  */
 export function keptHead(ask: SpreadAsk): SpreadAsk {
   const before = ask.notchBack - ask.notchFront;
-  let tried: number | undefined;
-  for (let lift = 0; lift <= KEPT.lift * before; lift += KEPT.step * before) {
-    const raise = ask.near(lift);
-    if (raise === tried) continue;
-    tried = raise;
-    if (spreadPiece({ ...ask, raise }).lengths.head >= before * (1 - KEPT.within)) return { ...ask, raise };
+  const raised = (steps: number): SpreadAsk => ({ ...ask, raise: ask.near(steps * KEPT.step * before) });
+  const keeps = (steps: number) => spreadLengths(raised(steps)).head >= before * (1 - KEPT.within);
+  let [low, high] = [0, Math.round(KEPT.lift / KEPT.step)];
+  if (keeps(low)) return raised(low);
+  if (!keeps(high)) return ask;
+  while (high - low > 1) {
+    const middle = Math.floor((low + high) / 2);
+    if (keeps(middle)) high = middle;
+    else low = middle;
   }
-  return ask;
+  return raised(high);
 }
 
 /** No distance: by the ruler, square to the cap line. */

@@ -10,12 +10,13 @@ import {
   bandSeams,
   bandSewSteps,
 } from "@/lib/drafting/styles/band";
-import { type StyleFigure, type StyleRecipe } from "@/lib/drafting/styles/context";
+import { settled, type StyleFigure, type StyleRecipe } from "@/lib/drafting/styles/context";
 import {
   aboveBand,
   easedHead,
   fullSleeve,
   hingedCount,
+  hingedOpening,
   setInEased,
   sizeOf,
   spreadFigure,
@@ -33,7 +34,11 @@ export const gatheredHem: StyleRecipe = {
     const scale = sizeOf(ground);
     const slashes = hingedCount(5);
     const band = bandFigures(ground, INCH * scale);
-    const opening = bandOpening(ground, typed, { slashes, band, most: 1.25 * INCH * scale });
+    const opening = bandOpening(ground, typed, {
+      slashes,
+      band,
+      most: hingedOpening(ground, settled(slashes, typed)),
+    });
     return [
       slashes,
       spreadFigure("footOpen", opening, "Wider, the lower edge gathers more closely into the band."),

@@ -1,6 +1,5 @@
 /** The lantern: widening to a line round the arm, and drawn in again below it; the two parts meet there edge to edge. */
 import { cutAcross } from "@/lib/drafting/cut-across";
-import { INCH } from "@/lib/drafting/guide";
 import { edgeOf } from "@/lib/drafting/outline";
 import { type StyleCheck, type StyleStep } from "@/lib/drafting/pattern";
 import { say } from "@/lib/drafting/say";
@@ -18,16 +17,22 @@ import {
   curvedHemStep,
   easedHead,
   hingedCount,
+  hingedOpening,
   keptHead,
   NARROW_HEM,
   ruledStep,
   setInEased,
-  sizeOf,
   spreadFigure,
 } from "@/lib/drafting/styles/full-sleeve";
 import { edgeSize, headPlaces, pattern, underarmWalk } from "@/lib/drafting/styles/parts";
 import { headed, outlined, work } from "@/lib/drafting/styles/plain-sleeve";
-import { type SpreadAsk, type SpreadPiece, spreadPiece, turnOf } from "@/lib/drafting/styles/spread-piece";
+import {
+  type SpreadAsk,
+  type SpreadPiece,
+  spreadPiece,
+  turnOf,
+  spreadLengths,
+} from "@/lib/drafting/styles/spread-piece";
 import {
   edgeSteps,
   joinSteps,
@@ -66,12 +71,13 @@ export const lantern: StyleRecipe = {
     };
     const slashes = hingedCount(6);
     const below = length - settled(widestAt, typed);
-    const open = (USUAL_TURN * below) / settled(slashes, typed);
+    const number = settled(slashes, typed);
+    const usual = Math.min(hingedOpening(ground, number), (USUAL_TURN * below) / number);
     return [
       widestAt,
       slashes,
       {
-        ...spreadFigure("footOpen", Math.max(2, Math.min(1.25 * INCH * sizeOf(ground), open))),
+        ...spreadFigure("footOpen", Math.max(2, usual)),
         label: "Opening at the widest line",
         said: "the opening of each slash at the widest line",
         does: "Wider, the ridge stands out further from the arm.",
@@ -182,10 +188,14 @@ function meeting(piece: Piece, { near, slashes }: SpreadAsk, wanted: number): Sp
   });
   const miss = (headOpen: number) => {
     const ask = asked(headOpen);
-    return turnOf(ask) > WIDEST_TURN ? wanted : spreadPiece(ask).lengths.head - wanted;
+    return turnOf(ask) > WIDEST_TURN ? wanted : spreadLengths(ask).head - wanted;
   };
   if (miss(0) > 0) return undefined;
-  const ask = asked(findRoot(miss, 0, wanted, 1e-9));
+  // All the slashes together open by nearly what the edge wants more: looked for round there, and all the way only else.
+  const even = (wanted - top) / slashes;
+  const close = even > 0 && miss(0.7 * even) < 0 && miss(1.1 * even) > 0;
+  const [low, high] = close ? [0.7 * even, 1.1 * even] : [0, wanted];
+  const ask = asked(findRoot(miss, low, high, SAME / (20 * slashes)));
   return Math.abs(miss(ask.headOpen)) < SAME / 2 ? ask : undefined;
 }
 

@@ -9,6 +9,8 @@ import { edgeOf, endOf, moveEdges, movePiece, startOf, stretchOf, withEdge } fro
 import { type MarkPoint } from "@/lib/drafting/pattern";
 import { angleOf, moveCurves, movePoint, type Rigid, afterwards } from "@/lib/drafting/rigid";
 import {
+  type Laid,
+  layPanels,
   midpoint,
   type Slash,
   slashAndSpread,
@@ -134,24 +136,43 @@ function setOut(ask: SpreadAsk): { cuts: Cut[]; marks: SlashMarks[] } {
   return { cuts, marks };
 }
 
+/** Both edges drawn anew, without the outlines of the panels: what is asked again and again while a length is looked for. */
+function drawAnew(ask: SpreadAsk) {
+  const { cuts, marks } = setOut(ask);
+  const laid = layPanels(
+    cuts.map(({ headPoint, footPoint }) => ({ head: headPoint, foot: footPoint })),
+    cuts.map(({ slash }) => slash),
+  );
+  const head = newHead(ask, cuts, laid);
+  const foot = newFoot(ask, cuts, laid);
+  const total = chainLength(head.curves);
+  const tail = chainLength(edgeOf(ask.piece, "head").curves) - ask.notchBack;
+  const lengths = {
+    headBefore: ask.notchBack - ask.notchFront,
+    head: total - tail - ask.notchFront,
+    footBefore: chainLength(edgeOf(ask.piece, "foot").curves),
+    foot: chainLength(foot.curves),
+  };
+  return { cuts, marks, laid, head, foot, lengths, notchBack: total - tail };
+}
+
+/** What `spreadPiece` would measure, sooner. @throws as it does. */
+export function spreadLengths(ask: SpreadAsk): SpreadPiece["lengths"] {
+  return drawAnew(ask).lengths;
+}
+
 /** @throws RangeError where a slash is opened wider than twice its length; ask `turnOf` before. */
 export function spreadPiece(ask: SpreadAsk): SpreadPiece {
-  const { cuts, marks } = setOut(ask);
+  const { cuts, foot, head, lengths, marks, notchBack } = drawAnew(ask);
   const spread = slashAndSpread(
     ask.piece,
     cuts.map(({ slash }) => slash),
   );
-  const head = newHead(ask, cuts, spread);
-  const foot = newFoot(ask, cuts, spread);
   const whole = withEdge(withEdge(spread.piece, "head", head.curves), "foot", foot.curves);
-  const footLength = chainLength(foot.curves);
-  const headBefore = ask.notchBack - ask.notchFront;
-  const total = chainLength(head.curves);
-  const tail = chainLength(edgeOf(ask.piece, "head").curves) - ask.notchBack;
   const notches: Notch[] = [
     { id: "front", edge: "head", at: ask.notchFront, count: 1 },
     { id: "crown", edge: "head", at: head.crown, count: 1 },
-    { id: "back", edge: "head", at: total - tail, count: 2 },
+    { id: "back", edge: "head", at: notchBack, count: 2 },
     { id: "footCentre", edge: "foot", at: foot.centre, count: 1 },
   ];
   return {
@@ -160,12 +181,7 @@ export function spreadPiece(ask: SpreadAsk): SpreadPiece {
     marks,
     headSet: head.set,
     footSet: foot.set,
-    lengths: {
-      headBefore,
-      head: total - tail - ask.notchFront,
-      footBefore: chainLength(edgeOf(ask.piece, "foot").curves),
-      foot: footLength,
-    },
+    lengths,
     turn: spread.motions.reduce(
       (sum, motion, i) => sum + (i === 0 ? 0 : Math.abs(angleOf(motion) - angleOf(spread.motions[i - 1]!))),
       0,
@@ -181,7 +197,7 @@ export function spreadPiece(ask: SpreadAsk): SpreadPiece {
 function edgePoints(
   ask: SpreadAsk,
   cuts: readonly Cut[],
-  { lips, motions }: Spread,
+  { lips, motions }: Laid,
   end: "head" | "foot",
 ): SetMark[] {
   const count = cuts.length;
@@ -219,24 +235,20 @@ function moreAtBack({ backDrop = 0 }: SpreadAsk, side: number): number {
 }
 
 /** The head from notch to notch, raised; outside the notches the old seam, moved. */
-function newHead(ask: SpreadAsk, cuts: readonly Cut[], spread: Spread) {
+function newHead(ask: SpreadAsk, cuts: readonly Cut[], laid: Laid) {
   const head = edgeOf(ask.piece, "head");
-  const { motions } = spread;
-  const first = moveCurves(stretchOf(head, 0, ask.notchFront), motions[0]!);
-  const last = moveCurves(stretchOf(head, ask.notchBack, Infinity), motions.at(-1)!);
-  const set = edgePoints(ask, cuts, spread, "head");
-  const opened = edgeOf(spread.piece, "head").curves;
+  const [front, back] = [laid.motions[0]!, laid.motions.at(-1)!];
+  const first = moveCurves(stretchOf(head, 0, ask.notchFront), front);
+  const last = moveCurves(stretchOf(head, ask.notchBack, Infinity), back);
+  const set = edgePoints(ask, cuts, laid, "head");
   const [leaving, arriving] = ask.squared?.includes("head")
-    ? [squareAfter(spread.piece, "underarmFront"), squareBefore(spread.piece, "underarmBack")]
-    : [
-        heading(head.curves, ask.notchFront, motions[0]!),
-        heading(head.curves, ask.notchBack, motions.at(-1)!),
-      ];
+    ? [squareAfter(ask.piece, "underarmFront", front), squareBefore(ask.piece, "underarmBack", back)]
+    : [heading(head.curves, ask.notchFront, front), heading(head.curves, ask.notchBack, back)];
   const curves = fairCurve(
     [
-      first.length > 0 ? endOf(first) : startOf(opened),
+      first.length > 0 ? endOf(first) : movePoint(startOf(head.curves), front),
       ...set.map(({ at, by }) => ({ x: at.x, y: at.y - by })),
-      last.length > 0 ? startOf(last) : endOf(opened),
+      last.length > 0 ? startOf(last) : movePoint(endOf(head.curves), back),
     ],
     leaving,
     arriving,
@@ -245,31 +257,34 @@ function newHead(ask: SpreadAsk, cuts: readonly Cut[], spread: Spread) {
 }
 
 /** The foot from its back end to its front, lowered. */
-function newFoot(ask: SpreadAsk, cuts: readonly Cut[], spread: Spread) {
-  const foot = edgeOf(spread.piece, "foot").curves;
-  const old = edgeOf(ask.piece, "foot").curves;
-  const set = edgePoints(ask, cuts, spread, "foot").reverse();
+function newFoot(ask: SpreadAsk, cuts: readonly Cut[], laid: Laid) {
+  const foot = edgeOf(ask.piece, "foot").curves;
+  const [front, back] = [laid.motions[0]!, laid.motions.at(-1)!];
+  const set = edgePoints(ask, cuts, laid, "foot").reverse();
   const [leaving, arriving] = ask.squared?.includes("foot")
-    ? [squareAfter(spread.piece, "underarmBack"), squareBefore(spread.piece, "underarmFront")]
-    : [heading(old, 0, spread.motions.at(-1)!), heading(old, chainLength(old), spread.motions[0]!)];
+    ? [squareAfter(ask.piece, "underarmBack", back), squareBefore(ask.piece, "underarmFront", front)]
+    : [heading(foot, 0, back), heading(foot, chainLength(foot), front)];
   const curves = fairCurve(
-    [startOf(foot), ...set.map(({ at, by }) => ({ x: at.x, y: at.y + by })), endOf(foot)],
+    [
+      movePoint(startOf(foot), back),
+      ...set.map(({ at, by }) => ({ x: at.x, y: at.y + by })),
+      movePoint(endOf(foot), front),
+    ],
     leaving,
     arriving,
   );
   return { curves, centre: middleOf(curves), set };
 }
 
-/** How the outline runs on square to an edge behind it, a quarter turn clockwise as seen. */
-function squareAfter(piece: Piece, edge: string): Point {
-  const { curves } = edgeOf(piece, edge);
-  const { x, y } = pointAt(curves, Infinity).direction;
+/** How the outline runs on square to a moved edge behind it, a quarter turn clockwise as seen. */
+function squareAfter(piece: Piece, edge: string, motion: Rigid): Point {
+  const { x, y } = heading(edgeOf(piece, edge).curves, Infinity, motion);
   return { x: -y, y: x };
 }
 
-/** How the outline comes square to an edge before it. */
-function squareBefore(piece: Piece, edge: string): Point {
-  const { x, y } = pointAt(edgeOf(piece, edge).curves, 0).direction;
+/** How the outline comes square to a moved edge before it. */
+function squareBefore(piece: Piece, edge: string, motion: Rigid): Point {
+  const { x, y } = heading(edgeOf(piece, edge).curves, 0, motion);
   return { x: y, y: -x };
 }
 

@@ -72,7 +72,7 @@ describe("cap seam", () => {
           }
         }
       }),
-      { numRuns: 600 },
+      { numRuns: 600, interruptAfterTimeLimit: 60_000 },
     );
     // Both kinds must have been met, or the property says nothing.
     expect(fair).toBeGreaterThan(20);
