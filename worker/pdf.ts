@@ -1,6 +1,7 @@
 /** Makes papers off the main thread, where a long one would freeze the screen. */
 import { expose, transfer } from "comlink";
 import { canvasPainter } from "@/lib/pdf/canvas-painter";
+import { fullSizePdf } from "@/lib/pdf/full-size";
 import { marksPdf } from "@/lib/pdf/marks";
 import { type OnProgress, type PdfApi, printProblem } from "@/lib/pdf/pdf-api";
 import { readPrintFonts } from "@/lib/pdf/print-fonts";
@@ -71,6 +72,7 @@ const handOver = (file: ArrayBuffer): ArrayBuffer => transfer(file, [file]);
 const api: PdfApi = {
   receipt: async (doc, paper, onProgress) => handOver(await receiptPdf(doc, paper, await tools(onProgress))),
   marks: async (doc, paper, onProgress) => handOver(await marksPdf(doc, paper, await tools(onProgress))),
+  fullSize: async (job, onProgress) => handOver(await fullSizePdf(job, await tools(onProgress))),
 };
 
 expose(api);

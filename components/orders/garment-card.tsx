@@ -8,6 +8,7 @@ import { Field, Select, TextArea, TextInput } from "@/components/ui/field";
 import { setChoiceWords, sleevesFor, withWearer } from "@/lib/orders/garment-choices";
 import { staleness } from "@/lib/figures/staleness";
 import { ageOn } from "@/lib/people/age";
+import { styleName } from "@/lib/sleeves/style-names";
 import { type WearerChoice } from "@/lib/store/queries/orders";
 import { type GarmentsFieldsProps, KINDS_LIST } from "./garments-fields";
 
@@ -75,7 +76,7 @@ export function GarmentCard({ form, at, people, today, otherNames, onLeaveOut }:
               <option value="">None</option>
               {sleeves.map((sleeve) => (
                 <option key={sleeve.id} value={sleeve.id}>
-                  {sleeve.name}
+                  {sleeve.name}, {styleName(sleeve.style)}
                   {sleeve.wearerId === null ? ", nobody’s yet" : ""}
                 </option>
               ))}

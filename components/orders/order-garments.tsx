@@ -10,6 +10,7 @@ import { ageOn } from "@/lib/people/age";
 import { formatDay } from "@/lib/people/format-day";
 import { type IsoDate } from "@/lib/people/iso-date";
 import { type Garment } from "@/lib/records/types";
+import { styleName } from "@/lib/sleeves/style-names";
 import { type OrderCardView } from "@/lib/store/queries/orders";
 
 /** What is sewn: for whom, from which figures, with which sleeve, and when it is fitted. */
@@ -95,6 +96,7 @@ function GarmentView({
             >
               {sleeve.name}
             </AppLink>
+            <span className="block text-soft">{styleName(sleeve.style)}</span>
           </Fact>
         )}
         {garment.fittingOn && (

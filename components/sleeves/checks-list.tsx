@@ -1,6 +1,6 @@
 import { memo } from "react";
 import { CircleCheck, OctagonX, TriangleAlert } from "lucide-react";
-import { type Check, type Verdict } from "@/lib/drafting";
+import { type StyleCheck, type Verdict } from "@/lib/drafting";
 import { type Fineness, type Unit } from "@/lib/records/types";
 import { boundsPhrase, sortedChecks, sourceLine } from "@/lib/sleeves/head-line";
 import { Card, CardHead } from "@/components/ui/card";
@@ -13,7 +13,7 @@ const signs: Record<Verdict, { Sign: typeof CircleCheck; colour: string; word: s
 };
 
 export interface ChecksListProps {
-  checks: readonly Check[];
+  checks: readonly StyleCheck[];
   unit: Unit;
   fineness: Fineness;
   sub?: string;
@@ -49,7 +49,7 @@ export const ChecksList = memo(function ChecksList({ checks, fineness, sub, unit
   );
 });
 
-function CheckItem({ check, fineness, unit }: { check: Check; fineness: Fineness; unit: Unit }) {
+function CheckItem({ check, fineness, unit }: { check: StyleCheck; fineness: Fineness; unit: Unit }) {
   const { Sign, colour, word } = signs[check.verdict];
   const units = { unit, fineness };
   const within = boundsPhrase(check);

@@ -10,14 +10,15 @@ import { Length } from "@/components/ui/fraction";
 import { Notice } from "@/components/ui/notice";
 import { Progress } from "@/components/ui/progress";
 import { Screen } from "@/components/ui/screen";
-import { type MadeSleeve } from "@/lib/drafting";
 import { type Fineness, type Unit } from "@/lib/records/types";
 import { comparedIds, type ComparedRow, comparedRows } from "@/lib/sleeves/compare";
 import { boxOf, outlineOf, unionOf } from "@/lib/sleeves/drawing-paths";
 import { fitView, toScreen } from "@/lib/sleeves/drawing-view";
-import { makeFromRecord } from "@/lib/sleeves/make-from-record";
+import { type GoodSleeve, styleFromRecord, type StyledSleeve } from "@/lib/sleeves/make-style-from-record";
+import { styleName } from "@/lib/sleeves/style-names";
 import { sleevesQuery } from "@/lib/store/queries/sleeves";
 import { backToSleeves } from "@/components/frame/not-shown";
+import { SleeveThumb } from "./sleeve-thumb";
 import { useSize } from "./use-size";
 import "./sleeves.css";
 
@@ -47,10 +48,11 @@ function Compare({ ids }: { ids: string[] }) {
     () =>
       view
         .filter(({ sleeve }) => sleeve.removedAt === null)
-        .map(({ sleeve }) => ({ record: sleeve.ask, made: makeFromRecord(sleeve.ask) })),
+        .map(({ sleeve }) => ({ record: sleeve.ask, made: styleFromRecord(sleeve) })),
     [view],
   );
   const rows = useMemo(() => comparedRows(made), [made]);
+  const styled = live.some(({ sleeve }) => sleeve.style !== "plain");
   const unit = workshop?.unit ?? "in";
   const fineness: Fineness = live.some(({ sleeve }) => sleeve.fineness === 16) ? 16 : 8;
 
@@ -73,16 +75,22 @@ function Compare({ ids }: { ids: string[] }) {
     <Screen title="Compare sleeves" back={backToSleeves} wide>
       <div className="grid grid-cols-[minmax(0,1fr)] items-start gap-6 lg:grid-cols-2">
         <Card aria-labelledby="laid-title">
-          <CardHead id="laid-title" title="Laid on one centre line" />
+          <CardHead
+            id="laid-title"
+            title="Laid on one centre line"
+            sub={styled && "Of a sleeve with a style, the plain one that it is made from."}
+          />
           <ul className="mb-3 grid gap-1">
             {live.map(({ sleeve, wearer }, i) => (
               <li key={sleeve.id} className="flex items-center gap-3">
                 <Sample look={looks[i]!} />
-                <span className="min-w-0 wrap-anywhere">
+                <span className="min-w-0 flex-1 wrap-anywhere">
                   <span className="font-bold">{looks[i]!.letter}</span> {sleeve.name}
                   {wearer && !sleeve.name.includes(wearer.name) && `, ${wearer.name}`}
-                  {!made[i]?.made?.ok && " – cannot be drawn"}
+                  <span className="block text-sm text-soft">{styleName(sleeve.style)}</span>
+                  {!made[i]?.made?.ok && "Cannot be drawn"}
                 </span>
+                <Pieces of={made[i]?.made} />
               </li>
             ))}
           </ul>
@@ -119,6 +127,10 @@ function Compare({ ids }: { ids: string[] }) {
 
 type Look = (typeof looks)[number];
 
+function Pieces({ of }: { of: StyledSleeve | null | undefined }) {
+  return of?.ok && of.style !== "plain" ? <SleeveThumb pieces={of.pieces} /> : null;
+}
+
 function Sample({ look }: { look: Look }) {
   return (
     <svg aria-hidden="true" viewBox="0 0 48 12" className="h-3 w-12 shrink-0">
@@ -128,7 +140,7 @@ function Sample({ look }: { look: Look }) {
 }
 
 interface OverlaidProps {
-  drawn: { made: MadeSleeve & { ok: true }; look: Look }[];
+  drawn: { made: GoodSleeve; look: Look }[];
   lay: Lay;
 }
 

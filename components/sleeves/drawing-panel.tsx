@@ -2,9 +2,9 @@
 
 import { type PointerEvent, type ReactNode, useRef, useState } from "react";
 import { Maximize2 } from "lucide-react";
-import { type MadeSleeve, makeSleeve } from "@/lib/drafting";
+import { makeSleeve } from "@/lib/drafting";
 import { type Fineness, type Unit } from "@/lib/records/types";
-import { steadyBox } from "@/lib/sleeves/drawing-paths";
+import { boxOf, steadyBox } from "@/lib/sleeves/drawing-paths";
 import { fitView, type Size, toScreen, type View } from "@/lib/sleeves/drawing-view";
 import {
   draggedFigure,
@@ -13,14 +13,15 @@ import {
   handlePoint,
   nearestHandle,
 } from "@/lib/sleeves/handles";
+import { layPieces } from "@/lib/sleeves/lay-pieces";
+import { type GoodSleeve as Good } from "@/lib/sleeves/make-style-from-record";
 import { type FigureKey } from "@/lib/sleeves/sleeve-figures";
 import { Tape } from "@/components/ui/tape";
-import { LookClosely } from "./look-closely";
+import { LookClosely, type Plan } from "./look-closely";
+import { nameRoom, PiecesDrawing, piecesRoom } from "./pieces-drawing";
 import { labelRoom, SleeveDrawing } from "./sleeve-drawing";
 import { useSize } from "./use-size";
 import "./sleeves.css";
-
-type Good = MadeSleeve & { ok: true };
 
 export interface DrawingPanelProps {
   /** The sleeve, or the last that could be drawn; null while there is none yet. */
@@ -53,8 +54,23 @@ export function DrawingPanel(props: DrawingPanelProps) {
   const headRef = useRef<HTMLDivElement>(null);
   const [drag, setDrag] = useState<Drag | null>(null);
   const [closely, setClosely] = useState(false);
-  const view =
-    made && size && (drag ? draggedView(drag, made) : fitView(steadyBox(made.draft), size, labelRoom));
+  const plain = made?.style === "plain";
+  const planFor = (one: Good, paper: Size, box = boxOf(one.draft)): Plan =>
+    one.style === "plain"
+      ? {
+          box,
+          room: labelRoom,
+          draw: (view) => (
+            <SleeveDrawing
+              {...{ size: paper, view, unit, fineness, focus, faint, label }}
+              figures={one.figures}
+              draft={one.draft}
+            />
+          ),
+        }
+      : piecesPlan(one, paper, { faint, label });
+  const plan = made && size && planFor(made, size, steadyBox(made.draft));
+  const view = made && size && plan && (drag ? draggedView(drag, made) : fitView(plan.box, size, plan.room));
 
   return (
     <section aria-label="Drawing" className="drawing-panel">
@@ -67,26 +83,24 @@ export function DrawingPanel(props: DrawingPanelProps) {
       </div>
       <Tape unit={unit} className="shrink-0" />
       <div ref={ref} className="marking-paper">
-        {made && size && view ? (
+        {made && plan && view ? (
           <>
-            <SleeveDrawing
-              {...{ size, view, unit, fineness, focus, faint, label }}
-              figures={made.figures}
-              draft={made.draft}
-            />
-            <Handles
-              {...{ made, view, drag }}
-              onTake={(taken) =>
-                setDrag(taken && { ...taken, headHeight: headRef.current?.offsetHeight ?? 0 })
-              }
-              onMove={(now, at) => {
-                const by = {
-                  x: (at.x - now.from.x) / now.view.scale,
-                  y: (at.y - now.from.y) / now.view.scale,
-                };
-                onFigure(now.name, draggedFigure(now.name, now.made.figures, by, unit, fineness));
-              }}
-            />
+            {plan.draw(view)}
+            {plain && (
+              <Handles
+                {...{ made, view, drag }}
+                onTake={(taken) =>
+                  setDrag(taken && { ...taken, headHeight: headRef.current?.offsetHeight ?? 0 })
+                }
+                onMove={(now, at) => {
+                  const by = {
+                    x: (at.x - now.from.x) / now.view.scale,
+                    y: (at.y - now.from.y) / now.view.scale,
+                  };
+                  onFigure(now.name, draggedFigure(now.name, now.made.figures, by, unit, fineness));
+                }}
+              />
+            )}
             <button
               type="button"
               onClick={() => setClosely(true)}
@@ -95,21 +109,18 @@ export function DrawingPanel(props: DrawingPanelProps) {
               <Maximize2 aria-hidden="true" className="size-5" />
               <span className="sr-only">Look closely</span>
             </button>
-            <span aria-hidden="true" className="absolute start-2 bottom-1 text-fine text-soft">
-              {unit === "in" ? "inches" : "cm"}
-            </span>
+            {plain && (
+              <span aria-hidden="true" className="absolute start-2 bottom-1 text-fine text-soft">
+                {unit === "in" ? "inches" : "cm"}
+              </span>
+            )}
             <span aria-hidden="true" className="absolute start-2 top-1 text-fine text-soft">
               front
             </span>
             <span aria-hidden="true" className="absolute end-2 top-1 text-fine text-soft">
               back
             </span>
-            <LookClosely
-              {...{ unit, fineness, focus, faint, label }}
-              made={made}
-              open={closely}
-              onOpenChange={setClosely}
-            />
+            <LookClosely plan={(paper) => planFor(made, paper)} open={closely} onOpenChange={setClosely} />
           </>
         ) : (
           !made && size && <Example {...{ size, unit, fineness, focus }} />
@@ -117,6 +128,19 @@ export function DrawingPanel(props: DrawingPanelProps) {
       </div>
     </section>
   );
+}
+
+/** The pieces beside each other, as suits the shape of the paper. */
+function piecesPlan({ pieces }: Good, size: Size, rest: { faint: boolean; label: string }): Plan {
+  const { left, right, top, bottom } = piecesRoom;
+  const aspect = Math.max(1, size.width - left - right) / Math.max(1, size.height - top - bottom);
+  const bare = fitView(layPieces(pieces, aspect, 0).box, size, piecesRoom);
+  const laid = layPieces(pieces, aspect, nameRoom / bare.scale);
+  return {
+    box: laid.box,
+    room: piecesRoom,
+    draw: (view) => <PiecesDrawing {...{ laid, size, view }} {...rest} />,
+  };
 }
 
 /** The child's sleeve of the hand practice (B 12 in, C 6 1/4 in): what the names mean, until there is a sleeve of one's own. */

@@ -6,13 +6,15 @@ import { formatLength } from "@/lib/lengths/format-length";
 import { type Phrase as PhraseParts } from "@/lib/lengths/phrase";
 import { type Fineness, type Unit } from "@/lib/records/types";
 import { steppedText, withEighth } from "@/lib/sleeves/handles";
-import { type FigureKey, sleeveFigure } from "@/lib/sleeves/sleeve-figures";
 import { Field, TextInput } from "@/components/ui/field";
 import { Phrase } from "@/components/ui/fraction";
 import { useHoldRepeat } from "./use-hold-repeat";
 
-export interface FigureFieldProps {
-  figure: FigureKey;
+export interface FigureFieldProps<K extends string> {
+  figure: K;
+  name: string;
+  /** What it is, in one plain sentence. */
+  how: string;
   typed: string;
   unit: Unit;
   fineness: Fineness;
@@ -26,21 +28,20 @@ export interface FigureFieldProps {
   problem?: PhraseParts;
   /** Where it was taken from; else what it is. */
   said?: PhraseParts;
-  onType(figure: FigureKey, typed: string): void;
-  onFocusFigure(figure: FigureKey): void;
+  onType(figure: K, typed: string): void;
+  onFocusFigure?(figure: K): void;
 }
 
-/** One figure: typed as a hand writes it, stepped by the thumb, with its eighths at hand while it is typed. */
-export const FigureField = memo(function FigureField(props: FigureFieldProps) {
-  const { error, figure, fineness, onFocusFigure, onType, optional, problem, said, typed, unit, usualMm } =
-    props;
+/** One length: typed as a hand writes it, stepped by the thumb, with its eighths at hand while it is typed. */
+function LengthField<K extends string>(props: FigureFieldProps<K>) {
+  const { error, figure, fineness, how, name, onFocusFigure, onType, optional, problem, said, typed } = props;
+  const { unit, usualMm } = props;
   const id = useId();
   const [inHand, setInHand] = useState(false);
-  const { how, name } = sleeveFigure(figure);
   const usual = usualMm === undefined ? undefined : formatLength(usualMm, unit, fineness).figure;
 
   const step = (way: 1 | -1) => {
-    onFocusFigure(figure);
+    onFocusFigure?.(figure);
     const next = steppedText(typed, way, unit, fineness, usualMm);
     if (next !== null) onType(figure, next);
   };
@@ -75,7 +76,7 @@ export const FigureField = memo(function FigureField(props: FigureFieldProps) {
               placeholder={usual}
               data-figure={figure}
               onChange={(event) => onType(figure, event.target.value)}
-              onFocus={() => onFocusFigure(figure)}
+              onFocus={() => onFocusFigure?.(figure)}
               onKeyDown={keys}
               className="text-center"
             />
@@ -88,7 +89,9 @@ export const FigureField = memo(function FigureField(props: FigureFieldProps) {
       </Field>
     </div>
   );
-});
+}
+
+export const FigureField = memo(LengthField) as typeof LengthField;
 
 interface StepKeyProps {
   way: 1 | -1;
@@ -96,7 +99,7 @@ interface StepKeyProps {
   onStep(way: 1 | -1): void;
 }
 
-function StepKey({ onStep, way, words }: StepKeyProps) {
+export function StepKey({ onStep, way, words }: StepKeyProps) {
   const hold = useHoldRepeat(() => onStep(way));
   const Sign = way > 0 ? Plus : Minus;
   return (

@@ -1,7 +1,7 @@
 "use client";
 
-import { useMemo, useState } from "react";
-import { defaultBeside, defaultMarks, type MadeSleeve, usualHeadEase } from "@/lib/drafting";
+import { type ReactNode, useMemo, useState } from "react";
+import { defaultBeside, defaultMarks, usualHeadEase } from "@/lib/drafting";
 import { ageOn } from "@/lib/people/age";
 import { phraseText } from "@/lib/lengths/phrase";
 import { parseLength } from "@/lib/lengths/parse-length";
@@ -9,9 +9,10 @@ import { type MeasurementSet, type Wearer } from "@/lib/records/types";
 import { askFromSet, fillFromSet, saidOf, triedAsks } from "@/lib/sleeves/ask-from-set";
 import { type FieldProblems } from "@/lib/sleeves/field-problems";
 import { type MarkText } from "@/lib/sleeves/guide-marks";
-import { usualBicepsEase } from "@/lib/sleeves/make-from-record";
+import { usualBicepsEase } from "@/lib/sleeves/ask-from-record";
+import { type GoodSleeve } from "@/lib/sleeves/make-style-from-record";
 import { type Reach, reaches } from "@/lib/sleeves/reach";
-import { type FigureKey } from "@/lib/sleeves/sleeve-figures";
+import { type FigureKey, sleeveFigure } from "@/lib/sleeves/sleeve-figures";
 import { figuresNeeded, type SleeveForm, withFigure } from "@/lib/sleeves/sleeve-form";
 import { Card, CardHead } from "@/components/ui/card";
 import { Check, Choice } from "@/components/ui/field";
@@ -23,7 +24,8 @@ import { MarksTable } from "./marks-table";
 export interface FiguresFormProps {
   form: SleeveForm;
   beside: FieldProblems;
-  made: MadeSleeve | null;
+  /** The sleeve, or the plain one that its style is made from; null while that cannot be drawn. */
+  made: GoodSleeve | null;
   set: MeasurementSet | null;
   wearer: Wearer | null;
   today: string;
@@ -32,11 +34,13 @@ export interface FiguresFormProps {
   onType(figure: FigureKey, typed: string): void;
   onFocusFigure(figure: FigureKey): void;
   onPatch(patch: (now: SleeveForm) => SleeveForm): void;
+  /** The style's figures, which come after the four. */
+  children?: ReactNode;
 }
 
 /** All figures of the sleeve, the four that draw it first. */
 export function FiguresForm(props: FiguresFormProps) {
-  const { beside, form, isNew, made, onFocusFigure, onPatch, onType, set, today, wearer } = props;
+  const { beside, children, form, isNew, made, onFocusFigure, onPatch, onType, set, today, wearer } = props;
   const { armholeBy, bicepsBy, capBy, fineness, typed, unit } = form;
   const ageYears = wearer ? ageOn(wearer, today)?.years : undefined;
   const setFigures = form.setId === set?.id ? set?.figures : undefined;
@@ -53,6 +57,7 @@ export function FiguresForm(props: FiguresFormProps) {
     <FigureField
       key={figure}
       {...{ figure, unit, fineness, onType, onFocusFigure }}
+      {...names(figure)}
       typed={typed[figure]}
       optional={!needed.has(figure)}
       usualMm={usual[figure]}
@@ -104,7 +109,7 @@ export function FiguresForm(props: FiguresFormProps) {
             field("capDepth")
           ) : (
             <>
-              {made?.ok && (
+              {made && (
                 <p>
                   Found: a cap{" "}
                   <Length mm={made.figures.capDepth} unit={unit} fineness={fineness} className="font-bold" />{" "}
@@ -131,7 +136,7 @@ export function FiguresForm(props: FiguresFormProps) {
             <>
               {field("upperArm")}
               {field("bicepsEase")}
-              {made?.ok && (
+              {made && (
                 <p>
                   Biceps line{" "}
                   <Length mm={made.figures.biceps} unit={unit} fineness={fineness} className="font-bold" />.
@@ -150,6 +155,7 @@ export function FiguresForm(props: FiguresFormProps) {
           />
         </div>
       </Card>
+      {children}
       <Card aria-labelledby="more-title">
         <CardHead
           id="more-title"
@@ -208,7 +214,7 @@ type MarksProps = PartProps & Pick<FiguresFormProps, "beside" | "form" | "made">
 
 function GuideMarks({ beside, field, form, made, onPatch }: MarksProps) {
   const { fineness, marks, unit } = form;
-  const figures = made?.ok ? made.figures : null;
+  const figures = made?.figures;
   const rule = figures && defaultMarks(figures.biceps, figures.capDepth);
   const troubled = beside.markErrors.length > 0 || beside.marks.front.size > 0 || beside.marks.back.size > 0;
   const [unfolded, setUnfolded] = useState(false);
@@ -256,21 +262,26 @@ function GuideMarks({ beside, field, form, made, onPatch }: MarksProps) {
   );
 }
 
+function names(figure: FigureKey) {
+  const { how, name } = sleeveFigure(figure);
+  return { how, name };
+}
+
 /** Changing over takes along what was found, so that the drawing does not jump. */
-function withCapBy(now: SleeveForm, by: string, made: MadeSleeve | null): SleeveForm {
+function withCapBy(now: SleeveForm, by: string, made: GoodSleeve | null): SleeveForm {
   if (by === "armhole") return { ...now, capBy: "armhole" };
-  const keepsOwn = now.typed.capDepth.trim() !== "" || !made?.ok;
+  const keepsOwn = now.typed.capDepth.trim() !== "" || !made;
   return keepsOwn ? { ...now, capBy: "given" } : withFigure(now, "capDepth", made.figures.capDepth);
 }
 
-function withBicepsBy(now: SleeveForm, by: string, made: MadeSleeve | null): SleeveForm {
+function withBicepsBy(now: SleeveForm, by: string, made: GoodSleeve | null): SleeveForm {
   if (by === "arm") return { ...now, bicepsBy: "arm" };
-  const keepsOwn = now.typed.biceps.trim() !== "" || !made?.ok;
+  const keepsOwn = now.typed.biceps.trim() !== "" || !made;
   return keepsOwn ? { ...now, bicepsBy: "given" } : withFigure(now, "biceps", made.figures.biceps);
 }
 
 /** What an empty field stands for. */
-function usualFigures(form: SleeveForm, made: MadeSleeve | null): Partial<Record<FigureKey, number>> {
+function usualFigures(form: SleeveForm, made: GoodSleeve | null): Partial<Record<FigureKey, number>> {
   const mm = (key: FigureKey) => {
     const read = parseLength(form.typed[key], form.unit);
     return read.ok ? read.mm : undefined;
@@ -286,7 +297,7 @@ function usualFigures(form: SleeveForm, made: MadeSleeve | null): Partial<Record
   return {
     ...(armhole !== undefined && { headEase: usualHeadEase(armhole) }),
     ...(arm !== undefined && { bicepsEase: usualBicepsEase(arm) }),
-    ...(made?.ok && {
+    ...(made && {
       beside: defaultBeside(made.figures.biceps),
       notchFront: made.figures.notches.front,
       notchBack: made.figures.notches.back,

@@ -1,5 +1,5 @@
 import { CircleCheck, Info, OctagonX, TriangleAlert } from "lucide-react";
-import { type Check } from "@/lib/drafting";
+import { type StyleCheck } from "@/lib/drafting";
 import { type Fineness, type Unit } from "@/lib/records/types";
 import { countLine, type HeadLine } from "@/lib/sleeves/head-line";
 import { Phrase } from "@/components/ui/fraction";
@@ -16,7 +16,7 @@ export interface HeadLineViewProps {
   unit: Unit;
   fineness: Fineness;
   /** How they stand is a second line, which leads to them. */
-  checks?: readonly Check[];
+  checks?: readonly StyleCheck[];
 }
 
 /** Whether the sleeve goes in, before anything else. */

@@ -3,34 +3,41 @@
 import { type KeyboardEvent, type PointerEvent, type ReactNode, useEffect, useRef, useState } from "react";
 import { Dialog } from "radix-ui";
 import { Minus, Plus, Scan, X } from "lucide-react";
-import { type MadeSleeve, type Point } from "@/lib/drafting";
-import { type Fineness, type Unit } from "@/lib/records/types";
-import { boxOf } from "@/lib/sleeves/drawing-paths";
-import { fitView, panned, pinched, type View, zoomAt } from "@/lib/sleeves/drawing-view";
-import { type FigureKey } from "@/lib/sleeves/sleeve-figures";
+import { type Point } from "@/lib/drafting";
+import {
+  type Box,
+  fitView,
+  panned,
+  pinched,
+  type Room,
+  type Size,
+  type View,
+  zoomAt,
+} from "@/lib/sleeves/drawing-view";
 import { Button } from "@/components/ui/button";
-import { labelRoom, SleeveDrawing } from "./sleeve-drawing";
 import { useSize } from "./use-size";
 
+/** What is drawn, for a paper of such a size. */
+export interface Plan {
+  box: Box;
+  room: Room;
+  draw(view: View): ReactNode;
+}
+
 export interface LookCloselyProps {
-  made: MadeSleeve & { ok: true };
-  focus: FigureKey | null;
-  faint: boolean;
-  unit: Unit;
-  fineness: Fineness;
-  label: string;
+  plan(size: Size): Plan;
   open: boolean;
   onOpenChange(open: boolean): void;
 }
 
 /** The drawing alone on the screen, to pinch, drag and zoom. */
-export function LookClosely({ open, onOpenChange, ...rest }: LookCloselyProps) {
+export function LookClosely({ open, onOpenChange, plan }: LookCloselyProps) {
   return (
     <Dialog.Root open={open} onOpenChange={onOpenChange}>
       <Dialog.Portal>
         <Dialog.Content className="closely">
           <Paper
-            {...rest}
+            plan={plan}
             head={
               <div className="flex items-center justify-between gap-2 px-4 py-2">
                 <Dialog.Title className="font-figure text-lg font-bold">Look closely</Dialog.Title>
@@ -55,12 +62,13 @@ const panStep = 60;
 
 type PaperProps = Omit<LookCloselyProps, "open" | "onOpenChange"> & { head: ReactNode };
 
-function Paper({ faint, fineness, focus, head, label, made, unit }: PaperProps) {
+function Paper({ head, plan }: PaperProps) {
   const [ref, size] = useSize<HTMLDivElement>();
   const [moved, setMoved] = useState<View | null>(null);
   const fingers = useRef(new Map<number, Point>());
   const surface = useRef<HTMLDivElement | null>(null);
-  const fitted = size && fitView(boxOf(made.draft), size, labelRoom);
+  const planned = size && plan(size);
+  const fitted = size && planned && fitView(planned.box, size, planned.room);
   const view = moved ?? fitted;
 
   const change = (next: (view: View, fitted: View) => View) => {
@@ -129,13 +137,7 @@ function Paper({ faint, fineness, focus, head, label, made, unit }: PaperProps) 
     <div className="flex min-h-0 flex-1 flex-col" onKeyDown={keys}>
       {head}
       <div ref={ref} className="marking-paper">
-        {size && view && (
-          <SleeveDrawing
-            {...{ size, view, unit, fineness, focus, faint, label }}
-            figures={made.figures}
-            draft={made.draft}
-          />
-        )}
+        {planned && view && planned.draw(view)}
         <div
           ref={surface}
           className="absolute inset-0 cursor-grab touch-none"

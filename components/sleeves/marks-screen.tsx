@@ -11,10 +11,9 @@ import { Notice } from "@/components/ui/notice";
 import { Progress } from "@/components/ui/progress";
 import { Screen } from "@/components/ui/screen";
 import { staleness } from "@/lib/figures/staleness";
-import { type MadeSleeve } from "@/lib/drafting";
 import { ageOn } from "@/lib/people/age";
 import { type Unit } from "@/lib/records/types";
-import { markedFromRecord } from "@/lib/sleeves/make-from-record";
+import { failingSeams, type GoodSleeve, markedFromRecord } from "@/lib/sleeves/make-style-from-record";
 import { stepPictures } from "@/lib/sleeves/mark-out";
 import { sleevesQuery, type SleeveView } from "@/lib/store/queries/sleeves";
 import { AllSteps } from "./all-steps";
@@ -52,7 +51,11 @@ function MarkOut({ found, unit, workshopName }: Workplace & { found: SleeveView 
   const today = useToday();
   const handle = useDraft<Place>(`marks:${sleeve.id}`);
   const [moved, setMoved] = useState<Place | null>(null);
-  const marked = useMemo(() => markedFromRecord(sleeve.ask, unit, fineness), [sleeve.ask, unit, fineness]);
+  const { ask, style } = sleeve;
+  const marked = useMemo(
+    () => markedFromRecord({ ask, style }, unit, fineness),
+    [ask, style, unit, fineness],
+  );
   const rounded = marked && "exact" in marked && marked.rounded.ok ? marked.rounded : null;
   const pictures = useMemo(() => (rounded ? stepPictures(rounded) : []), [rounded]);
   const back = { href: `/sleeves/draft?id=${sleeve.id}`, label: sleeve.name };
@@ -110,6 +113,6 @@ function MarkOut({ found, unit, workshopName }: Workplace & { found: SleeveView 
   );
 }
 
-function wrongChecks({ checks }: MadeSleeve & { ok: true }) {
-  return checks.filter(({ verdict }) => verdict === "wrong");
+function wrongChecks(rounded: GoodSleeve) {
+  return [...failingSeams(rounded), ...rounded.checks.filter(({ verdict }) => verdict === "wrong")];
 }

@@ -2,9 +2,9 @@
 
 import { type PointerEvent, useEffect, useRef } from "react";
 import { ArrowLeft, ArrowRight, List } from "lucide-react";
-import { type Check } from "@/lib/drafting";
+import { type Phrase as PhraseParts } from "@/lib/drafting";
 import { type Fineness, type Sleeve, type Unit } from "@/lib/records/types";
-import { type StepPicture } from "@/lib/sleeves/mark-out";
+import { stageNames, type StepPicture } from "@/lib/sleeves/mark-out";
 import { Button } from "@/components/ui/button";
 import { Length, Phrase } from "@/components/ui/fraction";
 import { Notice } from "@/components/ui/notice";
@@ -22,7 +22,7 @@ export interface OneStepProps {
   back: { href: string; label: string };
   sleeve: Sleeve;
   stale?: string;
-  wrong: Check[];
+  wrong: { id: string; phrase: PhraseParts }[];
 }
 
 /** A finger must go this far across, and further across than down, px. */
@@ -33,6 +33,8 @@ export function OneStep({ back, fineness, go, pictures, place, stale, unit, wron
   const awake = useWakeLock();
   const picture = pictures[place.at]!;
   const { step } = picture;
+  // A plain sleeve is only drawn.
+  const staged = pictures.some((one) => one.step.stage !== "draw");
   const isLast = place.at === pictures.length - 1;
   const next = () => go(isLast ? { ...place, all: true } : { ...place, at: place.at + 1 });
   const before = () => place.at > 0 && go({ ...place, at: place.at - 1 });
@@ -82,7 +84,8 @@ export function OneStep({ back, fineness, go, pictures, place, stale, unit, wron
             Back
           </Button>
           <Button variant="main" className="min-h-16" full onClick={next}>
-            {isLast ? "Drawn" : "Next"} <ArrowRight aria-hidden="true" className="size-6" />
+            {isLast ? (staged ? "Done" : "Drawn") : "Next"}{" "}
+            <ArrowRight aria-hidden="true" className="size-6" />
           </Button>
         </div>
       }
@@ -111,6 +114,7 @@ export function OneStep({ back, fineness, go, pictures, place, stale, unit, wron
           <div className="flex flex-wrap items-center justify-between gap-2">
             <p className="font-semibold text-soft">
               Step {step.n} of {pictures.length}
+              {staged && <span className="block text-ink">{stageNames[step.stage]}</span>}
             </p>
             <Button
               variant="quiet"
@@ -122,7 +126,9 @@ export function OneStep({ back, fineness, go, pictures, place, stale, unit, wron
             </Button>
           </div>
           <div aria-live="polite" className="grid gap-2">
-            <p className="sr-only">Step {step.n}.</p>
+            <p className="sr-only">
+              Step {step.n}.{staged && ` ${stageNames[step.stage]}.`}
+            </p>
             {step.distance !== undefined && (
               <p>
                 <Length mm={step.distance} unit={unit} fineness={fineness} size="giant" />
@@ -152,7 +158,7 @@ function StepTrack({ at, count }: { at: number; count: number }) {
   return (
     <div
       role="progressbar"
-      aria-label="Steps drawn"
+      aria-label="Steps done"
       aria-valuemin={0}
       aria-valuemax={count}
       aria-valuenow={at + 1}

@@ -13,13 +13,20 @@ import { Screen } from "@/components/ui/screen";
 import { edit, make, newId, setRemoved } from "@/lib/journal/change";
 import { phraseText } from "@/lib/lengths/phrase";
 import { formatDay } from "@/lib/people/format-day";
-import { type MeasurementSet, type Sleeve, type SleeveFields, type Wearer } from "@/lib/records/types";
+import {
+  type MeasurementSet,
+  type Sleeve,
+  type SleeveFields,
+  type StyleId,
+  type Wearer,
+} from "@/lib/records/types";
 import { type HandleName } from "@/lib/sleeves/handles";
 import { countLine, type HeadLine, headLine } from "@/lib/sleeves/head-line";
-import { makeFromRecord } from "@/lib/sleeves/make-from-record";
+import { styleFromRecord } from "@/lib/sleeves/make-style-from-record";
 import { fieldProblems } from "@/lib/sleeves/field-problems";
 import { type FigureKey } from "@/lib/sleeves/sleeve-figures";
 import { namesOf, readForm, type SleeveForm, withFigure } from "@/lib/sleeves/sleeve-form";
+import { withStyleText } from "@/lib/sleeves/style-form";
 import { suggestedName } from "@/lib/sleeves/sleeve-name";
 import { dropDraft } from "@/lib/store/drafts";
 import { wearerCardQuery } from "@/lib/store/queries/wearers";
@@ -29,8 +36,11 @@ import { FiguresForm } from "./figures-form";
 import { HeadLineView } from "./head-line-view";
 import { backToSleeves } from "@/components/frame/not-shown";
 import { SleeveDetails } from "./sleeve-details";
+import { StyleCard } from "./style-card";
+import { StyleFigures } from "./style-figures";
 import { useLastGood } from "./use-last-good";
 import { useSavedForm } from "./use-saved-form";
+import { WalkList } from "./walk-list";
 
 export interface SleeveEditorProps {
   draftKey: string;
@@ -66,13 +76,16 @@ export function SleeveEditor(props: SleeveEditorProps) {
   const { view: chosen } = useView(wearerCardQuery, { id: form.wearerId ?? "" });
   const whose = form.wearerId === wearer?.id ? wearer : (chosen?.wearer ?? null);
   const suggested = suggestedName(whose?.name ?? null, formatDay(today, { style: "short" }));
-  const { fineness, unit } = form;
+  const { fineness, style, unit } = form;
   const read = useMemo(() => readForm(form), [form]);
-  const made = useMemo(() => (read.drawable ? makeFromRecord(read.record) : null), [read]);
-  const shown = useLastGood(made);
+  const made = useMemo(
+    () => (read.drawable ? styleFromRecord({ style, ask: read.record }) : null),
+    [read, style],
+  );
+  const shown = useLastGood(made, style);
   const line = useMemo((): HeadLine => {
     if (made) return headLine(made, read.record);
-    const bad = Object.keys(read.errors).length > 0;
+    const bad = Object.keys(read.errors).length + Object.keys(read.styleErrors).length > 0;
     return {
       verdict: "plain",
       phrase: [bad ? "Put right what is marked below, and it is drawn." : startWords(read.missing)],
@@ -80,8 +93,9 @@ export function SleeveEditor(props: SleeveEditorProps) {
   }, [made, read]);
   const beside = useMemo(() => fieldProblems(form, made, read, pressed), [form, made, read, pressed]);
   // The drawing comes first; the list of checks may follow in the frame after.
-  const checks = useDeferredValue(made?.ok ? made.checks : null);
   const laterMade = useDeferredValue(made);
+  const walked = laterMade?.ok ? laterMade : null;
+  const block = walked ?? (laterMade && !laterMade.ok ? laterMade.block : null);
   const laterBeside = useDeferredValue(beside);
 
   // Fields that are empty are only marked once Keep was pressed, a moment after it.
@@ -97,9 +111,15 @@ export function SleeveEditor(props: SleeveEditorProps) {
     setFocus(name);
     setForm((now) => withFigure(now, name, mm));
   }, []);
+  const onStyleType = useCallback((key: string, text: string) => {
+    setFocus(null);
+    setForm((now) => withStyleText(now, key, text));
+  }, []);
+  const onStyle = useCallback((chosen: StyleId) => setForm((now) => ({ ...now, style: chosen })), []);
   const onPatch = useCallback((patch: (now: SleeveForm) => SleeveForm) => setForm(patch), []);
 
-  const blocked = !made?.ok || Object.keys(read.errors).length > 0 || read.markErrors.length > 0;
+  const unread = [...Object.keys(read.errors), ...Object.keys(read.styleErrors), ...read.markErrors];
+  const blocked = !made?.ok || unread.length > 0;
   const keepIt = async (then: "marks" | "stay") => {
     setPressed(true);
     if (blocked) {
@@ -111,7 +131,7 @@ export function SleeveEditor(props: SleeveEditorProps) {
       wearerId: form.wearerId,
       setId: form.setId,
       name: form.name.trim() || suggested,
-      style: "plain",
+      style,
       ask: read.record,
       fineness,
       note: form.note.trim(),
@@ -172,16 +192,29 @@ export function SleeveEditor(props: SleeveEditorProps) {
           onFigure={onHandle}
         />
         <div className="sleeve-form grid min-w-0 grid-cols-[minmax(0,1fr)] content-start gap-5">
+          <StyleCard style={style} onChoose={onStyle} />
           <FiguresForm
             {...{ form, set, wearer, today }}
             beside={laterBeside}
-            made={laterMade}
+            made={block}
             isNew={!sleeve}
             onType={onType}
             onFocusFigure={setFocus}
             onPatch={onPatch}
-          />
-          {checks && <ChecksList checks={checks} unit={unit} fineness={fineness} sub={countLine(checks)} />}
+          >
+            <StyleFigures
+              {...{ form, onPatch }}
+              beside={laterBeside}
+              shown={laterMade?.shown ?? []}
+              onType={onStyleType}
+            />
+          </FiguresForm>
+          {walked && walked.seams.length > 0 && (
+            <WalkList {...{ unit, fineness }} seams={walked.seams} gathers={walked.gathers} />
+          )}
+          {walked && (
+            <ChecksList checks={walked.checks} {...{ unit, fineness }} sub={countLine(walked.checks)} />
+          )}
           {laterBeside.general.map((text, i) => (
             <Notice key={i} tone="wrong" title={<Phrase parts={text} unit={unit} fineness={fineness} />} />
           ))}

@@ -15,7 +15,8 @@ import { Screen } from "@/components/ui/screen";
 import { type Unit } from "@/lib/records/types";
 import { mostCompared } from "@/lib/sleeves/compare";
 import { headLine } from "@/lib/sleeves/head-line";
-import { makeFromRecord } from "@/lib/sleeves/make-from-record";
+import { styleFromRecord } from "@/lib/sleeves/make-style-from-record";
+import { styleName } from "@/lib/sleeves/style-names";
 import { sleeveListQuery, type SleeveView } from "@/lib/store/queries/sleeves";
 import { SleeveThumb } from "./sleeve-thumb";
 
@@ -41,11 +42,19 @@ export function SleeveListScreen() {
       title="Sleeves"
       wide
       tools={
-        items.length > 1 && (
-          <Button onClick={() => setChosen((now) => (now ? null : []))}>
-            {chosen ? "Stop choosing" : "Compare"}
-          </Button>
-        )
+        <>
+          <ButtonLink variant="quiet" href="/sleeves/many">
+            One style for many
+          </ButtonLink>
+          <ButtonLink variant="quiet" href="/sums">
+            Sewing sums
+          </ButtonLink>
+          {items.length > 1 && (
+            <Button onClick={() => setChosen((now) => (now ? null : []))}>
+              {chosen ? "Stop choosing" : "Compare"}
+            </Button>
+          )}
+        </>
       }
       action={
         chosen ? (
@@ -119,18 +128,19 @@ interface SleeveRowProps {
 const short = { good: "Goes in", look: "Goes in; look", wrong: "Does not go in", plain: "" } as const;
 
 function SleeveRow({ choosing, chosen, item: { sleeve, wearer }, onToggle, unit }: SleeveRowProps) {
-  const made = useMemo(() => makeFromRecord(sleeve.ask), [sleeve.ask]);
+  const { ask, style } = sleeve;
+  const made = useMemo(() => styleFromRecord({ ask, style }), [ask, style]);
   const verdict = made ? headLine(made, sleeve.ask).verdict : "wrong";
   const says = made?.ok ? short[verdict] : "Cannot be drawn";
   const inside = (
     <>
       <span className="flex w-16 shrink-0 justify-center">
-        {made?.ok && <SleeveThumb draft={made.draft} />}
+        {made?.ok && <SleeveThumb pieces={made.pieces} />}
       </span>
       <span className="min-w-0 flex-1">
         <span className="block font-semibold wrap-anywhere">{sleeve.name}</span>
         <span className="block text-sm text-soft wrap-anywhere">
-          {wearer?.name ?? "Nobody’s yet"}
+          {styleName(style)}, {wearer?.name ?? "nobody’s yet"}
           {made?.ok && (
             <>
               {", "}

@@ -1,25 +1,33 @@
-import { memo } from "react";
-import { type SleeveDraft } from "@/lib/drafting";
-import { boxOf, outlineOf } from "@/lib/sleeves/drawing-paths";
+import { memo, useMemo } from "react";
+import { type PatternPiece } from "@/lib/drafting";
+import { outlineOf } from "@/lib/sleeves/drawing-paths";
+import { layPieces } from "@/lib/sleeves/lay-pieces";
 
-/** A sleeve the size of a word. It says nothing: the row beside it does. */
-export const SleeveThumb = memo(function SleeveThumb({ draft }: { draft: SleeveDraft }) {
-  const { h, w, x, y } = boxOf(draft);
-  const edge = Math.max(w, h) * 0.04;
+/** Between the pieces, mm. */
+const GAP = 25;
+
+/** The pieces of a sleeve, the size of a word. It says nothing: the row beside it does. */
+export const SleeveThumb = memo(function SleeveThumb({ pieces }: { pieces: readonly PatternPiece[] }) {
+  const { box, laid } = useMemo(() => layPieces(pieces, 1, GAP), [pieces]);
+  const edge = Math.max(box.w, box.h) * 0.04;
   return (
     <svg
       aria-hidden="true"
-      viewBox={`${x - edge} ${y - edge} ${w + 2 * edge} ${h + 2 * edge}`}
+      viewBox={`${box.x - edge} ${box.y - edge} ${box.w + 2 * edge} ${box.h + 2 * edge}`}
       className="size-16"
     >
-      <path
-        d={outlineOf(draft.piece)}
-        fill="var(--well)"
-        stroke="var(--ink)"
-        strokeWidth="2"
-        strokeLinejoin="round"
-        vectorEffect="non-scaling-stroke"
-      />
+      {laid.map(({ by, piece }) => (
+        <path
+          key={piece.id}
+          d={outlineOf(piece)}
+          transform={`translate(${by.x} ${by.y})`}
+          fill="var(--well)"
+          stroke="var(--ink)"
+          strokeWidth="2"
+          strokeLinejoin="round"
+          vectorEffect="non-scaling-stroke"
+        />
+      ))}
     </svg>
   );
 });

@@ -26,19 +26,19 @@ export const StepDrawing = memo(function StepDrawing({ className, picture }: Ste
       {size && view && (
         <svg width={size.width} height={size.height} className="block">
           <g transform={`translate(${view.x} ${view.y}) scale(${view.scale})`}>
-            {before.map(({ curves, name }, i) => (
+            {before.map(({ curves, weight }, i) => (
               <path
-                key={`${name}${i}`}
+                key={i}
                 d={pathOf(curves)}
                 fill="none"
-                stroke={isCut(name) ? "var(--ink)" : "var(--chalk)"}
-                strokeWidth={isCut(name) ? 2 : 1.25}
+                stroke={weight === "cut" ? "var(--ink)" : "var(--chalk)"}
+                strokeWidth={weight === "cut" ? 2 : 1.25}
                 vectorEffect="non-scaling-stroke"
               />
             ))}
-            {fresh.map(({ curves, name }, i) => (
+            {fresh.map(({ curves }, i) => (
               <path
-                key={`${name}${i}`}
+                key={i}
                 d={pathOf(curves)}
                 fill="none"
                 stroke="var(--ink)"
@@ -59,10 +59,10 @@ export const StepDrawing = memo(function StepDrawing({ className, picture }: Ste
               />
             ))}
           </g>
-          {points.map((point) => {
+          {points.map((point, i) => {
             const at = toScreen(view, point);
             return (
-              <g key={point.name}>
+              <g key={i}>
                 <circle
                   cx={at.x}
                   cy={at.y}
@@ -84,10 +84,6 @@ export const StepDrawing = memo(function StepDrawing({ className, picture }: Ste
     </div>
   );
 });
-
-function isCut(name: string): boolean {
-  return name === "hemLine" || /^(cap|underarm)(Front|Back)$/u.test(name);
-}
 
 interface PointLabelProps {
   at: Point;

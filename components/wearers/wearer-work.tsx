@@ -2,6 +2,7 @@ import { ButtonLink } from "@/components/ui/button";
 import { Card, RowLink, Rows } from "@/components/ui/card";
 import { formatDay } from "@/lib/people/format-day";
 import { type Sleeve, type Wearer } from "@/lib/records/types";
+import { styleName } from "@/lib/sleeves/style-names";
 import { type WearerCardView } from "@/lib/store/queries/wearers";
 
 /** What is being sewn for a wearer, and the sleeves drafted from the figures. */
@@ -54,7 +55,7 @@ export function WearerWork({
                   key={sleeve.id}
                   href={`/sleeves/marks?id=${sleeve.id}`}
                   title={sleeve.name}
-                  sub={sleeve.note}
+                  sub={[styleName(sleeve.style), sleeve.note].filter(Boolean).join(". ")}
                 />
               ))}
             </Rows>

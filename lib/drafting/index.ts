@@ -14,7 +14,7 @@ export type {
 } from "@/lib/drafting/types";
 export type { LineName, PointName, SleeveDraft } from "@/lib/drafting/basic-sleeve";
 export type { Check, Verdict } from "@/lib/drafting/checks";
-export type { MadeStyle, StyleAsk } from "@/lib/drafting/make-style";
+export type { MadeStyle } from "@/lib/drafting/make-style";
 export type {
   Cloth,
   Gather,
@@ -26,7 +26,6 @@ export type {
 export type { StyleFigure } from "@/lib/drafting/styles/context";
 export { makeStyle } from "@/lib/drafting/make-style";
 export { recipes } from "@/lib/drafting/styles";
-export type { MadeSleeve } from "@/lib/drafting/make-sleeve";
 export type { MarkStep } from "@/lib/drafting/mark-steps";
 export { draftBasicSleeve } from "@/lib/drafting/basic-sleeve";
 export { defaultBeside, defaultMarks, defaultNotches, INCH } from "@/lib/drafting/guide";

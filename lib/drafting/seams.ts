@@ -71,9 +71,9 @@ function meets(joining: Joining, difference: number): boolean {
   return Math.abs(difference - joining.by) <= LINE_WIDTH;
 }
 
-/** "2.5 : 1". */
+/** "2.5 : 1", which does not break over a line. */
 export function ratioWords(ratio: number): string {
-  return `${Math.round(ratio * 10) / 10} : 1`;
+  return `${Math.round(ratio * 10) / 10}\u00a0:\u00a01`;
 }
 
 function nothing(joining: Joining, difference: number): Phrase {

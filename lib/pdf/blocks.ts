@@ -26,6 +26,8 @@ export type Item =
         readonly width: number;
         readonly colour: Colour;
         readonly dash?: readonly number[];
+        /** How far into the dashes the line starts, points. */
+        readonly phase?: number;
       };
     };
 

@@ -1,5 +1,6 @@
 /** Printing as a screen asks for it. The worker is started for the first paper and let go when it has been idle. */
 import { proxy, releaseProxy, type Remote, wrap } from "comlink";
+import { type FullSizeJob } from "@/lib/pdf/full-size-document";
 import { type MarksDocument } from "@/lib/pdf/marks-document";
 import { type MarksPaper, type ReceiptPaper } from "@/lib/pdf/papers";
 import { type OnProgress, type PdfApi, printProblem } from "@/lib/pdf/pdf-api";
@@ -69,3 +70,7 @@ export const makeReceipt = (
 /** A sheet of marks as a PDF. @throws Error; `sayPrintProblem` has the words for the user. */
 export const makeMarks = (doc: MarksDocument, paper: MarksPaper, onProgress?: OnProgress): Promise<Blob> =>
   ask((api) => api.marks(doc, paper, told(onProgress)));
+
+/** Patterns at full size as a PDF. @throws Error; `sayPrintProblem` has the words for the user. */
+export const makeFullSize = (job: FullSizeJob, onProgress?: OnProgress): Promise<Blob> =>
+  ask((api) => api.fullSize(job, told(onProgress)));

@@ -43,3 +43,38 @@ export type MarksPaper = keyof typeof marksPapers;
 
 /** The width that may be printed on. */
 export const inner = (paper: Paper): number => paper.width - paper.margin.left - paper.margin.right;
+
+/** A pattern at full size: sheets, or a roll by its width in millimetres. */
+export type FullSizePaper = "a4" | "letter" | "a3" | `roll-${number}`;
+
+/** Common widths of paper for plotters, mm. */
+export const rollWidths = [610, 914] as const;
+
+/** What a roll may be wide, mm: room for the head of the first sheet, and no more than a PDF page can be. */
+export const ROLL_LIMITS = { least: 210, most: 2000 } as const;
+
+const full = (name: string, width: number, height?: number): Paper => ({
+  name,
+  width,
+  ...(height !== undefined && { height }),
+  margin: all(10 * MM),
+});
+
+/** Margins of 10 mm on every side. @throws RangeError for a roll outside `ROLL_LIMITS`. */
+export function fullSizePaper(paper: FullSizePaper): Paper {
+  if (paper === "a4") return full("A4", 210 * MM, 297 * MM);
+  if (paper === "letter") return full("Letter", 612, 792);
+  if (paper === "a3") return full("A3", 297 * MM, 420 * MM);
+  const width = Number(paper.slice("roll-".length));
+  if (!(width >= ROLL_LIMITS.least && width <= ROLL_LIMITS.most))
+    throw new RangeError(`No roll is ${paper.slice("roll-".length)} mm wide.`);
+  return full(`Roll, ${width} mm`, width * MM);
+}
+
+/** Whether a text, such as a remembered one, names a paper for full size. */
+export function isFullSizePaper(text: string): text is FullSizePaper {
+  const width = /^roll-(\d+(?:\.\d+)?)$/.exec(text)?.[1];
+  return width === undefined
+    ? ["a4", "letter", "a3"].includes(text)
+    : Number(width) >= ROLL_LIMITS.least && Number(width) <= ROLL_LIMITS.most;
+}

@@ -1,4 +1,5 @@
 /** What the printing worker does for a tab. */
+import { type FullSizeJob } from "@/lib/pdf/full-size-document";
 import { type MarksDocument } from "@/lib/pdf/marks-document";
 import { type MarksPaper, type ReceiptPaper } from "@/lib/pdf/papers";
 import { type ReceiptDocument } from "@/lib/pdf/receipt-document";
@@ -8,6 +9,7 @@ export type OnProgress = (done: number, of: number) => void;
 export interface PdfApi {
   receipt(doc: ReceiptDocument, paper: ReceiptPaper, onProgress?: OnProgress): Promise<ArrayBuffer>;
   marks(doc: MarksDocument, paper: MarksPaper, onProgress?: OnProgress): Promise<ArrayBuffer>;
+  fullSize(job: FullSizeJob, onProgress?: OnProgress): Promise<ArrayBuffer>;
 }
 
 /** Errors with this name carry a sentence for the user. A class would not survive the way between threads. */

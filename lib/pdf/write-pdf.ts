@@ -60,7 +60,7 @@ function drawPath(pdf: jsPDF, { steps, fill, stroke }: Extract<Item, { kind: "pa
   if (stroke) {
     pdf.setDrawColor(...stroke.colour);
     pdf.setLineWidth(stroke.width);
-    pdf.setLineDashPattern([...(stroke.dash ?? [])], 0);
+    pdf.setLineDashPattern([...(stroke.dash ?? [])], stroke.phase ?? 0);
   }
   pdf.path(steps.map(({ op, c }) => ({ op, c: [...c] })));
   if (fill && stroke) pdf.fillStroke();

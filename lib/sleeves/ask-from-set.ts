@@ -4,7 +4,7 @@ import { formatLength } from "@/lib/lengths/format-length";
 import { type Phrase } from "@/lib/lengths/phrase";
 import { mmPerInch } from "@/lib/lengths/units";
 import { type Fineness, type Unit } from "@/lib/records/types";
-import { grownArmMm, usualBicepsEase } from "@/lib/sleeves/make-from-record";
+import { grownArmMm, usualBicepsEase } from "@/lib/sleeves/ask-from-record";
 import { type Reach, reaches } from "@/lib/sleeves/reach";
 import { type FigureKey } from "@/lib/sleeves/sleeve-figures";
 import { type SleeveForm } from "@/lib/sleeves/sleeve-form";

@@ -1,7 +1,7 @@
 /** Sleeves side by side: their figures, and how each differs from the first. */
-import { type MadeSleeve } from "@/lib/drafting";
 import { type SleeveAskRecord } from "@/lib/records/types";
 import { armholeOfRecord } from "@/lib/sleeves/head-line";
+import { type GoodSleeve as Good, type StyledSleeve } from "@/lib/sleeves/make-style-from-record";
 
 /** As many as can be told apart when they lie on each other. */
 export const mostCompared = 4;
@@ -16,10 +16,8 @@ export interface ComparedRow {
 
 interface Compared {
   record: SleeveAskRecord;
-  made: MadeSleeve | null;
+  made: StyledSleeve | null;
 }
-
-type Good = MadeSleeve & { ok: true };
 
 const rows: readonly (readonly [string, (made: Good, record: SleeveAskRecord) => number | undefined])[] = [
   ["Sleeve length", ({ figures }) => figures.length],
@@ -33,6 +31,7 @@ const rows: readonly (readonly [string, (made: Good, record: SleeveAskRecord) =>
   ["Armhole", (_, record) => armholeOfRecord(record)],
   ["Head ease", ({ draft }, record) => minus(draft.lengths.cap, armholeOfRecord(record))],
   ["Underarm seam", ({ draft }) => draft.lengths.underarmFront],
+  ["Head before gathering", ({ gathers }) => gathers.find(({ id }) => id === "head")?.full],
 ];
 
 function minus(a: number, b: number | undefined): number | undefined {

@@ -28,17 +28,21 @@ export function outlineOf(piece: Pick<Piece, "edges">): string {
   return `${pathOf(piece.edges.flatMap((edge) => edge.curves))}Z`;
 }
 
-export function edgePath(piece: Pick<Piece, "edges">, name: EdgeName): string {
+export function edgePath(piece: Pick<Piece, "edges">, name: string): string {
   return pathOf(piece.edges.find((edge) => edge.name === name)?.curves ?? []);
+}
+
+export function boxOfCurves(curves: readonly CubicBezier[]): Box {
+  const { max, min } = bounds(curves);
+  return { x: min.x, y: min.y, w: max.x - min.x, h: max.y - min.y };
 }
 
 /** The box of everything that is drawn. */
 export function boxOf({ guides, piece }: Pick<SleeveDraft, "guides" | "piece">): Box {
-  const { max, min } = bounds([
+  return boxOfCurves([
     ...piece.edges.flatMap((edge) => edge.curves),
     ...guides.flatMap((guide) => guide.curves),
   ]);
-  return { x: min.x, y: min.y, w: max.x - min.x, h: max.y - min.y };
 }
 
 export function unionOf(boxes: readonly Box[]): Box {

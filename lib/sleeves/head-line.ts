@@ -1,7 +1,9 @@
 /** What is said of a sleeve before anything else: whether it goes into the armhole. */
-import { type Check, type MadeSleeve, type Verdict } from "@/lib/drafting";
+import { type Check, type Gather, type StyleCheck, type Verdict } from "@/lib/drafting";
+import { ratioWords } from "@/lib/drafting/seams";
 import { type Phrase } from "@/lib/lengths/phrase";
 import { type SleeveAskRecord } from "@/lib/records/types";
+import { failingSeams, type GoodSleeve, type StyledSleeve } from "@/lib/sleeves/make-style-from-record";
 
 export interface HeadLine {
   /** "plain": nothing is known of the armhole. */
@@ -16,11 +18,57 @@ export function armholeOfRecord({ lengths }: SleeveAskRecord): number | undefine
   return armholeWhole?.mm;
 }
 
-export function headLine(made: MadeSleeve, record: SleeveAskRecord): HeadLine {
+export function headLine(made: StyledSleeve, record: SleeveAskRecord): HeadLine {
   if (!made.ok)
     return { verdict: "wrong", phrase: ["Cannot be drawn. ", ...(made.problems[0]?.phrase ?? [])] };
-  const armhole = armholeOfRecord(record);
-  const { cap } = made.draft.lengths;
+  const head = made.gathers.find(({ id }) => id === "head");
+  const line = head ? gatheredHead(made, record, head) : easedHead(made, record);
+  if (line.verdict === "wrong") return line;
+  const [failing] = failingSeams(made);
+  if (failing) return { verdict: "wrong", phrase: ["Does not go together: ", ...failing.phrase] };
+  return line;
+}
+
+const starting = (words: string): string => `${words[0]!.toUpperCase()}${words.slice(1)}`;
+
+/** "1.7 : 1", not to be broken. */
+export function ratioOf({ full, pulledTo }: Pick<Gather, "full" | "pulledTo">): string {
+  return ratioWords(full / pulledTo).replaceAll(" ", "\u00A0");
+}
+
+/** The fullness is gathered away, so that it is the gathers that say whether it goes in. */
+function gatheredHead({ checks }: GoodSleeve, record: SleeveAskRecord, head: Gather): HeadLine {
+  const into: Phrase = [", ", { mm: head.full }, " into ", { mm: head.pulledTo }];
+  const check = checks.find(({ id }) => id === "gather-head");
+  if (check?.verdict === "wrong")
+    return {
+      verdict: "wrong",
+      phrase: [
+        "Does not go in: the head ",
+        { mm: head.full },
+        " is too short for ",
+        { mm: head.pulledTo },
+        ".",
+      ],
+    };
+  if (armholeOfRecord(record) === undefined)
+    return {
+      verdict: "plain",
+      phrase: [`Head gathered ${ratioOf(head)}. Type the armhole below to see whether it goes in.`],
+    };
+  const look = check?.verdict === "look";
+  const how = look ? (head.full < (check.low ?? 0) ? " – hardly gathered" : " – much for the cloth") : "";
+  return {
+    verdict: look ? "look" : "good",
+    phrase: [`Goes in: head gathered ${ratioOf(head)}`, ...into, `${how}.`],
+  };
+}
+
+/** The cap is eased into the armhole. */
+function easedHead(made: GoodSleeve, record: SleeveAskRecord): HeadLine {
+  // A style's own seam may be a part of both: a cap sleeve has nothing under the arm.
+  const seam = made.seams.find(({ id }) => id === "head");
+  const [cap, armhole] = seam?.lengths ?? [made.draft.lengths.cap, armholeOfRecord(record)];
   if (armhole === undefined)
     return {
       verdict: "plain",
@@ -46,21 +94,29 @@ export function headLine(made: MadeSleeve, record: SleeveAskRecord): HeadLine {
       ],
     };
   const look = head?.verdict === "look";
+  const verdict = look ? "look" : "good";
   const how = look ? (ease < (head.low ?? 0) ? " – little" : " – much") : "";
-  return {
-    verdict: look ? "look" : "good",
-    phrase: ["Goes into the armhole", ...measured, "ease ", { mm: ease }, `${how}.`],
-  };
+  const [gather] = made.gathers;
+  if (gather)
+    return {
+      verdict,
+      phrase: [
+        "Goes in, ease ",
+        { mm: ease },
+        `${how}. ${starting(gather.words)} gathered ${ratioOf(gather)}.`,
+      ],
+    };
+  return { verdict, phrase: ["Goes into the armhole", ...measured, "ease ", { mm: ease }, `${how}.`] };
 }
 
 /** Checks sorted for reading: what is wrong first. The cutter's order stands within each. */
-export function sortedChecks(checks: readonly Check[]): Record<Verdict, Check[]> {
+export function sortedChecks(checks: readonly StyleCheck[]): Record<Verdict, StyleCheck[]> {
   const of = (verdict: Verdict) => checks.filter((check) => check.verdict === verdict);
   return { wrong: of("wrong"), look: of("look"), good: of("good") };
 }
 
 /** "1 wrong, 2 to look at, 8 good". */
-export function countLine(checks: readonly Check[]): string {
+export function countLine(checks: readonly StyleCheck[]): string {
   const { good, look, wrong } = sortedChecks(checks);
   return [
     wrong.length > 0 && `${wrong.length} wrong`,

@@ -1,26 +1,32 @@
 /** The sheet of marks: everything the screen says, as text in the workshop's unit. */
-import { type CubicBezier, type MadeSleeve } from "@/lib/drafting";
+import { type CubicBezier, type Point } from "@/lib/drafting";
 import { formatPlain } from "@/lib/lengths/format-length";
 import { type Phrase, phraseText } from "@/lib/lengths/phrase";
 import { type IsoDate } from "@/lib/people/iso-date";
+import { clip } from "@/lib/pdf/bezier-clip";
 import {
   type DrawingLine,
   type DrawingPoint,
-  type LineWeight,
   type MarksDocument,
   type MarksStep,
 } from "@/lib/pdf/marks-document";
 import { type Sleeve, type Unit } from "@/lib/records/types";
 import { armholeOfRecord } from "@/lib/sleeves/head-line";
-import { roundingPhrase, type StepPicture, stepPictures } from "@/lib/sleeves/mark-out";
-
-type Good = MadeSleeve & { ok: true };
+import { failingSeams, type GoodSleeve } from "@/lib/sleeves/make-style-from-record";
+import {
+  type DrawnLine,
+  roundingPhrase,
+  stageNames,
+  type StepPicture,
+  stepPictures,
+} from "@/lib/sleeves/mark-out";
+import { styleName } from "@/lib/sleeves/style-names";
 
 export interface MarksSheet {
   sleeve: Pick<Sleeve, "name" | "ask" | "fineness">;
-  exact: Good;
+  exact: GoodSleeve;
   /** The sleeve of the rounded marks: all that the sheet says is of this one. */
-  rounded: Good;
+  rounded: GoodSleeve;
   /** mm. */
   step: number;
   unit: Unit;
@@ -38,10 +44,11 @@ export function marksDocument(sheet: MarksSheet): MarksDocument {
   const { author, exact, rounded, sleeve, stale, step, today, unit, wearerName } = sheet;
   const text = (phrase: readonly (string | { readonly mm: number })[]) =>
     phraseText([...phrase] as Phrase, unit, sleeve.fineness);
-  const wrong = rounded.checks.filter(({ verdict }) => verdict === "wrong");
+  const wrong = [...failingSeams(rounded), ...rounded.checks.filter(({ verdict }) => verdict === "wrong")];
+  const pictures = stepPictures(rounded);
   return {
     title: sleeve.name,
-    subtitle: "Marks of a plain sleeve, in the order they are drawn",
+    subtitle: `${styleName(rounded.style)}. Marks in the order they are drawn`,
     wearer: wearerName,
     date: today,
     figures: figuresOf(sheet),
@@ -51,11 +58,19 @@ export function marksDocument(sheet: MarksSheet): MarksDocument {
       ...(stale ? [stale] : []),
       text(roundingPhrase(exact, rounded, step)).replace("The checks here", "The checks on this sheet"),
     ],
-    steps: stepPictures(rounded).map((picture) => stepOf(picture, text(picture.step.phrase))),
-    checks: rounded.checks.map(({ phrase, remedy, verdict }) => ({
-      text: verdict === "good" ? text(phrase) : `${text(phrase)} ${text(remedy)}`,
-      verdict,
-    })),
+    steps: pictures.map((picture, i) =>
+      stepOf(picture, `${stageWords(pictures, i)}${text(picture.step.phrase)}`),
+    ),
+    checks: [
+      ...rounded.seams.map(({ agrees, phrase, remedy }) => ({
+        text: agrees ? text(phrase) : `${text(phrase)} ${text(remedy)}`,
+        verdict: agrees ? ("good" as const) : ("wrong" as const),
+      })),
+      ...rounded.checks.map(({ phrase, remedy, verdict }) => ({
+        text: verdict === "good" ? text(phrase) : `${text(phrase)} ${text(remedy)}`,
+        verdict,
+      })),
+    ],
     lang: "en-GB",
     author,
     tape: unit === "in" ? "inch" : "cm",
@@ -81,24 +96,35 @@ function figuresOf({ rounded, sleeve, unit }: MarksSheet): { name: string; text:
   );
 }
 
-/** The outline is cut along; everything else on the paper guides. */
-function weightOf(name: string): LineWeight {
-  return name === "hemLine" || /^(cap|underarm)(Front|Back)$/u.test(name) ? "cut" : "guide";
+/** "At the machine: " before the first step of a stage; the steps that draw say so themselves. */
+function stageWords(pictures: readonly StepPicture[], i: number): string {
+  const stage = pictures[i]!.step.stage;
+  const changes = stage !== "draw" && pictures[i - 1]?.step.stage !== stage;
+  return changes ? `${stageNames[stage]}: ` : "";
 }
 
+/** Lines run on this far beyond what is shown, of its height: that there is more is seen, and no other step is drawn over. */
+const beyond = 0.06;
+
 function stepOf({ before, box, fresh, measured, points, step }: StepPicture, text: string): MarksStep {
+  const past = box.h * beyond;
+  const paper = { x: box.x - past, y: box.y - past, w: box.w + 2 * past, h: box.h + 2 * past };
+  const shown = ({ curves }: Pick<DrawnLine, "curves">): CubicBezier[] =>
+    clip(curves, paper).flatMap((run) => [...run.curves]);
   const lines: DrawingLine[] = [
-    ...before.map(({ curves, name }) => ({ d: [...curves] as CubicBezier[], weight: weightOf(name) })),
+    ...before.map((line) => ({ d: shown(line), weight: line.weight })),
     ...measured.map(({ from, to }) => ({ d: [[from, to] as const], weight: "new" as const })),
-    ...fresh.map(({ curves }) => ({ d: [...curves] as CubicBezier[], weight: "new" as const })),
+    ...fresh.map((line) => ({ d: shown(line), weight: "new" as const })),
   ];
+  const onPaper = ({ x, y }: Point) =>
+    x >= paper.x && x <= paper.x + paper.w && y >= paper.y && y <= paper.y + paper.h;
   return {
     n: step.n,
     text,
     drawing: {
       viewBox: box,
-      lines,
-      points: points.map(({ fresh: isNew, words, x, y }): DrawingPoint => ({
+      lines: lines.filter(({ d }) => d.length > 0),
+      points: points.filter(onPaper).map(({ fresh: isNew, words, x, y }): DrawingPoint => ({
         x,
         y,
         ...(isNew && { new: true }),

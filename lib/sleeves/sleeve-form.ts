@@ -11,8 +11,16 @@ import {
 import { marksOf, type MarkProblem, markTexts, type MarkText } from "@/lib/sleeves/guide-marks";
 import { type Reach } from "@/lib/sleeves/reach";
 import { type FigureKey, sleeveFigure, sleeveFigures } from "@/lib/sleeves/sleeve-figures";
+import {
+  emptyStyleForm,
+  readStyle,
+  type ReadStyle,
+  type StyleForm,
+  styleFormOf,
+  styleTypedAgain,
+} from "@/lib/sleeves/style-form";
 
-export interface SleeveForm {
+export interface SleeveForm extends StyleForm {
   /** The unit that a bare number was typed in. */
   unit: Unit;
   name: string;
@@ -36,6 +44,7 @@ export interface SleeveForm {
 
 export function emptyForm(unit: Unit, fineness: Fineness): SleeveForm {
   return {
+    ...emptyStyleForm,
     unit,
     name: "",
     wearerId: null,
@@ -59,6 +68,7 @@ export function formOfSleeve(sleeve: Sleeve, unit: Unit): SleeveForm {
   for (const { key } of sleeveFigures) form.typed[key] = typedAgain(lengths[key], unit, sleeve.fineness);
   return {
     ...form,
+    ...styleFormOf(sleeve.style, sleeve.ask, (length) => typedAgain(length, unit, sleeve.fineness)),
     name: sleeve.name,
     wearerId: sleeve.wearerId,
     setId: sleeve.setId,
@@ -90,7 +100,13 @@ export function formInUnit(form: SleeveForm, unit: Unit): SleeveForm {
   ) as Record<FigureKey, string>;
   const marks = (texts: MarkText[] | null) =>
     texts && texts.map((mark) => ({ ...mark, outTyped: mark.outTyped && again(mark.outTyped) }));
-  return { ...form, unit, typed, marks: { front: marks(form.marks.front), back: marks(form.marks.back) } };
+  return {
+    ...form,
+    unit,
+    typed,
+    styleTyped: styleTypedAgain(form.styleTyped, again),
+    marks: { front: marks(form.marks.front), back: marks(form.marks.back) },
+  };
 }
 
 /** A form that was put down earlier, in this unit; what it has not got is as on an empty one. */
@@ -146,6 +162,8 @@ export interface ReadForm {
   /** What to type instead, by field. */
   errors: Partial<Record<FigureKey, string>>;
   markErrors: MarkProblem[];
+  /** The same for the style's figures. */
+  styleErrors: ReadStyle["errors"];
   /** Needed, and not there yet. */
   missing: FigureKey[];
   /** Every needed figure could be read: there is something to draw. */
@@ -171,11 +189,19 @@ export function readForm(form: SleeveForm): ReadForm {
         `Type ${sleeveFigure(other).said} as well, or empty both: half an armhole cannot be checked.`;
   }
   const needed = figuresNeeded(form);
+  const style = readStyle(form);
   const front = marksOf(form.marks.front, "front", form.unit);
   const back = marksOf(form.marks.back, "back", form.unit);
   return {
-    record: { lengths, frontMarks: front.marks, backMarks: back.marks, hemOpens: form.hemOpens },
+    record: {
+      lengths,
+      frontMarks: front.marks,
+      backMarks: back.marks,
+      hemOpens: form.hemOpens,
+      ...style.ask,
+    },
     errors,
+    styleErrors: style.errors,
     markErrors: [...front.problems, ...back.problems],
     missing: needed.filter((key) => form.typed[key].trim() === ""),
     drawable: needed.every((key) => lengths[key] !== undefined),

@@ -36,11 +36,13 @@ async function addresses(page: Page, url: string): Promise<Map<string, string>> 
       if (found.get(wanted)?.includes("id=")) return;
     }
   };
-  for (const path of ["/", "/clients", "/orders", "/sleeves", "/settings"]) await look(path);
+  for (const path of ["/", "/clients", "/orders", "/sleeves", "/sums", "/settings"]) await look(path);
   await lookFor("/clients", "/clients/card", "/wearers/card");
   await lookFor(found.get("/clients/card")!, "/wearers/card", "/measure/set");
   await look(found.get("/measure/set"));
   await lookFor("/orders", "/orders/card", "/orders/receipt");
+  const wearer = /id=([^&]+)/.exec(found.get("/wearers/card") ?? "")?.[1];
+  if (wearer) found.set("/sleeves/many", `/sleeves/many?ids=${wearer}`);
   const [a, b] = await page.evaluate(() => [] as string[]).then(() => sleeveIds(page, url));
   if (a && b) found.set("/sleeves/compare", `/sleeves/compare?ids=${a},${b}`);
   if (a)

@@ -1,5 +1,5 @@
 /** `npm run mutate`: changes the engine in small ways and counts the changes that no test notices. */
-export default {
+const config = {
   packageManager: "npm",
   plugins: ["@stryker-mutator/vitest-runner"],
   testRunner: "vitest",
@@ -16,3 +16,5 @@ export default {
   jsonReporter: { fileName: "tests/.output/mutation.json" },
   thresholds: { high: 85, low: 70, break: null },
 };
+
+export default config;

@@ -6,31 +6,24 @@ declare module "clipper-lib" {
   }
   type Path = IntPoint[];
   type Paths = Path[];
-  class Clipper {
+  interface Clipper {
     AddPath(path: Path, kind: number, closed: boolean): boolean;
     AddPaths(paths: Paths, kind: number, closed: boolean): boolean;
     Execute(clip: number, solution: Paths, subjectFill: number, clipFill: number): boolean;
-    static Area(path: Path): number;
   }
-  class ClipperOffset {
-    constructor(miterLimit?: number, arcTolerance?: number);
+  interface ClipperOffset {
     AddPath(path: Path, join: number, end: number): void;
     AddPaths(paths: Paths, join: number, end: number): void;
     Execute(solution: Paths, delta: number): void;
   }
-  const PolyType: { ptSubject: number; ptClip: number };
-  const PolyFillType: { pftEvenOdd: number; pftNonZero: number };
-  const ClipType: { ctIntersection: number; ctUnion: number; ctDifference: number; ctXor: number };
-  const JoinType: { jtSquare: number; jtRound: number; jtMiter: number };
-  const EndType: { etClosedPolygon: number };
   const lib: {
-    Clipper: typeof Clipper;
-    ClipperOffset: typeof ClipperOffset;
-    PolyType: typeof PolyType;
-    PolyFillType: typeof PolyFillType;
-    ClipType: typeof ClipType;
-    JoinType: typeof JoinType;
-    EndType: typeof EndType;
+    Clipper: { new (): Clipper; Area(path: Path): number };
+    ClipperOffset: new (miterLimit?: number, arcTolerance?: number) => ClipperOffset;
+    PolyType: { ptSubject: number; ptClip: number };
+    PolyFillType: { pftEvenOdd: number; pftNonZero: number };
+    ClipType: { ctIntersection: number; ctUnion: number; ctDifference: number; ctXor: number };
+    JoinType: { jtSquare: number; jtRound: number; jtMiter: number };
+    EndType: { etClosedPolygon: number };
   };
   export default lib;
 }

@@ -32,6 +32,7 @@ import {
   spreadPiece,
   turnOf,
   spreadLengths,
+  slashLines,
 } from "@/lib/drafting/styles/spread-piece";
 import {
   edgeSteps,
@@ -186,16 +187,17 @@ function meeting(piece: Piece, { near, slashes }: SpreadAsk, wanted: number): Sp
     squared: ["head", "foot"],
     near,
   });
+  const lines = slashLines(asked(0));
   const miss = (headOpen: number) => {
     const ask = asked(headOpen);
-    return turnOf(ask) > WIDEST_TURN ? wanted : spreadLengths(ask).head - wanted;
+    return turnOf(ask, lines) > WIDEST_TURN ? wanted : spreadLengths(ask).head - wanted;
   };
   if (miss(0) > 0) return undefined;
   // All the slashes together open by nearly what the edge wants more: looked for round there, and all the way only else.
   const even = (wanted - top) / slashes;
   const close = even > 0 && miss(0.7 * even) < 0 && miss(1.1 * even) > 0;
   const [low, high] = close ? [0.7 * even, 1.1 * even] : [0, wanted];
-  const ask = asked(findRoot(miss, low, high, SAME / (20 * slashes)));
+  const ask = asked(findRoot(miss, low, high, SAME / (4 * slashes)));
   return Math.abs(miss(ask.headOpen)) < SAME / 2 ? ask : undefined;
 }
 

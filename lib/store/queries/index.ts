@@ -2,6 +2,7 @@
 import { type Query } from "../query";
 import { binQuery } from "./bin";
 import { clientCardQuery, clientListQuery } from "./clients";
+import { chosenWearersQuery, manyWearersQuery } from "./many";
 import { orderCardQuery, orderListQuery, orderPeopleQuery, receiptQuery } from "./orders";
 import { sleeveListQuery, sleevesQuery } from "./sleeves";
 import { sumListQuery, sumQuery } from "./sums";
@@ -17,6 +18,8 @@ const queries: Query<any, any>[] = [
   clientCardQuery,
   wearerCardQuery,
   setCardQuery,
+  manyWearersQuery,
+  chosenWearersQuery,
   sleeveListQuery,
   sleevesQuery,
   orderListQuery,

@@ -12,7 +12,7 @@ import {
   translate,
 } from "transformation-matrix";
 import { describe, expect, it } from "vitest";
-import { markSteps, type Point, type SleeveAsk, type StyleStep } from "@/lib/drafting";
+import { markSteps, type PatternPiece, type Point, type SleeveAsk, type StyleStep } from "@/lib/drafting";
 import { EIGHTH, handCurve, print, read, redraw, tape, tapeAt } from "./hand";
 import { inches, sample, value } from "./helpers";
 import { edgeOf, made, type Made, pieceOf } from "./style-asks";
@@ -198,11 +198,13 @@ describe.each([
   ["a woman's leg-of-mutton", "leg-of-mutton", woman, {}],
   ["one with four cuts", "leg-of-mutton", woman, { slashes: 4, headOpen: 40 }],
 ] as const)("%s, drawn from its printed steps", (_, style, block, values) => {
-  const drafted = made(style, block, values, EIGHTH);
-  const piece = pieceOf(drafted, style === "statement" ? "upper" : "sleeve");
-  const hand = byHand(drafted);
+  const both = (): { piece: PatternPiece; hand: ReturnType<typeof byHand> } => {
+    const drafted = made(style, block, values, EIGHTH);
+    return { piece: pieceOf(drafted, style === "statement" ? "upper" : "sleeve"), hand: byHand(drafted) };
+  };
 
   it("has its marks where they were drafted, within 2 mm", () => {
+    const { hand, piece } = both();
     const head = edgeOf(piece, "head").flatMap((curve) => sample(curve, 40));
     // The cap seam is a hand's own curve, so that places along it may shift by a pencil line or two.
     for (const mark of hand.headMarks)
@@ -210,6 +212,7 @@ describe.each([
   });
 
   it("has the drafted head within 1/8 in, and measures what the sheet says", () => {
+    const { hand, piece } = both();
     const at = (id: string) => piece.notches.find((notch) => notch.id === id)!.at;
     const drawn = edgeOf(piece, "head").flatMap((curve) => sample(curve, 40));
     expect(apart(hand.head, drawn)).toBeLessThan(inches(1 / 8));
@@ -219,6 +222,7 @@ describe.each([
   });
 
   it("has the drafted lower edge, where it was drawn anew", () => {
+    const { hand, piece } = both();
     if (!hand.foot) {
       expect(style).toBe("leg-of-mutton");
       return;

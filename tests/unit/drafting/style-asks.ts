@@ -1,5 +1,5 @@
 /** Asks for styles over random figures, and what is measured on the pieces without the engine. */
-import fc from "fast-check";
+import type fc from "fast-check";
 import { svgPathProperties } from "svg-path-properties";
 import { type CubicBezier, makeStyle, type PatternPiece, type SleeveAsk } from "@/lib/drafting";
 import { human, svgPath } from "./helpers";

@@ -5,7 +5,7 @@ import { type Group, paginate } from "@/lib/pdf/paginate";
 import { splitGraphemes } from "@/lib/pdf/text-runs";
 import { typesetter } from "@/lib/pdf/typesetter";
 import { boxPainter, printFonts } from "./print-tools";
-import { lettersOf } from "./read-pdf";
+import { lettersOf } from "@/tests/support/read-pdf";
 
 const set = typesetter(printFonts, boxPainter());
 const style = { size: 10 };

@@ -5,7 +5,7 @@ import { type MarksPaper, marksPapers } from "@/lib/pdf/papers";
 import { drawStep } from "@/lib/pdf/step-drawing";
 import { typesetter } from "@/lib/pdf/typesetter";
 import { boxPainter, printFonts, printTools } from "./print-tools";
-import { readPdf, wordsOf } from "./read-pdf";
+import { readPdf, wordsOf } from "@/tests/support/read-pdf";
 
 const papers = Object.keys(marksPapers) as MarksPaper[];
 // A4 and Letter: sources.md (seen). A5: half an A4 to the millimetre.

@@ -9,7 +9,7 @@ import {
   triedAsks,
   usualReach,
 } from "@/lib/sleeves/ask-from-set";
-import { makeFromRecord } from "@/lib/sleeves/make-from-record";
+import { styleFromRecord } from "@/lib/sleeves/make-style-from-record";
 import { emptyForm, readForm } from "@/lib/sleeves/sleeve-form";
 
 const cm = (figures: Record<string, number>) =>
@@ -110,7 +110,8 @@ describe("a sleeve's first figures from a measurement set", () => {
   ] as const)("draws a sleeve with nothing wrong: %s", (_, figures, ageYears, reach) => {
     for (const unit of ["in", "cm"] as const) {
       const ask = askFromSet({ figures, ageYears, reach, unit, fineness: 8 });
-      const made = makeFromRecord(readForm(fillFromSet(emptyForm(unit, 8), ask, null)).record);
+      const { record } = readForm(fillFromSet(emptyForm(unit, 8), ask, null));
+      const made = styleFromRecord({ style: "plain", ask: record });
       expect(made?.ok).toBe(true);
       if (made?.ok) expect(made.checks.filter(({ verdict }) => verdict === "wrong")).toEqual([]);
     }

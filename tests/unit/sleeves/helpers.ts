@@ -1,9 +1,6 @@
-import { type MadeSleeve } from "@/lib/drafting";
-import { type SleeveAskRecord, type Unit } from "@/lib/records/types";
-import { makeFromRecord, markedFromRecord } from "@/lib/sleeves/make-from-record";
+import { type SleeveAskRecord, type StyleId, type Unit } from "@/lib/records/types";
+import { type GoodSleeve, markedFromRecord, styleFromRecord } from "@/lib/sleeves/make-style-from-record";
 import { type FigureKey } from "@/lib/sleeves/sleeve-figures";
-
-export type Good = MadeSleeve & { ok: true };
 
 /** Lengths in inches, as typed in an inch workshop. */
 export function record(
@@ -32,14 +29,14 @@ export const woman = record({
   elbowGirth: 9.35,
 });
 
-export function good(ask: SleeveAskRecord): Good {
-  const made = makeFromRecord(ask);
+export function good(ask: SleeveAskRecord, style: StyleId = "plain"): GoodSleeve {
+  const made = styleFromRecord({ style, ask });
   if (!made?.ok) throw new Error(JSON.stringify(made));
   return made;
 }
 
-export function marked(ask: SleeveAskRecord, unit: Unit = "in") {
-  const found = markedFromRecord(ask, unit, 8);
+export function marked(ask: SleeveAskRecord, unit: Unit = "in", style: StyleId = "plain") {
+  const found = markedFromRecord({ style, ask }, unit, 8);
   if (!found || !("exact" in found) || !found.rounded.ok) throw new Error(JSON.stringify(found));
-  return { exact: found.exact, rounded: found.rounded as Good, step: found.step };
+  return { exact: found.exact, rounded: found.rounded, step: found.step };
 }

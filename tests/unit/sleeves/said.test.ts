@@ -2,12 +2,12 @@ import { describe, expect, it } from "vitest";
 import { phraseText } from "@/lib/lengths/phrase";
 import { comparedIds, comparedRows } from "@/lib/sleeves/compare";
 import { boundsPhrase, countLine, headLine, sourceLine } from "@/lib/sleeves/head-line";
-import { makeFromRecord } from "@/lib/sleeves/make-from-record";
+import { styleFromRecord } from "@/lib/sleeves/make-style-from-record";
 import { suggestedName } from "@/lib/sleeves/sleeve-name";
 import { child, good, record, woman } from "./helpers";
 
 const says = (ask: typeof child, unit: "in" | "cm" = "in") => {
-  const line = headLine(makeFromRecord(ask)!, ask);
+  const line = headLine(styleFromRecord({ style: "plain", ask })!, ask);
   return [line.verdict, phraseText(line.phrase, unit)];
 };
 
@@ -77,7 +77,9 @@ describe("checks in words", () => {
 
 describe("sleeves side by side", () => {
   it("sets each against the first, and says where one has no such figure", () => {
-    const rows = comparedRows([child, woman].map((ask) => ({ record: ask, made: makeFromRecord(ask) })));
+    const rows = comparedRows(
+      [child, woman].map((ask) => ({ record: ask, made: styleFromRecord({ style: "plain", ask }) })),
+    );
     const row = (name: string) => rows.find((one) => one.name === name)!;
     expect(row("Sleeve length").differences[0]).toBeNull();
     expect(row("Sleeve length").differences[1]).toBeCloseTo((21.4 - 9.5) * 25.4, 9);

@@ -2,7 +2,7 @@ import { describe, expect, it } from "vitest";
 import { type Sleeve } from "@/lib/records/types";
 import { fieldProblems } from "@/lib/sleeves/field-problems";
 import { markTexts, marksOf, parseShare } from "@/lib/sleeves/guide-marks";
-import { makeFromRecord } from "@/lib/sleeves/make-from-record";
+import { styleFromRecord } from "@/lib/sleeves/make-style-from-record";
 import {
   emptyForm,
   formInUnit,
@@ -105,7 +105,7 @@ describe("what stands beside the fields", () => {
   it("puts the engine's problem beside the figure in the way", () => {
     const filled = form({ ...four, capDepth: "1/8" });
     const read = readForm(filled);
-    const beside = fieldProblems(filled, makeFromRecord(read.record), read, false);
+    const beside = fieldProblems(filled, styleFromRecord({ style: "plain", ask: read.record }), read, false);
     expect(beside.problems.capDepth).toBeDefined();
     expect(beside.general).toEqual([]);
   });
@@ -113,7 +113,7 @@ describe("what stands beside the fields", () => {
   it("puts a wrong check beside its figure too, and asks for empty ones only once Keep was pressed", () => {
     const filled = form({ ...four, armholeFront: "10", armholeBack: "10" });
     const read = readForm(filled);
-    const beside = fieldProblems(filled, makeFromRecord(read.record), read, false);
+    const beside = fieldProblems(filled, styleFromRecord({ style: "plain", ask: read.record }), read, false);
     expect(beside.problems.armholeFront).toBeDefined();
     const empty = form({});
     expect(fieldProblems(empty, null, readForm(empty), false).errors).toEqual({});
@@ -128,7 +128,7 @@ describe("what stands beside the fields", () => {
     ]);
     const filled = form(four, { marks: { front: marks, back: null } });
     const read = readForm(filled);
-    const beside = fieldProblems(filled, makeFromRecord(read.record), read, false);
+    const beside = fieldProblems(filled, styleFromRecord({ style: "plain", ask: read.record }), read, false);
     expect([...beside.marks.front.keys()]).toEqual([2]);
   });
 });

@@ -1,14 +1,7 @@
-/** From a sleeve's record to the drawn and checked sleeve: the only way there, for the form and for kept sleeves. */
-import {
-  type Check,
-  type MadeSleeve,
-  makeSleeve,
-  remakeSleeve,
-  roundFigures,
-  type SleeveAsk,
-} from "@/lib/drafting";
-import { mmPerInch, stepOf } from "@/lib/lengths/units";
-import { type Fineness, type SleeveAskRecord, type Unit } from "@/lib/records/types";
+/** What the engine is asked for a sleeve's record. */
+import { type SleeveAsk } from "@/lib/drafting";
+import { mmPerInch } from "@/lib/lengths/units";
+import { type SleeveAskRecord } from "@/lib/records/types";
 import { type FigureKey } from "@/lib/sleeves/sleeve-figures";
 
 /**
@@ -22,7 +15,7 @@ export function usualBicepsEase(upperArmMm: number): number {
 }
 
 /** What the engine is asked, or null where a figure that it needs is not there. */
-function askOf({ lengths, frontMarks, backMarks, hemOpens }: SleeveAskRecord): SleeveAsk | null {
+export function askOf({ lengths, frontMarks, backMarks, hemOpens }: SleeveAskRecord): SleeveAsk | null {
   const mm = (key: FigureKey): number | undefined =>
     lengths[key] && lengths[key].typed !== "" ? lengths[key].mm : undefined;
   const length = mm("length");
@@ -64,37 +57,9 @@ function armholeOf(front: number | undefined, back: number | undefined, whole: n
 const ofTheHalves: ReadonlySet<string> = new Set(["cap-front", "cap-back", "balance"]);
 
 /** Leaves out the checks that would judge halves of an armhole nobody measured by halves. */
-function fitting(record: SleeveAskRecord, made: MadeSleeve): MadeSleeve {
-  if (!made.ok || !record.lengths.armholeWhole) return made;
-  return { ...made, checks: made.checks.filter(({ id }: Check) => !ofTheHalves.has(id)) };
-}
-
-/** The sleeve in full precision; null where a needed figure is missing. */
-export function makeFromRecord(record: SleeveAskRecord): MadeSleeve | null {
-  const ask = askOf(record);
-  return ask && fitting(record, makeSleeve(ask));
-}
-
-export interface MarkedSleeve {
-  /** As the figures have it. */
-  exact: MadeSleeve & { ok: true };
-  /** Drawn again from figures rounded to what a hand can set: the sleeve that will be cut. */
-  rounded: MadeSleeve;
-  /** mm. */
-  step: number;
-}
-
-/** The sleeve for the mark-out. Null, or the problems, where there is nothing to mark out. */
-export function markedFromRecord(
+export function fitting<C extends { readonly id: string }>(
   record: SleeveAskRecord,
-  unit: Unit,
-  fineness: Fineness,
-): MarkedSleeve | (MadeSleeve & { ok: false }) | null {
-  const ask = askOf(record);
-  if (!ask) return null;
-  const exact = fitting(record, makeSleeve(ask));
-  if (!exact.ok) return exact;
-  const step = stepOf(unit, fineness);
-  const rounded = fitting(record, remakeSleeve(ask, roundFigures(exact.figures, step)));
-  return { exact, rounded, step };
+  checks: readonly C[],
+): C[] {
+  return checks.filter(({ id }) => !record.lengths.armholeWhole || !ofTheHalves.has(id));
 }
