@@ -46,7 +46,13 @@ const ruffleSum: SumFields = {
   orderId: null,
   kind: "ruffle",
   name: "Ruffle for a hem, tried out",
-  inputs: { seam: { typed: "15", mm: 381 }, ratio: { typed: "2 1/2", value: 2.5 } },
+  inputs: {
+    seam: { typed: "15", mm: 381 },
+    ratio: { typed: "2 1/2", value: 2.5 },
+    width: { typed: "45", mm: 1143 },
+    join: { typed: "1/4", mm: 6.35 },
+    ends: { typed: "open", value: "open" },
+  },
   note: "",
 };
 

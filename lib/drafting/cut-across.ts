@@ -1,7 +1,7 @@
 /** Cutting a sleeve in two, square across its centre line. */
 import { curveLength, lengthUpTo, line, pointOn } from "@/lib/drafting/measure";
-import { along, edgeOf, type EdgePlace, joinEdges, startOf } from "@/lib/drafting/outline";
-import { type CubicBezier, type Edge, type Piece } from "@/lib/drafting/types";
+import { along, begunAt, edgeOf, type EdgePlace, joinEdges, startOf } from "@/lib/drafting/outline";
+import { type CubicBezier, type Piece } from "@/lib/drafting/types";
 
 /**
  * Where a chain crosses the level `y`, mm along it: the first curve with an end on either side of it, halved down to the
@@ -46,7 +46,7 @@ export function cutAcross(piece: Piece, y: number): { readonly upper: Piece; rea
   return {
     upper: {
       ...piece,
-      edges: firstIs(upper, piece.edges[0]!.name),
+      edges: begunAt(upper, piece.edges[0]!.name),
       notches: piece.notches.filter(({ edge }) =>
         above.some((one) => one.name === edge && !/^underarm/.test(edge)),
       ),
@@ -67,10 +67,4 @@ function sidePlace(piece: Piece, edge: string, y: number): EdgePlace {
   const at = levelOn(edgeOf(piece, edge).curves, y);
   if (at === undefined) throw new RangeError(`The level ${y} does not cross ${edge}`);
   return { edge, at };
-}
-
-/** The same ring, begun at the edge of that name. */
-export function firstIs(edges: readonly Edge[], name: string): Edge[] {
-  const at = edges.findIndex((edge) => edge.name === name);
-  return [...edges.slice(at), ...edges.slice(0, at)];
 }

@@ -81,6 +81,15 @@ export function joinEdges(edges: readonly Edge[]): Edge[] {
   return joined;
 }
 
+/** The same ring, begun where the edge `first` begins, every edge whole, wherever it was begun before. */
+export function begunAt(ring: readonly Edge[], first: string): Edge[] {
+  const at = Math.max(
+    0,
+    ring.findIndex(({ name }, i) => name === first && ring.at(i - 1)!.name !== first),
+  );
+  return joinEdges([...ring.slice(at), ...ring.slice(0, at)]);
+}
+
 /** One edge drawn anew between the same ends. @throws where an end has moved: the outline would open. */
 export function withEdge<P extends Outline>(piece: P, name: string, curves: readonly CubicBezier[]): P {
   const before = edgeOf(piece, name).curves;

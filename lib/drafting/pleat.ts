@@ -3,10 +3,10 @@ import { chainLength, curveLength, line, pointAt, reversed } from "@/lib/draftin
 import { leftOf } from "@/lib/drafting/offset";
 import {
   along,
-  type EdgePlace,
+  begunAt,
   edgeOf,
+  type EdgePlace,
   endOf,
-  joinEdges,
   moveEdges,
   type Outline,
   startOf,
@@ -227,12 +227,6 @@ function over(point: Point, on: Point, away: Point): Point {
 
 function placePoint(piece: Piece, { edge, at }: EdgePlace): Point {
   return pointAt(edgeOf(piece, edge).curves, at).point;
-}
-
-/** The ring was begun inside an edge: set going where the edge `first` begins, every edge whole. */
-function begunAt(ring: readonly Edge[], first: string): Edge[] {
-  const at = ring.findIndex(({ name }, i) => name === first && ring.at(i - 1)!.name !== first);
-  return joinEdges([...ring.slice(at), ...ring.slice(0, at)]);
 }
 
 /** Opens from the last knife to the first, so that the places of those before it still hold; then sets all about the middle. */

@@ -1,6 +1,6 @@
 /** Slash and spread: a piece cut into panels that are moved apart, none of them bent. */
 import { distance, line } from "@/lib/drafting/measure";
-import { along, type EdgePlace, edgeOf, joinEdges, moveEdges, type Outline } from "@/lib/drafting/outline";
+import { along, begunAt, edgeOf, type EdgePlace, moveEdges, type Outline } from "@/lib/drafting/outline";
 import { angleOf, moveBy, movePoint, type Rigid, STILL, afterwards, turnAbout } from "@/lib/drafting/rigid";
 import { pointAt } from "@/lib/drafting/measure";
 import { type Edge, type Notch, type Piece, type Point } from "@/lib/drafting/types";
@@ -198,18 +198,7 @@ function wholeRing(
       ring.push({ name: slash.to.edge, curves: [line(lips[i]!.foot.after, lips[i]!.foot.before)] });
     ring.push(...moveEdges(stretches[i]!.back, motions[i]!));
   }
-  return fromTheStart(joinEdges(ring), piece.edges[0]!.name);
-}
-
-/** The ring was begun in the middle of its foot: that edge made whole, and the old first edge first. */
-function fromTheStart(ring: readonly Edge[], first: string): Edge[] {
-  const [head, last] = [ring[0]!, ring.at(-1)!];
-  const whole =
-    ring.length > 1 && head.name === last.name
-      ? [...ring.slice(1, -1), { name: head.name, curves: [...last.curves, ...head.curves] }]
-      : [...ring];
-  const at = whole.findIndex((edge) => edge.name === first);
-  return [...whole.slice(at), ...whole.slice(0, at)];
+  return begunAt(ring, piece.edges[0]!.name);
 }
 
 /** A notch stays on its panel; along the edge it has moved on by what was opened before it. */

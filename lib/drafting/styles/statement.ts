@@ -70,7 +70,7 @@ export const statement: StyleRecipe = {
         said: "the opening of each slash at the lower edge",
         does: "Wider, the lower edge gathers more onto the lower part.",
         kind: "length",
-        usual: 0.375 * INCH * scale,
+        usual: 0.5 * INCH * scale,
         low: 0,
         high: 4 * INCH,
       },
