@@ -52,7 +52,7 @@ export function CutListCard({ cloth, count, fineness, not, pieces, style, unit }
           </ul>
         </section>
       ))}
-      <ShareButton title={title} text={manyText({ title, pieces, cloth, left: not, ...units })} />
+      <ShareButton title={title} text={manyText(title, { pieces, cloth, left: not, ...units })} />
     </Card>
   );
 }

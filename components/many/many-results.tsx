@@ -3,6 +3,7 @@
 import { type Dispatch, type SetStateAction, useMemo, useState } from "react";
 import { Button } from "@/components/ui/button";
 import { Card, CardHead } from "@/components/ui/card";
+import { manyLists } from "@/lib/many/many-text";
 import { stepOf } from "@/lib/lengths/units";
 import { clothRows } from "@/lib/many/cloth-rows";
 import { cutList } from "@/lib/many/cut-list";
@@ -48,6 +49,10 @@ export function ManyResults(props: ManyResultsProps) {
     () => clothRows(pieces, clothWidth, shrinks, unit),
     [pieces, clothWidth, shrinks, unit],
   );
+  const lists = useMemo(
+    () => manyLists({ pieces, cloth, left: not, unit, fineness }),
+    [pieces, cloth, not, unit, fineness],
+  );
   const units = { unit, fineness };
   const shown = drafted.slice(0, limit);
   return (
@@ -76,7 +81,7 @@ export function ManyResults(props: ManyResultsProps) {
             <div className="grid grid-cols-[minmax(0,1fr)] gap-4">
               <ClothFields {...{ form, read, onPatch }} />
               <ClothCard cloth={cloth} not={not} shrinks={shrinks} />
-              <PrintMany {...{ ...units, allowance, style, today, workshopName }} drafted={inOrder} />
+              <PrintMany {...{ ...units, allowance, lists, style, today, workshopName }} drafted={inOrder} />
             </div>
           </div>
         </>

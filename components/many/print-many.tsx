@@ -9,6 +9,7 @@ import { type DraftedWearer } from "@/lib/many/draft-many";
 import { inTurns } from "@/lib/many/in-turns";
 import { printedOne } from "@/lib/many/print-many";
 import { type IsoDate } from "@/lib/people/iso-date";
+import { type TitledList } from "@/lib/pdf/full-size-document";
 import { type FullSizePaper, rollWidths } from "@/lib/pdf/papers";
 import { type OnProgress } from "@/lib/pdf/pdf-api";
 import { type Fineness, type StyleId, type Unit } from "@/lib/records/types";
@@ -17,6 +18,8 @@ import { screenTurns } from "./screen-turns";
 
 export interface PrintManyProps {
   drafted: readonly DraftedWearer[];
+  /** Printed after the contents. */
+  lists: readonly TitledList[];
   /** mm. */
   allowance: number;
   style: StyleId;
@@ -39,7 +42,7 @@ const papers: { value: FullSizePaper; label: string; sub?: string }[] = [
 
 /** Everyone's pattern at full size in one file, with a page of contents before them. */
 export function PrintMany(props: PrintManyProps) {
-  const { allowance, drafted, fineness, style, today, unit, workshopName } = props;
+  const { allowance, drafted, fineness, lists, style, today, unit, workshopName } = props;
   const [allowed, setAllowed] = useState(true);
   const width = allowed ? allowance : null;
   const make = useCallback(
@@ -52,9 +55,9 @@ export function PrintMany(props: PrintManyProps) {
         onTurn: (done) => onProgress(done, 2 * of),
       });
       const { makeFullSize } = await import("@/lib/pdf/client");
-      return makeFullSize({ docs: docs!, paper }, (done, all) => onProgress(all + done, 2 * all));
+      return makeFullSize({ docs: docs!, lists, paper }, (done, all) => onProgress(all + done, 2 * all));
     },
-    [drafted, width, unit, fineness, workshopName, today],
+    [drafted, lists, width, unit, fineness, workshopName, today],
   );
   const wrong = drafted.filter(({ verdict }) => verdict === "wrong").length;
   return (
@@ -62,7 +65,7 @@ export function PrintMany(props: PrintManyProps) {
       <CardHead
         id="print-many-title"
         title="Print all full size"
-        sub="All sheets in one file, a page of contents first."
+        sub="All sheets in one file; contents, cut list and cloth first."
       />
       {wrong > 0 && (
         <Notice

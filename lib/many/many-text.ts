@@ -3,6 +3,7 @@ import { formatPlain } from "@/lib/lengths/format-length";
 import { type ClothRow } from "@/lib/many/cloth-rows";
 import { type CutPiece, type CutSize } from "@/lib/many/cut-list";
 import { type NotDrafted } from "@/lib/many/draft-many";
+import { type TitledList } from "@/lib/pdf/full-size-document";
 import { type Fineness, type Unit } from "@/lib/records/types";
 
 /** "13 1/2 in × 9 in": across, then along. */
@@ -16,28 +17,33 @@ export function buyWords({ buy }: ClothRow): string {
   return `${buy.metres} or ${buy.yards}`;
 }
 
-/** The cut list and the cloth as a message. */
-export function manyText(ask: {
-  title: string;
+export interface ManyLists {
   pieces: readonly CutPiece[];
   cloth: readonly ClothRow[];
   left: readonly NotDrafted[];
   unit: Unit;
   fineness: Fineness;
-}): string {
-  const { cloth, fineness, left, pieces, title, unit } = ask;
+}
+
+/** The cut list and the cloth, each a list under its title: for a message, and for the page before the patterns. */
+export function manyLists({ cloth, fineness, left, pieces, unit }: ManyLists): TitledList[] {
   return [
-    title,
-    ...pieces.flatMap(({ count, name, onFold, sizes }) => [
-      "",
-      `${name}: cut ${count} in all${onFold ? ", on the fold" : ""}`,
-      ...sizes.map(
+    ...pieces.map(({ count, name, onFold, sizes }) => ({
+      title: `${name}: cut ${count} in all${onFold ? ", on the fold" : ""}`,
+      lines: sizes.map(
         (size) => `${size.count} of ${sizeWords(size, unit, fineness)}: ${namesInWords(size.wearers)}`,
       ),
-    ]),
-    "",
-    "Cloth by simple widths, on the safe side:",
-    ...cloth.map((row) => `${row.width} wide: ${buyWords(row)}`),
-    ...(left.length > 0 ? ["", `Not counted: ${namesInWords(left.map(({ wearer }) => wearer.name))}`] : []),
-  ].join("\n");
+    })),
+    {
+      title: "Cloth by simple widths, on the safe side:",
+      lines: [
+        ...cloth.map((row) => `${row.width} wide: ${buyWords(row)}`),
+        ...(left.length > 0 ? [`Not counted: ${namesInWords(left.map(({ wearer }) => wearer.name))}`] : []),
+      ],
+    },
+  ];
+}
+
+export function manyText(title: string, lists: ManyLists): string {
+  return [title, ...manyLists(lists).flatMap((list) => ["", list.title, ...list.lines])].join("\n");
 }

@@ -51,9 +51,16 @@ export interface FullSizeDocument {
   readonly lang?: string;
 }
 
+export interface TitledList {
+  readonly title: string;
+  readonly lines: readonly string[];
+}
+
 /** What is asked of the printing worker. */
 export interface FullSizeJob {
   readonly docs: readonly FullSizeDocument[];
+  /** Printed after the contents of several documents: what to cut in all, what to buy. */
+  readonly lists?: readonly TitledList[];
   readonly paper: FullSizePaper;
   /** Names of the sheets wanted, for one document; absent: all. */
   readonly only?: readonly string[];

@@ -1,7 +1,7 @@
 /** Patterns at full size as a PDF: one wearer's sheets, or those of many with a page of contents before them. */
 import { type Block, moved, row, rule, space, stack } from "@/lib/pdf/blocks";
 import { compose, type ComposedPage } from "@/lib/pdf/compose";
-import { type FullSizeDocument, type FullSizeJob } from "@/lib/pdf/full-size-document";
+import { type FullSizeDocument, type FullSizeJob, type TitledList } from "@/lib/pdf/full-size-document";
 import { type FullSizeLayout, layOut } from "@/lib/pdf/full-size-layout";
 import { sheetPage } from "@/lib/pdf/full-size-sheet";
 import { longDate } from "@/lib/pdf/long-date";
@@ -24,7 +24,10 @@ interface Laid {
  * The file. Several documents get a page of contents.
  * @throws PrintProblem where there is nothing to print or too much of it.
  */
-export function fullSizePdf({ docs, paper, only }: FullSizeJob, tools: PrintTools): Promise<ArrayBuffer> {
+export function fullSizePdf(
+  { docs, lists = [], paper, only }: FullSizeJob,
+  tools: PrintTools,
+): Promise<ArrayBuffer> {
   const [first] = docs;
   if (!first) throw printProblem("There is nothing to print. Choose a sleeve first.");
   const set = typesetter(tools.fonts, tools.painter);
@@ -34,7 +37,7 @@ export function fullSizePdf({ docs, paper, only }: FullSizeJob, tools: PrintTool
     throw printProblem(
       `Together these take ${count} sheets, more than one file can hold. Print them for fewer wearers at a time, or on larger paper.`,
     );
-  const pages = docs.length === 1 ? chosenPages(laid[0]!, only, set) : manyPages(laid, paper, set);
+  const pages = docs.length === 1 ? chosenPages(laid[0]!, only, set) : manyPages({ laid, lists, paper }, set);
   const facts = {
     title: docs.length === 1 ? present([first.title, first.wearer]).join(", ") : contentsTitle(docs),
     author: first.author ?? "",
@@ -56,11 +59,18 @@ function chosenPages({ doc, layout }: Laid, only: FullSizeJob["only"], set: Type
   return pages;
 }
 
-function manyPages(laid: readonly Laid[], paper: FullSizePaper, set: Typesetter): ComposedPage[] {
+interface Many {
+  readonly laid: readonly Laid[];
+  readonly lists: readonly TitledList[];
+  readonly paper: FullSizePaper;
+}
+
+function manyPages(many: Many, set: Typesetter): ComposedPage[] {
+  const { laid } = many;
   // The page numbers in the contents depend on how many pages the contents take.
-  let before = contents(laid, 1, paper, set).length;
-  let front = contents(laid, before, paper, set);
-  if (front.length !== before) front = contents(laid, (before = front.length), paper, set);
+  let before = contents(many, 1, set).length;
+  let front = contents(many, before, set);
+  if (front.length !== before) front = contents(many, (before = front.length), set);
   const of = before + laid.reduce((sum, { layout }) => sum + layout.sheets.length, 0);
   let page = before;
   const sheets = laid.flatMap(({ doc, layout }) =>
@@ -76,7 +86,7 @@ const HEADS = ["Wearer", "Sleeve", "Pages"] as const;
 const BASE = 11;
 
 /** `before` is how many pages the contents take. */
-function contents(laid: readonly Laid[], before: number, on: FullSizePaper, set: Typesetter): ComposedPage[] {
+function contents({ laid, lists, paper: on }: Many, before: number, set: Typesetter): ComposedPage[] {
   const paper = fullSizePaper(on);
   const width = inner(paper);
   const docs = laid.map(({ doc }) => doc);
@@ -121,7 +131,7 @@ function contents(laid: readonly Laid[], before: number, on: FullSizePaper, set:
       ),
     ],
   };
-  return compose([intro, ...rows], paper, {
+  return compose([intro, ...rows, ...lists.map((list) => listed(list, width, set))], paper, {
     head: () =>
       stack([
         ...set.lines(`${title}, continued`, { size: BASE, bold: true }, { x: 0, width }),
@@ -130,4 +140,17 @@ function contents(laid: readonly Laid[], before: number, on: FullSizePaper, set:
     foot: (page) =>
       moved(stack(set.lines(`Page ${page}`, { size: BASE }, { x: 0, width, align: "right" })), 0, BASE * 0.6),
   });
+}
+
+/** A title that stays with its first line. */
+function listed({ lines, title }: TitledList, width: number, set: Typesetter): Group {
+  const blocks = (text: string, bold: boolean) => set.lines(text, { size: BASE, bold }, { x: 0, width });
+  const [first = "", ...rest] = lines;
+  return {
+    gap: BASE * 1.2,
+    parts: [
+      stack([...blocks(title, true), ...(first ? blocks(first, false) : [])]),
+      ...rest.flatMap((line) => blocks(line, false)),
+    ],
+  };
 }

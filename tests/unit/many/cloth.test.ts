@@ -77,8 +77,7 @@ describe("the cut list", () => {
   });
 
   it("is sent as words with the cloth, and who is not counted", () => {
-    const text = manyText({
-      title: "Bishop for 3",
+    const text = manyText("Bishop for 3", {
       pieces: list,
       cloth: clothRows(list, null, 0, "in"),
       left: [

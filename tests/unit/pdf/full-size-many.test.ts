@@ -38,6 +38,19 @@ describe("chosen sheets", () => {
   });
 });
 
+describe("what is to be cut in all", () => {
+  it("stands after the contents, every line of it, and pushes the pages on where it is long", async () => {
+    const docs = ["Ama", "Bibi"].map((wearer) => sample({ wearer, pieces: sample().pieces.slice(0, 1) }));
+    const lines = Array.from({ length: 90 }, (_, i) => `Row ${i + 1} of the list`);
+    const { pages } = await read({ docs, lists: [{ title: "Sleeve: cut 4 in all", lines }], paper: "a4" });
+    const first = pages.findIndex((page) => wordsOf([page]).includes("50 mm"));
+    expect(first).toBeGreaterThan(1);
+    const front = wordsOf(pages.slice(0, first));
+    for (const words of ["Sleeve: cut 4 in all", ...lines]) expect(front).toContain(words);
+    expect(front).toContain(`${first + 1} to `);
+  });
+});
+
 describe("a choir", () => {
   const names = ["Ama", "Юлия", "Nguyễn Thị Ánh", "Marisol"];
   const docs = names.map((wearer, i) =>
