@@ -14,7 +14,7 @@ import {
   type StyleFigure,
   type StyleRecipe,
 } from "@/lib/drafting/styles/context";
-import { edgeSize, pattern, underarmWalk } from "@/lib/drafting/styles/parts";
+import { clothWidthFigure, edgeSize, pattern, underarmWalk } from "@/lib/drafting/styles/parts";
 import { downTo, EMPTY, headSeam, outlined, setIn, work } from "@/lib/drafting/styles/plain-sleeve";
 import { joinSteps } from "@/lib/drafting/styles/spread-steps";
 
@@ -30,7 +30,8 @@ export const flounced: StyleRecipe = {
   name: "Flounced",
   look: "Plain to a seam, and below it a flounce that falls in soft folds without a gather.",
   replaces: ["hem-wrist", "hem-hand", "hem-arm"],
-  figures: ({ figures: { biceps, capDepth, length } }, typed): StyleFigure[] => {
+  figures: (ground, typed): StyleFigure[] => {
+    const { biceps, capDepth, length } = ground.figures;
     const scale = Math.min(1, biceps / (12 * INCH));
     const depth: StyleFigure = {
       key: "depth",
@@ -65,6 +66,7 @@ export const flounced: StyleRecipe = {
         low: 1.1,
         high: 6,
       },
+      clothWidthFigure(ground),
     ];
   },
   make: (context) => {
@@ -91,7 +93,7 @@ export const flounced: StyleRecipe = {
       return impossible(
         "depth",
         "ring-too-wide",
-        say`A flounce ${depth} deep does not fit on cloth ${context.clothWidth} wide.`,
+        say`A flounce ${depth} deep does not fit on cloth ${values.clothWidth!} wide.`,
         say`Make it less deep, or take wider cloth.`,
       );
     const ring: Ring = { radius, depth, angle: ringAngle(seam, radius) / parts };
@@ -142,14 +144,14 @@ function tooTight({ fullness, depth, radius }: Tight): StyleResult {
 
 /** How many rings: none may close on itself, and each must lie on the cloth. */
 function partsFor(
-  { clothWidth }: StyleContext,
+  { values }: StyleContext,
   { radius, depth, seam }: { radius: number; depth: number; seam: number },
 ): number | undefined {
   const angle = ringAngle(seam, radius);
   for (let parts = ringParts(angle, radius); parts <= MOST_RINGS; parts++) {
     const { edges } = ringPiece({ radius, depth, angle: angle / parts });
     const { min, max } = bounds(edges.flatMap(({ curves }) => [...curves]));
-    if (Math.min(max.x - min.x, max.y - min.y) + BESIDE <= clothWidth) return parts;
+    if (Math.min(max.x - min.x, max.y - min.y) + BESIDE <= values.clothWidth!) return parts;
   }
   return undefined;
 }

@@ -1,10 +1,11 @@
 /** What recipes share: the block's seams, the walk of a gathered edge, checks of gathers, rectangles. */
+import { INCH } from "@/lib/drafting/guide";
 import { chainLength, line } from "@/lib/drafting/measure";
 import { edgeOf } from "@/lib/drafting/outline";
 import { type Cloth, type Gather, type PatternPiece, type StyleCheck } from "@/lib/drafting/pattern";
 import { say } from "@/lib/drafting/say";
 import { LINE_WIDTH, ratioWords, walk, type WalkedSeam } from "@/lib/drafting/seams";
-import { type StyleGround } from "@/lib/drafting/styles/context";
+import { type StyleFigure, type StyleGround } from "@/lib/drafting/styles/context";
 import { type Edge, type Piece, type Point } from "@/lib/drafting/types";
 
 /** Places along the block's cap seam taken as one edge from the front underarm point, mm. */
@@ -143,4 +144,18 @@ export function rectangle(length: number, depth: number, grainAlong: "length" | 
 
 export function edgeSize(piece: Piece, edge: string): number {
   return chainLength(edgeOf(piece, edge).curves);
+}
+
+/** How wide the cloth is that strips and rings are cut from; what the maker knows already is the usual one. */
+export function clothWidthFigure({ clothWidth }: StyleGround): StyleFigure {
+  return {
+    key: "clothWidth",
+    label: "Width of the cloth",
+    said: "the width of the cloth",
+    does: "Nothing to the look: on narrower cloth there are more joins.",
+    kind: "length",
+    usual: clothWidth,
+    low: Math.min(12 * INCH, clothWidth),
+    high: Math.max(120 * INCH, 2 * clothWidth),
+  };
 }

@@ -14,6 +14,7 @@ import {
   type StyleRecipe,
 } from "@/lib/drafting/styles/context";
 import {
+  clothWidthFigure,
   edgeSize,
   gatherCheck,
   gatherOf,
@@ -36,7 +37,8 @@ export const tiered: StyleRecipe = {
   name: "Tiered",
   look: "A plain short top, and below it strips gathered one to the other, each fuller than the one above.",
   replaces: ["elbow", "hem-wrist", "hem-hand", "hem-arm"],
-  figures: ({ figures: { biceps, capDepth, length } }, typed): StyleFigure[] => {
+  figures: (ground, typed): StyleFigure[] => {
+    const { biceps, capDepth, length } = ground.figures;
     const scale = Math.min(1, biceps / (12 * INCH));
     const upperTo: StyleFigure = {
       key: "upperTo",
@@ -93,10 +95,12 @@ export const tiered: StyleRecipe = {
         low: 1.1,
         high: 3,
       },
+      clothWidthFigure(ground),
     ];
   },
   make: (context) => {
-    const { cloth, clothWidth, figures, near, values } = context;
+    const { cloth, figures, near, values } = context;
+    const clothWidth = values.clothWidth!;
     const level = Math.min(figures.length, near(values.upperTo!));
     const { piece, steps } = downTo(context, level);
     const upper = pattern(
@@ -113,7 +117,7 @@ export const tiered: StyleRecipe = {
     const tiers = tiersOf(context, edgeSize(upper, "foot"));
     if (!tiers)
       return impossible(
-        "fullness",
+        "clothWidth",
         "cloth-too-narrow",
         say`The cloth is only ${clothWidth} wide: no strip can be cut across it.`,
         say`Take wider cloth.`,
@@ -153,12 +157,18 @@ interface Tier {
 }
 
 /** Every tier from the top down, over a plain lower edge of `round` mm; undefined where the cloth is too narrow. */
-function tiersOf({ clothWidth, near, values }: StyleContext, round: number): Tier[] | undefined {
+function tiersOf({ near, values }: StyleContext, round: number): Tier[] | undefined {
   const tiers: Tier[] = [];
   const count = values.tiers!;
   let seam = round;
   for (const [i, word] of WORDS.slice(0, count).entries()) {
-    const strip = stripOf({ seam, ratio: values.fullness!, clothWidth, allowance: END, near });
+    const strip = stripOf({
+      seam,
+      ratio: values.fullness!,
+      clothWidth: values.clothWidth!,
+      allowance: END,
+      near,
+    });
     if (!strip) return undefined;
     const id = `tier-${i + 1}`;
     const depth = near(values.tierDepth!) + i * near(values.deepen!);

@@ -507,9 +507,9 @@ describe("the tiered sleeve", () => {
     expect(long.checks.find(({ id }) => id === "reach")!.verdict).toBe("look");
   });
 
-  it("names its fullness where no strip can be cut from the cloth", () => {
+  it("names the width of the cloth where no strip can be cut from it", () => {
     const result = makeStyle({ style: "tiered", block: child, values: {}, clothWidth: 60 });
-    expect(result.ok ? [] : result.problems.map(({ figure }) => figure)).toEqual(["fullness"]);
+    expect(result.ok ? [] : result.problems.map(({ figure }) => figure)).toEqual(["clothWidth"]);
   });
 });
 
