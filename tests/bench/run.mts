@@ -285,6 +285,8 @@ async function keeping(): Promise<void> {
     .getByRole("button", { name: /, more$/ })
     .first()
     .waitFor();
+  // tsx names inner functions through a helper that the page has not got.
+  await page.evaluate("globalThis.__name = (named) => named");
   const redrawn = await page.evaluate(async () => {
     const buttons = [...document.querySelectorAll<HTMLButtonElement>("main button")];
     const more = buttons.find((button) => /, more$/.test(button.textContent ?? ""))!;
